@@ -1,5 +1,6 @@
 /** How the project comes to know a value. `derived` and `bound` follow from a stated rule. */
-export type ProvenanceKind = 'sourced' | 'recalled' | 'derived' | 'bound' | 'common-practice' | 'firm';
+export type ProvenanceKind =
+  'sourced' | 'recalled' | 'derived' | 'bound' | 'common-practice' | 'firm';
 
 /** A value with where it comes from; the leaf of every profile's tree. */
 export interface ProfileValue<T extends number | string = number | string> {
