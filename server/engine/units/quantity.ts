@@ -146,7 +146,7 @@ export function parseQuantity(input: number | string, unit: UnitName): ParsedQua
       ? { ok: true, value: input }
       : refused('not-finite', 'The number is not finite.');
   }
-  const match = written.exec(input.trim());
+  const match = written.exec(input.trim().replace(/^−/, '-'));
   if (!match) {
     return refused('not-a-quantity', `Give a number in ${unit}, or a text such as "2.4 ${unit}".`);
   }

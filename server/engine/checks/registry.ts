@@ -1,0 +1,5 @@
+import type { Check } from './check';
+import { waler } from './waler/waler';
+
+/** Every check of the service; routes, batches and lists are made from it. */
+export const checks: readonly Check[] = [waler];

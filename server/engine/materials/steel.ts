@@ -1,0 +1,66 @@
+import { Refusal } from '../refusal';
+import type { ProfileReader } from '../profiles/reader';
+import { steelStrengths, type StrengthTable } from './steel-strengths';
+
+/** Steel as a check uses it, in N/mm². */
+export interface Steel {
+  /** Grade, or `f_y 275` where the caller gave the strength. */
+  readonly name: string;
+  readonly f_y: number;
+  readonly E: number;
+  readonly G: number;
+  /** Where f_y comes from. */
+  readonly clause: string;
+}
+
+/** EN 1993-1-1 3.2.6; E confirmed by the N_cr of CO-01 (MSB04 App. A.5), G by the contract. */
+export const STEEL_E = 210_000;
+export const STEEL_G = 81_000;
+
+/** Density for self-weight where no mass is published, EN 10365: 7850 kg/m³, in kg/mm³. */
+export const STEEL_DENSITY = 7.85e-6;
+
+/** m/s²; RB-01 (MSB04 App. A.1) takes 0.482 kN/m for the 49.1 kg/m of IPE 330. */
+export const GRAVITY = 9.81;
+
+/** S275, `S 275`, S275JR, S355J2+N, S460M: the strength class is the letter and the number. */
+function strengthClass(grade: string): string {
+  const match = /^S\s?(\d{3})/i.exec(grade.trim());
+  return match ? `S${match[1] ?? ''}` : grade.trim();
+}
+
+/**
+ * f_y of a grade at a thickness, by the table that the profile's annex chooses.
+ *
+ * @param thickness nominal thickness of the thickest part in mm
+ * @throws {Refusal} `unknown-grade`, `thickness-not-covered`
+ */
+export function yieldStrength(
+  grade: string,
+  thickness: number,
+  profile: ProfileReader,
+): { readonly f_y: number; readonly clause: string } {
+  const table = profile.choice<StrengthTable>('steel.strengths', [
+    'table-3.1',
+    'product-standards',
+  ]);
+  const name = strengthClass(grade);
+  const rows = Object.hasOwn(steelStrengths[table], name) ? steelStrengths[table][name] : undefined;
+  if (!rows) {
+    const known = Object.keys(steelStrengths[table]).join(', ');
+    throw refusal('unknown-grade', `No strength is held for ${grade}; known are ${known}.`);
+  }
+  const row = rows.find(({ upTo }) => thickness <= upTo);
+  if (!row) {
+    const clause = rows[0]?.fy.clause ?? '';
+    const message = `${clause} gives no strength of ${name} at ${thickness} mm.`;
+    throw refusal('thickness-not-covered', message, clause);
+  }
+  profile.record(`strengths.${table}.${name}.upTo${row.upTo}.fy`, row.fy);
+  return { f_y: row.fy.value, clause: `${row.fy.clause}, ${name}, t ≤ ${row.upTo} mm` };
+}
+
+function refusal(code: string, message: string, clause?: string): Refusal {
+  const item = { pointer: '/material/grade', code, message };
+  return new Refusal(code, message, [clause === undefined ? item : { ...item, clause }]);
+}

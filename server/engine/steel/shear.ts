@@ -1,0 +1,79 @@
+import { formula } from '../formula/formula';
+
+const AREA = 'EN 1993-1-1 6.2.6(3)';
+const RESISTANCE = 'EN 1993-1-1 6.2.6(2) (6.18)';
+const CRITERION = 'EN 1993-1-1 6.2.6(1) (6.17)';
+
+export const webHeight = formula({
+  symbol: 'h_w',
+  title: 'Height of the web between flanges',
+  unit: 'mm',
+  clause: AREA,
+  expression: 'h - 2 * t_f',
+  where: { h: 'mm', t_f: 'mm' },
+});
+
+export const shearAreaZ = formula({
+  symbol: 'A_v_z',
+  title: 'Shear area of a rolled I or H section, load along the web',
+  unit: 'mm^2',
+  clause: `${AREA}a`,
+  expression: 'max(A - 2 * b * t_f + (t_w + 2 * r) * t_f, eta * h_w * t_w)',
+  where: { A: 'mm^2', b: 'mm', t_f: 'mm', t_w: 'mm', r: 'mm', eta: '1', h_w: 'mm' },
+});
+
+/** Both flanges, as for IPE 330 in SSB05 4.1.1 (RB-07); 6.2.6(3)e of welded sections would count the fillets too. */
+export const shearAreaY = formula({
+  symbol: 'A_v_y',
+  title: 'Shear area of the flanges, load along y-y',
+  unit: 'mm^2',
+  clause: AREA,
+  expression: '2 * b * t_f',
+  where: { b: 'mm', t_f: 'mm' },
+});
+
+export const shearResistanceZ = formula({
+  symbol: 'V_pl_z_Rd',
+  title: 'Plastic shear resistance along the web',
+  unit: 'kN',
+  clause: RESISTANCE,
+  expression: 'A_v_z * (f_y / sqrt(3)) / gamma_M0',
+  where: { A_v_z: 'mm^2', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+export const shearResistanceY = formula({
+  symbol: 'V_pl_y_Rd',
+  title: 'Plastic shear resistance of the flanges',
+  unit: 'kN',
+  clause: RESISTANCE,
+  expression: 'A_v_y * (f_y / sqrt(3)) / gamma_M0',
+  where: { A_v_y: 'mm^2', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+export const shearZCriterion = formula({
+  symbol: 'utilisation',
+  title: 'Shear along the web',
+  unit: '1',
+  clause: CRITERION,
+  expression: 'V_z_Ed / V_pl_z_Rd',
+  where: { V_z_Ed: 'kN', V_pl_z_Rd: 'kN' },
+});
+
+export const shearYCriterion = formula({
+  symbol: 'utilisation',
+  title: 'Shear along the flanges',
+  unit: '1',
+  clause: CRITERION,
+  expression: 'V_y_Ed / V_pl_y_Rd',
+  where: { V_y_Ed: 'kN', V_pl_y_Rd: 'kN' },
+});
+
+/** Above 1 the web must be verified for shear buckling by EN 1993-1-5 section 5. */
+export const shearBucklingRatio = formula({
+  symbol: 'h_w_t_w',
+  title: 'Web slenderness over the limit for shear buckling',
+  unit: '1',
+  clause: 'EN 1993-1-1 6.2.6(6) (6.22)',
+  expression: 'h_w / t_w / (72 * epsilon / eta)',
+  where: { h_w: 'mm', t_w: 'mm', epsilon: '1', eta: '1' },
+});
