@@ -674,7 +674,7 @@ export interface components {
          * @description Units of an answer; `1` is a ratio, a class or a count.
          * @enum {string}
          */
-        readonly Unit: "mm" | "mm^2" | "mm^3" | "mm^4" | "mm^6" | "m" | "kN" | "kN/m" | "kN/m^2" | "kN m" | "kN m^2" | "kN/mm" | "N/mm^2" | "kg/m" | "kg/m^3" | "m/s" | "K" | "deg" | "1";
+        readonly Unit: "mm" | "mm^2" | "mm^3" | "mm^4" | "mm^6" | "m" | "N" | "kN" | "N/mm" | "kN/m" | "kN/m^2" | "kN m" | "kN m^2" | "kN/mm" | "N/mm^2" | "kg/m" | "kg/m^3" | "m/s" | "K" | "deg" | "1";
         /** A named number with its unit */
         readonly SymbolQuantity: {
             readonly symbol: components["schemas"]["Symbol"];
@@ -987,7 +987,7 @@ export interface components {
              * Format: uri-reference
              * @description The path that was asked.
              */
-            readonly instance?: string;
+            readonly instance: string;
             /**
              * @description Stable word for programs.
              * @example not-valid
@@ -998,7 +998,7 @@ export interface components {
             /** @description Whether the same request may succeed later. */
             readonly retryable: boolean;
             /** @description What is at fault, most specific first. */
-            readonly errors?: readonly components["schemas"]["ProblemItem"][];
+            readonly errors: readonly components["schemas"]["ProblemItem"][];
         };
     };
     responses: never;

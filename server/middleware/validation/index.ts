@@ -1,0 +1,1 @@
+export { prepareValidation, validateAnswer, validateRequest } from './validate';
