@@ -1,0 +1,48 @@
+import { spawn } from 'node:child_process';
+
+/**
+ * @typedef {object} RunOptions
+ * @property {string} [cwd]
+ * @property {NodeJS.ProcessEnv} [env]
+ * @property {{ uid: number, gid: number }} [as] another user to run as; for root only
+ * @property {'pipe' | 'inherit'} [output] `inherit` shows it instead of gathering it
+ * @typedef {{ code: number, stdout: string, stderr: string }} Ran
+ */
+
+/** @type {Set<import('node:child_process').ChildProcess>} */
+const underWay = new Set();
+
+/**
+ * Runs a program to its end; it has no standard input.
+ * @param {string} program @param {readonly string[]} args @param {RunOptions} [options]
+ * @returns {Promise<Ran>}
+ */
+export function run(program, args, options = {}) {
+  const { cwd, env, as, output = 'pipe' } = options;
+  return new Promise((resolve, reject) => {
+    const child = spawn(program, args, {
+      ...(cwd === undefined ? {} : { cwd }),
+      ...(env === undefined ? {} : { env }),
+      ...as,
+      stdio: ['ignore', output, output],
+    });
+    underWay.add(child);
+    let stdout = '';
+    let stderr = '';
+    child.stdout?.setEncoding('utf8').on('data', (text) => (stdout += text));
+    child.stderr?.setEncoding('utf8').on('data', (text) => (stderr += text));
+    child.on('error', (error) => {
+      underWay.delete(child);
+      reject(error);
+    });
+    child.on('close', (code) => {
+      underWay.delete(child);
+      resolve({ code: code ?? 1, stdout, stderr });
+    });
+  });
+}
+
+/** Ends whatever `run` has not finished; for when the command itself is told to stop. */
+export function stopRunning() {
+  for (const child of underWay) child.kill('SIGTERM');
+}
