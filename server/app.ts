@@ -1,0 +1,95 @@
+import express, { type Express } from 'express';
+import type { Pool } from 'pg';
+import type { Logger } from 'pino';
+import type { Check } from './engine/checks/check';
+import { checkRunner, type RunApart } from './features/checks/check-runner';
+import { checkRoutes } from './features/checks/checks.routes';
+import { CheckService, type Validate } from './features/checks/checks.service';
+import { contractRoutes, docs } from './features/docs/docs.routes';
+import { formulaRoutes } from './features/formulas/formulas.routes';
+import { healthRoutes } from './features/health/health.routes';
+import type { Readiness } from './features/health/readiness';
+import { homeRoutes } from './features/home/home.routes';
+import { KeyCache } from './features/keys/key-cache';
+import type { KeyStore } from './features/keys/key-store';
+import { KeyUse } from './features/keys/key-use';
+import { problemRoutes } from './features/problems/problems.routes';
+import { ProfileCache } from './features/profiles/profile-cache';
+import type { ProfileStore } from './features/profiles/profile-store';
+import { profileRoutes } from './features/profiles/profiles.routes';
+import { ProfileService } from './features/profiles/profiles.service';
+import type { UsageLog } from './features/usage/usage-log';
+import { usageRoutes } from './features/usage/usage.routes';
+import { answers } from './middleware/answer';
+import { bearer } from './middleware/bearer';
+import type { ChangeFeed } from './middleware/change-feed';
+import { cors } from './middleware/cors';
+import { headers, plainPath } from './middleware/headers';
+import { mount } from './middleware/mount';
+import { limits, rateLimit, type Limits } from './middleware/rate-limit';
+import { rateCounts } from './middleware/rate-store';
+import { requestId } from './middleware/request-id';
+import { assertRoutes, type Route } from './middleware/route';
+
+/** All that the application stands on; tests hand in what they want to see. */
+export interface AppDeps {
+  readonly checks: readonly Check[];
+  readonly validate: Validate;
+  /** Where costly checks run. */
+  readonly runApart: RunApart;
+  readonly pool: Pool;
+  readonly keyStore: KeyStore;
+  readonly profileStore: ProfileStore;
+  readonly feed: ChangeFeed;
+  readonly usage: UsageLog;
+  readonly readiness: () => Promise<Readiness>;
+  readonly logger: Logger;
+  readonly limits?: Limits;
+}
+
+/** The route table: every door of the service, each with its policy. */
+export function routeTable(deps: AppDeps): Route[] {
+  const profiles = new ProfileService(new ProfileCache(deps.profileStore, deps.feed));
+  const run = checkRunner(deps.runApart);
+  const checks = new CheckService({ profiles, validate: deps.validate, run });
+  return [
+    ...homeRoutes(deps.checks),
+    ...healthRoutes(deps.readiness),
+    ...problemRoutes(),
+    ...contractRoutes(),
+    ...checkRoutes(deps.checks, checks),
+    ...formulaRoutes(),
+    ...profileRoutes(profiles),
+    ...usageRoutes(),
+  ];
+}
+
+/**
+ * Wires the application; opens nothing.
+ *
+ * @throws when a route has no policy or a check has no route.
+ */
+export function createApp(deps: AppDeps, routes: readonly Route[] = routeTable(deps)): Express {
+  assertRoutes(
+    routes,
+    deps.checks.map(({ id }) => id),
+  );
+  const { keyStore, feed, logger, usage } = deps;
+  const keys = new KeyCache(keyStore, feed);
+  const use = new KeyUse(keyStore, () => logger.warn('The last use of a key was not noted.'));
+  const { send, fail } = answers({ usage, logger, onKeyUse: (id) => use.note(id) });
+  const rate = rateLimit(rateCounts(deps.pool), logger, deps.limits ?? limits);
+
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('etag', false);
+  app.set('query parser', 'simple');
+  app.set('case sensitive routing', true);
+  app.set('strict routing', true);
+  app.use(requestId, plainPath, headers);
+  app.use('/docs', docs());
+  app.use('/v1', cors(keys), bearer(keys));
+  mount(app, routes, { send, rate });
+  app.use(fail);
+  return app;
+}
