@@ -1,4 +1,4 @@
-import type { Bay } from './bays';
+import { type Bay, bays } from './bays';
 import type { BeamState } from './beam-state';
 import type { Extreme, Extremes } from './extremes';
 import { piecesOf } from './extremes';
@@ -7,7 +7,10 @@ import { polynomial, unitRoots } from './roots';
 import { valuesAt } from './values-at';
 
 export interface DeflectionOptions {
-  /** G A_v in N: adds the deflection by shear, ∫ V / (G A_v) dx. Absent: bending alone. */
+  /**
+   * G A_v in N: adds the deflection by shear, ∫ V / (G A_v) dx, the moments being those without
+   * it. Absent: bending alone.
+   */
   readonly shearRigidity?: number;
 }
 
@@ -69,13 +72,16 @@ function relativeCurves(state: BeamState, bay: Bay, options: DeflectionOptions):
   const rigidity = frame.geometry.flexuralRigidity;
   const shearing = options.shearRigidity === undefined ? 0 : 1 / options.shearRigidity;
   const sheared = shearing === 0 ? null : shearAreas(state, bay);
-  const [atFrom, atTo] = [
-    valuesAt(state, bay.from, 'right').w,
-    valuesAt(state, bay.to, 'left').w + shearing * (sheared?.total ?? 0),
-  ];
+  const atFrom = valuesAt(state, bay.from, 'right').w;
+  const atTo = valuesAt(state, bay.to, 'left').w + shearing * (sheared?.total ?? 0);
   const [left, right] = bay.supports;
-  const start = left === null ? atTo : atFrom;
-  const slope = left === null || right === null ? 0 : (atTo - atFrom) / bay.length;
+  const overhang = left === null || right === null;
+  const slope = overhang
+    ? sheared
+      ? shearing * turnOfNeighbour(state, bay)
+      : 0
+    : (atTo - atFrom) / bay.length;
+  const start = left === null ? atTo - slope * bay.length : atFrom;
   const curves: Curve[] = [];
   for (const { piece } of piecesOf(state, bay)) {
     const o = piece * STRIDE;
@@ -97,6 +103,17 @@ function relativeCurves(state: BeamState, bay: Bay, options: DeflectionOptions):
     });
   }
   return curves;
+}
+
+/**
+ * Mean shear in N of the span beside an overhang: shear flexibility turns that span's chord, and
+ * the overhang with it.
+ */
+function turnOfNeighbour(state: BeamState, overhang: Bay): number {
+  const neighbour = bays(state).find(
+    ({ kind, from, to }) => kind === 'span' && (from === overhang.to || to === overhang.from),
+  );
+  return neighbour ? shearAreas(state, neighbour).total / neighbour.length : 0;
 }
 
 /** ∫ V dx in N mm from the bay's start to each of its pieces, and over the whole bay. */
