@@ -28,105 +28,6 @@ export interface components {
          */
         readonly ProfileName: string;
         /**
-         * @description Grade, such as S275 or S355; its strengths are those of the thickest part.
-         * @example S275
-         */
-        readonly SteelGrade: string;
-        /**
-         * A quantity
-         * @description A number in the field's default unit, or text `number space unit` such as `2400 mm` or `8 ft`. The field's own `x-quantity` names its unit, its sign and its limit. A wrong dimension is refused; text is parsed against a closed list of units and never evaluated.
-         * @example 2.4
-         * @example 2400 mm
-         * @example 8 ft
-         */
-        readonly QuantityInput: number | string;
-        /** Steel by grade */
-        readonly SteelByGrade: {
-            /** @constant */
-            readonly type: "steel";
-            readonly grade: components["schemas"]["SteelGrade"];
-            /** @description Modulus of elasticity. Default 210000 N/mm². */
-            readonly E?: components["schemas"]["QuantityInput"];
-            /** @description Shear modulus. Default 81000 N/mm². */
-            readonly G?: components["schemas"]["QuantityInput"];
-        };
-        /** Steel by strength */
-        readonly SteelByStrength: {
-            /** @constant */
-            readonly type: "steel";
-            /** @description Yield strength of the thickest part. */
-            readonly fy: components["schemas"]["QuantityInput"];
-            /** @description Ultimate strength. */
-            readonly fu?: components["schemas"]["QuantityInput"];
-            /** @description Modulus of elasticity. Default 210000 N/mm². */
-            readonly E?: components["schemas"]["QuantityInput"];
-            /** @description Shear modulus. Default 81000 N/mm². */
-            readonly G?: components["schemas"]["QuantityInput"];
-        };
-        /**
-         * @description Strength class of EN 338 (`C24`, `D40`) or EN 14080 (`GL24h`).
-         * @example C24
-         * @example GL24h
-         */
-        readonly TimberClass: string;
-        /**
-         * @description Service class of EN 1995-1-1 2.3.1.3.
-         * @enum {integer}
-         */
-        readonly ServiceClass: 1 | 2 | 3;
-        /**
-         * @description The member shares its load with others side by side (EN 1995-1-1 6.6, k_sys).
-         * @default false
-         */
-        readonly LoadSharing: boolean;
-        /** Timber by strength class */
-        readonly TimberByClass: {
-            /** @constant */
-            readonly type: "timber";
-            readonly class: components["schemas"]["TimberClass"];
-            readonly serviceClass: components["schemas"]["ServiceClass"];
-            readonly loadSharing?: components["schemas"]["LoadSharing"];
-        };
-        /** Characteristic strengths, stiffnesses and density */
-        readonly TimberStrengths: {
-            /** @description Bending strength. */
-            readonly fmk: components["schemas"]["QuantityInput"];
-            /** @description Tension along the grain. */
-            readonly ft0k: components["schemas"]["QuantityInput"];
-            /** @description Compression along the grain. */
-            readonly fc0k: components["schemas"]["QuantityInput"];
-            /** @description Compression across the grain. */
-            readonly fc90k: components["schemas"]["QuantityInput"];
-            /** @description Shear strength. */
-            readonly fvk: components["schemas"]["QuantityInput"];
-            /** @description Mean modulus of elasticity along the grain. */
-            readonly E0mean: components["schemas"]["QuantityInput"];
-            /** @description Fifth percentile modulus of elasticity. */
-            readonly E005: components["schemas"]["QuantityInput"];
-            /** @description Mean shear modulus. */
-            readonly Gmean: components["schemas"]["QuantityInput"];
-            /** @description Characteristic density in kg/m³. */
-            readonly rhok: number;
-            /** @description Mean density in kg/m³. */
-            readonly rhomean: number;
-        };
-        /**
-         * @description What the strengths are of; it sets gamma_M, k_h and k_mod.
-         * @enum {string}
-         */
-        readonly TimberProduct: "solid" | "glulam" | "lvl";
-        /** Timber by strengths */
-        readonly TimberByStrengths: {
-            /** @constant */
-            readonly type: "timber";
-            readonly strengths: components["schemas"]["TimberStrengths"];
-            readonly product: components["schemas"]["TimberProduct"];
-            readonly serviceClass: components["schemas"]["ServiceClass"];
-            readonly loadSharing?: components["schemas"]["LoadSharing"];
-        };
-        /** Material */
-        readonly MaterialInput: components["schemas"]["SteelByGrade"] | components["schemas"]["SteelByStrength"] | components["schemas"]["TimberByClass"] | components["schemas"]["TimberByStrengths"];
-        /**
          * @description Designation in the catalogue.
          * @example UB 457x191x67
          * @example IPE200
@@ -145,6 +46,14 @@ export interface components {
         readonly MembersConnected: boolean;
         /** @description Part of the load on the member that is verified. Default 1/count. A ratio. */
         readonly MemberShare: number;
+        /**
+         * A quantity
+         * @description A number in the field's default unit, or text `number space unit` such as `2400 mm` or `8 ft`. The field's own `x-quantity` names its unit, its sign and its limit. A wrong dimension is refused; text is parsed against a closed list of units and never evaluated.
+         * @example 2.4
+         * @example 2400 mm
+         * @example 8 ft
+         */
+        readonly QuantityInput: number | string;
         /**
          * Properties that override computed ones
          * @description Of one member. Each override is named in the working.
@@ -331,6 +240,97 @@ export interface components {
          */
         readonly SectionInput: components["schemas"]["SectionName"] | components["schemas"]["SectionByDesignation"] | components["schemas"]["SectionI"] | components["schemas"]["SectionChannel"] | components["schemas"]["SectionRhs"] | components["schemas"]["SectionShs"] | components["schemas"]["SectionChs"] | components["schemas"]["SectionAngle"] | components["schemas"]["SectionRectangle"] | components["schemas"]["SectionRound"];
         /**
+         * @description Grade, such as S275 or S355; its strengths are those of the thickest part.
+         * @example S275
+         */
+        readonly SteelGrade: string;
+        /** Steel by grade */
+        readonly SteelByGrade: {
+            /** @constant */
+            readonly type: "steel";
+            readonly grade: components["schemas"]["SteelGrade"];
+            /** @description Modulus of elasticity. Default 210000 N/mm². */
+            readonly E?: components["schemas"]["QuantityInput"];
+            /** @description Shear modulus. Default 81000 N/mm². */
+            readonly G?: components["schemas"]["QuantityInput"];
+        };
+        /** Steel by strength */
+        readonly SteelByStrength: {
+            /** @constant */
+            readonly type: "steel";
+            /** @description Yield strength of the thickest part. */
+            readonly fy: components["schemas"]["QuantityInput"];
+            /** @description Ultimate strength. */
+            readonly fu?: components["schemas"]["QuantityInput"];
+            /** @description Modulus of elasticity. Default 210000 N/mm². */
+            readonly E?: components["schemas"]["QuantityInput"];
+            /** @description Shear modulus. Default 81000 N/mm². */
+            readonly G?: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * @description Strength class of EN 338 (`C24`, `D40`) or EN 14080 (`GL24h`).
+         * @example C24
+         * @example GL24h
+         */
+        readonly TimberClass: string;
+        /**
+         * @description Service class of EN 1995-1-1 2.3.1.3.
+         * @enum {integer}
+         */
+        readonly ServiceClass: 1 | 2 | 3;
+        /**
+         * @description The member shares its load with others side by side (EN 1995-1-1 6.6, k_sys).
+         * @default false
+         */
+        readonly LoadSharing: boolean;
+        /** Timber by strength class */
+        readonly TimberByClass: {
+            /** @constant */
+            readonly type: "timber";
+            readonly class: components["schemas"]["TimberClass"];
+            readonly serviceClass: components["schemas"]["ServiceClass"];
+            readonly loadSharing?: components["schemas"]["LoadSharing"];
+        };
+        /** Characteristic strengths, stiffnesses and density */
+        readonly TimberStrengths: {
+            /** @description Bending strength. */
+            readonly fmk: components["schemas"]["QuantityInput"];
+            /** @description Tension along the grain. */
+            readonly ft0k: components["schemas"]["QuantityInput"];
+            /** @description Compression along the grain. */
+            readonly fc0k: components["schemas"]["QuantityInput"];
+            /** @description Compression across the grain. */
+            readonly fc90k: components["schemas"]["QuantityInput"];
+            /** @description Shear strength. */
+            readonly fvk: components["schemas"]["QuantityInput"];
+            /** @description Mean modulus of elasticity along the grain. */
+            readonly E0mean: components["schemas"]["QuantityInput"];
+            /** @description Fifth percentile modulus of elasticity. */
+            readonly E005: components["schemas"]["QuantityInput"];
+            /** @description Mean shear modulus. */
+            readonly Gmean: components["schemas"]["QuantityInput"];
+            /** @description Characteristic density in kg/m³. */
+            readonly rhok: number;
+            /** @description Mean density in kg/m³. */
+            readonly rhomean: number;
+        };
+        /**
+         * @description What the strengths are of; it sets gamma_M, k_h and k_mod.
+         * @enum {string}
+         */
+        readonly TimberProduct: "solid" | "glulam" | "lvl";
+        /** Timber by strengths */
+        readonly TimberByStrengths: {
+            /** @constant */
+            readonly type: "timber";
+            readonly strengths: components["schemas"]["TimberStrengths"];
+            readonly product: components["schemas"]["TimberProduct"];
+            readonly serviceClass: components["schemas"]["ServiceClass"];
+            readonly loadSharing?: components["schemas"]["LoadSharing"];
+        };
+        /** Material */
+        readonly MaterialInput: components["schemas"]["SteelByGrade"] | components["schemas"]["SteelByStrength"] | components["schemas"]["TimberByClass"] | components["schemas"]["TimberByStrengths"];
+        /**
          * @description `characteristic`: the profile's partial and combination factors are applied. `design`: every value counts once, by 1. Nothing is ever factored twice.
          * @enum {string}
          */
@@ -505,6 +505,14 @@ export interface components {
         /** @description Stiffness of each support along the load, as many as there are supports; `null` is rigid. */
         readonly SupportStiffness: readonly (null | components["schemas"]["QuantityInput"])[];
         /**
+         * Supports that carry the waler's own weight
+         * @description Hangers or brackets. Default the props.
+         */
+        readonly VerticalSupports: {
+            /** @description Distance between hangers or brackets. */
+            readonly spacing: components["schemas"]["QuantityInput"];
+        };
+        /**
          * @description Held all along, or at the supports only.
          * @enum {string}
          */
@@ -598,12 +606,12 @@ export interface components {
         readonly Waivers: readonly components["schemas"]["Waiver"][];
         /**
          * Waler check
-         * @description A member over props. x runs from the first support in m, negative on the start overhang. A transverse load is positive towards the supports.
+         * @description A member over props. x runs from the first support in m, negative on the start overhang; a transverse load is positive towards the supports.
          */
         readonly WalerRequest: {
             readonly profile?: components["schemas"]["ProfileName"];
-            readonly material: components["schemas"]["MaterialInput"];
             readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
             readonly loadBasis: components["schemas"]["LoadBasis"];
             readonly spans: components["schemas"]["Spans"];
             readonly overhangs?: components["schemas"]["Overhangs"];
@@ -612,22 +620,18 @@ export interface components {
             readonly patternLoading?: components["schemas"]["PatternLoading"];
             readonly thrust?: components["schemas"]["Thrust"];
             /**
-             * @description `compression-only`: a prop only pushes; a combination that would pull on one is solved again without it. `both-ways`: a support holds against lifting too.
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
              * @default compression-only
              * @enum {string}
              */
             readonly supports?: "compression-only" | "both-ways";
             readonly supportStiffness?: components["schemas"]["SupportStiffness"];
             /**
-             * @description Self-weight bends the waler about z-z, between props or between `verticalSupports`.
+             * @description Self-weight bends about z-z, between props or between `verticalSupports`.
              * @default true
              */
             readonly selfWeight?: boolean;
-            /** Supports that carry the waler's own weight */
-            readonly verticalSupports?: {
-                /** @description Distance between hangers or brackets. */
-                readonly spacing: components["schemas"]["QuantityInput"];
-            };
+            readonly verticalSupports?: components["schemas"]["VerticalSupports"];
             readonly restraint?: components["schemas"]["Restraint"];
             /** @default top */
             readonly loadLevel?: components["schemas"]["LoadLevel"];
@@ -729,10 +733,10 @@ export interface components {
         /** One line of the working */
         readonly Step: {
             /**
-             * @description A formula with numbers put in, or a choice with its reason.
+             * @description A formula with numbers put in, a given value, or a choice with its reason.
              * @enum {string}
              */
-            readonly kind: "formula" | "choice";
+            readonly kind: "formula" | "given" | "choice";
             /** @description Id under `/v1/formulas`; `null` for a choice. */
             readonly formula: string | null;
             /** @description The verification it belongs to; `null` for what depends on section, material and profile only. */

@@ -7,6 +7,8 @@ export interface Action {
   readonly nature: Nature;
   /** Category of a variable action, which the profile's psi hang on. */
   readonly category?: string;
+  /** A permanent action that no arrangement makes favourable: its upper factor alone counts. */
+  readonly neverFavourable?: true;
 }
 
 /** One combination of actions: which take part and by which factor. */

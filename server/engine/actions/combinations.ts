@@ -47,9 +47,24 @@ export function combine(
   return distinct(strengthCombinations(permanent, variable, profile));
 }
 
-/** Every value counts once, by 1. */
-export function uncombined(actions: readonly Action[], situation: Situation): Combination[] {
-  return [{ situation, expression: 'none', leading: null, factors: allBy(actions, 1) }];
+/**
+ * Every value of the caller counts once, by 1. What the service adds itself, being characteristic,
+ * has its upper factor in a strength situation.
+ */
+export function uncombined(
+  actions: readonly Action[],
+  situation: Situation,
+  profile: ProfileReader,
+): Combination[] {
+  const factors = Object.fromEntries(
+    actions.map(({ name, neverFavourable }) => [
+      name,
+      neverFavourable && situation === 'persistent'
+        ? profile.number('combinations.gamma_G_sup')
+        : 1,
+    ]),
+  );
+  return [{ situation, expression: 'none', leading: null, factors }];
 }
 
 interface Expression {
@@ -100,11 +115,11 @@ function permanentParts(
   lower: number,
 ): Record<string, number>[] {
   return permanent.reduce<Record<string, number>[]>(
-    (parts, { name }) =>
-      parts.flatMap((part) => [
-        { ...part, [name]: upper },
-        { ...part, [name]: lower },
-      ]),
+    (parts, { name, neverFavourable }) =>
+      parts.flatMap((part) => {
+        const unfavourable = { ...part, [name]: upper };
+        return neverFavourable ? [unfavourable] : [unfavourable, { ...part, [name]: lower }];
+      }),
     [{}],
   );
 }

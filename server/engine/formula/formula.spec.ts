@@ -6,6 +6,7 @@ import { formula } from './formula';
 import { substituted } from './print';
 import { allFormulas } from './registry';
 
+if (!all) throw new Error('mathjs has no functions');
 const math = create(all);
 
 /** A small generator of its own, so that a failing case is always the same one. */

@@ -23,7 +23,7 @@ export interface Formula<Symbols extends string = string> extends FormulaDefinit
   readonly id: string;
   readonly tree: MathNode;
   /** Over numbers in the engine's own units (N, mm, rad, K). */
-  readonly compute: (values: Readonly<Record<Symbols, number>>) => number;
+  compute(values: Readonly<Record<Symbols, number>>): number;
 }
 
 /**

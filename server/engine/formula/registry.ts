@@ -3,13 +3,11 @@ import type { Formula } from './formula';
 const formulas = new Map<string, Formula>();
 
 /** Called by `formula()` alone. */
-export function register(made: Formula<never>): void {
-  // The registry only reads; values go in through the typed formula itself.
-  const stored = made as unknown as Formula;
-  if (formulas.has(stored.id)) {
-    throw new Error(`The formula ${stored.symbol} (${stored.clause}) is declared twice.`);
+export function register(made: Formula): void {
+  if (formulas.has(made.id)) {
+    throw new Error(`The formula ${made.symbol} (${made.clause}) is declared twice.`);
   }
-  formulas.set(stored.id, stored);
+  formulas.set(made.id, made);
 }
 
 /** Every formula of the engine's loaded files, by symbol. */

@@ -1,13 +1,18 @@
+import type { components } from '../../../openapi/generated/types';
 import { Refusal } from '../refusal';
 import { quantity, toUnit, type Quantity, type UnitName } from '../units/units';
 import type { Formula } from './formula';
 import { substituted } from './print';
 
+type VerificationId = components['schemas']['VerificationId'];
+
 /** A line of the working: a formula with numbers put in, a given value, or a choice that was made. */
 export interface Step {
   /** Id of the formula; null for a choice or a given value. */
   readonly formula: string | null;
-  readonly verification: string;
+  readonly kind: 'formula' | 'given' | 'choice';
+  /** Null for what depends on section, material and profile only. */
+  readonly verification: VerificationId | null;
   readonly symbol: string;
   readonly title: string;
   readonly substituted: string;
@@ -66,7 +71,7 @@ export class WorkingSheet implements Sheet {
   readonly steps: Step[] = [];
 
   constructor(
-    private readonly verification: string,
+    private readonly verification: VerificationId | null,
     private readonly withSteps: boolean,
   ) {}
 
@@ -76,6 +81,7 @@ export class WorkingSheet implements Sheet {
     this.values[symbol] = quantity(result, unit);
     if (this.withSteps) {
       this.steps.push({
+        kind: 'formula',
         formula: id,
         verification: this.verification,
         symbol,
@@ -94,6 +100,7 @@ export class WorkingSheet implements Sheet {
     const shown = quantity(value, unit);
     this.values[symbol] = shown;
     this.write({
+      kind: 'given',
       symbol,
       title,
       substituted: unit === '1' ? String(shown.value) : `${shown.value} ${unit}`,
@@ -107,7 +114,7 @@ export class WorkingSheet implements Sheet {
   choose(make: () => Choice): void {
     const { symbol, title, because, value, clause } = make();
     if (typeof value === 'number') this.values[symbol] = quantity(value, '1');
-    this.write({ symbol, title, substituted: because, value, unit: '1', clause });
+    this.write({ kind: 'choice', symbol, title, substituted: because, value, unit: '1', clause });
   }
 
   /** A line that no formula stands behind. */

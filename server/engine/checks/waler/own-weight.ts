@@ -1,0 +1,72 @@
+import type { BeamState } from '../../analysis/beam-state';
+import { ContinuousBeam } from '../../analysis/continuous-beam';
+import { sectionPoints } from '../../analysis/section-points';
+import { valuesAt } from '../../analysis/values-at';
+import { readQuantity } from '../../units/quantity';
+import type { WalerRequest } from '../contract';
+import { memberEnds, type SupportLayout } from '../continuous/geometry';
+import type { SteelISection } from '../steel-i/section';
+
+/** Bending about z-z and shear along the flanges, N mm and N, for one member. */
+export interface SideEffect {
+  readonly M_z: number;
+  readonly V_y: number;
+}
+
+/** What a waler's own weight, by a factor of 1, does across the plane of its loads. */
+export interface OwnWeight {
+  at(x: number): SideEffect;
+  /** Places where it is greatest, mm from the first support. */
+  readonly places: readonly number[];
+}
+
+const none: OwnWeight = { at: () => ({ M_z: 0, V_y: 0 }), places: [] };
+
+/**
+ * The waler hangs on its props, or on supports at a spacing of their own. Those may stand anywhere
+ * along it, so that the greatest effect of a two-span or simple beam is taken all along: w s²/8
+ * and 5/8 w s (G_beams of the handbooks: two equal spans), and w c²/2 on an overhang c.
+ */
+export function ownWeight(
+  request: Pick<WalerRequest, 'selfWeight' | 'verticalSupports'>,
+  layout: SupportLayout,
+  section: SteelISection,
+): OwnWeight {
+  if (request.selfWeight === false) return none;
+  const { weight } = section;
+  if (request.verticalSupports) {
+    const spacing = readQuantity(request.verticalSupports.spacing, 'm');
+    const overhang = Math.min(spacing, Math.max(layout.overhangs.start, layout.overhangs.end));
+    const effect = {
+      M_z: Math.max((weight * spacing ** 2) / 8, (weight * overhang ** 2) / 2),
+      V_y: Math.max((5 / 8) * weight * spacing, weight * overhang),
+    };
+    return { at: () => effect, places: [] };
+  }
+  return betweenProps(layout, section);
+}
+
+function betweenProps(layout: SupportLayout, section: SteelISection): OwnWeight {
+  const { weight, E, properties } = section;
+  const ends = memberEnds(layout);
+  const load = {
+    kind: 'distributed',
+    from: ends.start,
+    to: ends.end,
+    start: weight,
+    end: weight,
+  } as const;
+  const rigid = layout.supportStiffness.map(() => null);
+  const geometry = { ...layout, flexuralRigidity: E * properties.I_z, supportStiffness: rigid };
+  const state = new ContinuousBeam(geometry, [load]).solve([load]);
+  return { at: (x) => effectAt(state, x), places: sectionPoints(state).map((point) => point.x) };
+}
+
+/** The greater of both sides, where the reaction makes the shear jump. */
+function effectAt(state: BeamState, x: number): SideEffect {
+  const sides = [valuesAt(state, x, 'left'), valuesAt(state, x, 'right')];
+  return {
+    M_z: Math.max(...sides.map(({ M }) => Math.abs(M))),
+    V_y: Math.max(...sides.map(({ V }) => Math.abs(V))),
+  };
+}
