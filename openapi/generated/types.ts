@@ -1,5 +1,25 @@
 /* Generated from openapi/ by `npm run contract`. Do not change by hand. */
 export interface paths {
+    readonly "/v1/checks": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the checks
+         * @description The checks that this service makes.
+         */
+        readonly get: operations["listChecks"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/v1/checks/waler": {
         readonly parameters: {
             readonly query?: never;
@@ -9,8 +29,611 @@ export interface paths {
         };
         readonly get?: never;
         readonly put?: never;
-        /** Check a waler */
+        /**
+         * Check a waler
+         * @description A member over props: bending, shear, transverse force at every prop, lateral torsional buckling, buckling under thrust, deflection, and loss of a prop where it is asked. Owed, so that the answer is incomplete without them: transverse force or bearing across the grain at every support, lateral torsional buckling, buckling under thrust, deflection. What it does not cover stands in `notCovered`.
+         */
         readonly post: operations["checkWaler"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/beam": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check a beam
+         * @description A bearer, a joist, any continuous beam. Owed: as for a waler. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkBeam"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/prop": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check a prop
+         * @description A compression member between a waler and its reaction. Owed: buckling about both axes, and an eccentricity. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkProp"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/adjustable-prop": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check an adjustable prop
+         * @description A telescopic steel prop of EN 1065, vertical within the tolerance of the standard. Owed: a resistance. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkAdjustableProp"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/member": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check a member
+         * @description A member whose design effects are known. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkMember"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/section": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check a cross-section
+         * @description Design effects that act together at one cross-section. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkSection"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/stress": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check states of stress
+         * @description States of stress, or effects at the named points of a section; each point is answered with id, y, z, sigma, tau and sigma_v. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkStress"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/bearing": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check a bearing
+         * @description Timber across the grain, a transverse force on a steel web, or a sole plate on ground. What it does not cover stands in `notCovered`.
+         */
+        readonly post: operations["checkBearing"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/checks/{check}/schema": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a check's request schema
+         * @description The request of one check as JSON Schema, with all that it refers to.
+         */
+        readonly get: operations["readCheckSchema"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/formulas/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a formula
+         * @description The symbolic formula behind a step, as text and as MathML. The same id always answers the same.
+         */
+        readonly get: operations["readFormula"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/profiles": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the factor profiles
+         * @description The factor profiles that the key may use, each with its revisions.
+         */
+        readonly get: operations["listProfiles"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/profiles/{slug}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a factor profile
+         * @description One revision with all its values, each with its clause and where it comes from.
+         */
+        readonly get: operations["readProfile"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/batch": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Make many checks at a time
+         * @description Up to 1,000 items, answered in order. Each has its own status; one item's fault leaves its neighbours alone. `keep` is refused.
+         */
+        readonly post: operations["runBatch"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/batch/{check}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Make many checks from a table
+         * @description A header of dotted field names (`section,material.grade,spans,loads.0.value`), constants in the query (`material.type=steel`). A list is numbers separated by space or `+`, with one optional unit at the end, repeats as `3x2.4`. Columns `ref` and `note.*` pass through; any other unknown column is refused. Rows come back in order with `row,status,utilisation,governing,error` and the asked `columns`; the last line is `#end,ROWS`. `decimal=comma` and `sep` say how numbers are written.
+         */
+        readonly post: operations["runCsvBatch"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/select/waler": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the lightest section of a waler
+         * @description Candidates are ranked by mass; the first that passes is chosen; one that cannot be checked is skipped with its problem. Mass is for the set.
+         */
+        readonly post: operations["selectWaler"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/select/beam": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the lightest section of a beam
+         * @description Candidates are ranked by mass; the first that passes is chosen; one that cannot be checked is skipped with its problem. Mass is for the set.
+         */
+        readonly post: operations["selectBeam"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/select/prop": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the lightest section of a prop
+         * @description Candidates are ranked by mass; the first that passes is chosen; one that cannot be checked is skipped with its problem. Mass is for the set.
+         */
+        readonly post: operations["selectProp"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/select/member": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the lightest section of a member
+         * @description Candidates are ranked by mass; the first that passes is chosen; one that cannot be checked is skipped with its problem. Mass is for the set.
+         */
+        readonly post: operations["selectMember"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/compare/waler": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Compare a waler under several profiles
+         * @description The same member under each profile; the first is what others are compared with.
+         */
+        readonly post: operations["compareWaler"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/compare/beam": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Compare a beam under several profiles
+         * @description The same member under each profile; the first is what others are compared with.
+         */
+        readonly post: operations["compareBeam"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/compare/prop": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Compare a prop under several profiles
+         * @description The same member under each profile; the first is what others are compared with.
+         */
+        readonly post: operations["compareProp"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/compare/member": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Compare a member under several profiles
+         * @description The same member under each profile; the first is what others are compared with.
+         */
+        readonly post: operations["compareMember"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/limits/waler": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the greatest load or span of a waler
+         * @description The greatest value with which it passes, rounded towards pass; or why there is none.
+         */
+        readonly post: operations["limitsWaler"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/limits/beam": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the greatest load or span of a beam
+         * @description The greatest value with which it passes, rounded towards pass; or why there is none.
+         */
+        readonly post: operations["limitsBeam"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/limits/prop": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find the greatest load or span of a prop
+         * @description The greatest value with which it passes, rounded towards pass; or why there is none.
+         */
+        readonly post: operations["limitsProp"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/usage": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read the log
+         * @description Calls of all keys, newest first. Needs the scope `admin`.
+         */
+        readonly get: operations["listUsage"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/usage/{requestId}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read one call
+         * @description The call whose answer carried this X-Request-Id. Needs the scope `admin`.
+         */
+        readonly get: operations["readUsage"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/openapi.json": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read this contract
+         * @description What is answered today, as OpenAPI 3.1.
+         */
+        readonly get: operations["readContract"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/healthz": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Ask whether the process answers
+         * @description For a supervisor.
+         */
+        readonly get: operations["isAlive"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/readyz": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Ask whether the service is ready
+         * @description For a load balancer. A missing partition of the log is a warning, not a reason to be taken out.
+         */
+        readonly get: operations["isReady"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/problems/{code}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read what a problem means
+         * @description A page for people: why it happens and what to do.
+         */
+        readonly get: operations["readProblem"];
+        readonly put?: never;
+        readonly post?: never;
         readonly delete?: never;
         readonly options?: never;
         readonly head?: never;
@@ -21,6 +644,79 @@ export interface paths {
 export type webhooks = Record<string, never>;
 export interface components {
     schemas: {
+        /**
+         * @description The last part of a check's path.
+         * @enum {string}
+         */
+        readonly CheckId: "waler" | "beam" | "prop" | "adjustable-prop" | "member" | "section" | "stress" | "bearing";
+        /** One check */
+        readonly CheckSummary: {
+            readonly id: components["schemas"]["CheckId"];
+            readonly title: string;
+            /** @description Where it is asked. */
+            readonly path: string;
+            /** @description Where its request is described. */
+            readonly schema: string;
+        };
+        /** @description Token of the next page, `null` after the last. */
+        readonly NextPageToken: string | null;
+        /** The checks there are */
+        readonly CheckList: {
+            readonly items: readonly components["schemas"]["CheckSummary"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
+        /** One thing the caller can mend */
+        readonly ProblemItem: {
+            /**
+             * @description JSON pointer into the request.
+             * @example /spans/0
+             */
+            readonly pointer: string;
+            /**
+             * @description Stable word for programs.
+             * @example must-be-positive
+             */
+            readonly code: string;
+            /** @description What is wrong. */
+            readonly message: string;
+            /** @description What to do, where it is known. */
+            readonly fix?: string;
+            /** @description Publication and clause that sets the limit. */
+            readonly clause?: string;
+        };
+        /**
+         * Problem
+         * @description RFC 9457 problem details.
+         */
+        readonly Problem: {
+            /**
+             * Format: uri-reference
+             * @description A path under `/problems/`, which answers with a page that explains it.
+             */
+            readonly type: string;
+            /** @description What kind of problem. */
+            readonly title: string;
+            /** @description The HTTP status. */
+            readonly status: number;
+            /** @description What happened here. */
+            readonly detail: string;
+            /**
+             * Format: uri-reference
+             * @description The path that was asked.
+             */
+            readonly instance: string;
+            /**
+             * @description Stable word for programs.
+             * @example not-valid
+             */
+            readonly code: string;
+            /** @description The log's own id of the request. */
+            readonly requestId: string;
+            /** @description Whether the same request may succeed later. */
+            readonly retryable: boolean;
+            /** @description What is at fault, most specific first. */
+            readonly errors: readonly components["schemas"]["ProblemItem"][];
+        };
         /**
          * @description A factor profile: `uk-na` is the newest approved revision in effect, `uk-na@2` pins one. Required unless the key's client has a default; there is no silent national choice.
          * @example uk-na
@@ -644,11 +1340,6 @@ export interface components {
             readonly waive?: components["schemas"]["Waivers"];
         } & (unknown | unknown);
         /**
-         * @description The last part of a check's path.
-         * @enum {string}
-         */
-        readonly CheckId: "waler" | "beam" | "prop" | "adjustable-prop" | "member" | "section" | "stress" | "bearing";
-        /**
          * @description `pass`: everything the check owes was verified and holds. `fail` outranks all. `incomplete`: what was verified holds, but an owed verification was not made for want of an input. `provisional`: would pass, but rests on a revision or a value that is not approved and confirmed. Only `pass` is a pass.
          * @enum {string}
          */
@@ -952,71 +1643,1596 @@ export interface components {
             /** @description The caution that goes with every answer. */
             readonly notice: string;
         };
-        /** One thing the caller can mend */
-        readonly ProblemItem: {
+        /**
+         * Beam check
+         * @description A bearer, a joist, any continuous beam. x runs from the first support in m, negative on the start overhang; a transverse load is positive towards the supports.
+         */
+        readonly BeamRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
             /**
-             * @description JSON pointer into the request.
-             * @example /spans/0
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default both-ways
+             * @enum {string}
              */
-            readonly pointer: string;
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
             /**
-             * @description Stable word for programs.
-             * @example must-be-positive
+             * @description Self-weight bends about y-y, with the loads.
+             * @default true
              */
-            readonly code: string;
-            /** @description What is wrong. */
-            readonly message: string;
-            /** @description What to do, where it is known. */
-            readonly fix?: string;
-            /** @description Publication and clause that sets the limit. */
-            readonly clause?: string;
+            readonly selfWeight?: boolean;
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /** Compression between two bounds */
+        readonly AxialRange: {
+            readonly name: components["schemas"]["SourceName"];
+            readonly nature: components["schemas"]["Nature"];
+            readonly category?: components["schemas"]["Category"];
+            readonly duration?: components["schemas"]["LoadDuration"];
+            /** @description The least; negative where the action relieves the prop. */
+            readonly min: components["schemas"]["QuantityInput"];
+            /** @description The greatest. */
+            readonly max: components["schemas"]["QuantityInput"];
         };
         /**
-         * Problem
-         * @description RFC 9457 problem details.
+         * Compression of a prop from one source
+         * @description One `value`, or `min` and `max` as a waler's `reactions.byAction` gives them.
          */
-        readonly Problem: {
+        readonly PropAxial: components["schemas"]["AxialLoad"] | components["schemas"]["AxialRange"];
+        /**
+         * @description The axis that it bends about.
+         * @enum {string}
+         */
+        readonly BendingAxis: "y" | "z";
+        /** Uniform line load across a prop */
+        readonly PropUniformLoad: {
+            readonly name: components["schemas"]["SourceName"];
+            readonly nature: components["schemas"]["Nature"];
+            readonly category?: components["schemas"]["Category"];
+            readonly duration?: components["schemas"]["LoadDuration"];
+            readonly axis: components["schemas"]["BendingAxis"];
             /**
-             * Format: uri-reference
-             * @description A path under `/problems/`, which answers with a page that explains it.
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
              */
-            readonly type: string;
-            /** @description What kind of problem. */
+            readonly kind: "uniform";
+            /** @description Line load, positive in the same direction for all. */
+            readonly value: components["schemas"]["QuantityInput"];
+            /** @description Where it begins, from the lower end. Default: the lower end. */
+            readonly from?: components["schemas"]["QuantityInput"];
+            /** @description Where it ends, from the lower end. Default: the upper end. */
+            readonly to?: components["schemas"]["QuantityInput"];
+        };
+        /** Line load that varies linearly across a prop */
+        readonly PropLinearLoad: {
+            readonly name: components["schemas"]["SourceName"];
+            readonly nature: components["schemas"]["Nature"];
+            readonly category?: components["schemas"]["Category"];
+            readonly duration?: components["schemas"]["LoadDuration"];
+            readonly axis: components["schemas"]["BendingAxis"];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "linear";
+            /** @description Line load where it begins, positive in the same direction for all. */
+            readonly start: components["schemas"]["QuantityInput"];
+            /** @description Line load where it ends, positive in the same direction for all. */
+            readonly end: components["schemas"]["QuantityInput"];
+            /** @description Where it begins, from the lower end. Default: the lower end. */
+            readonly from?: components["schemas"]["QuantityInput"];
+            /** @description Where it ends, from the lower end. Default: the upper end. */
+            readonly to?: components["schemas"]["QuantityInput"];
+        };
+        /** Point load across a prop */
+        readonly PropPointLoad: {
+            readonly name: components["schemas"]["SourceName"];
+            readonly nature: components["schemas"]["Nature"];
+            readonly category?: components["schemas"]["Category"];
+            readonly duration?: components["schemas"]["LoadDuration"];
+            readonly axis: components["schemas"]["BendingAxis"];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "point";
+            /** @description Force, positive in the same direction for all. */
+            readonly value: components["schemas"]["QuantityInput"];
+            /** @description Where it acts, from the lower end. */
+            readonly at: components["schemas"]["QuantityInput"];
+        };
+        /** Area load on a width across a prop */
+        readonly PropAreaLoad: {
+            readonly name: components["schemas"]["SourceName"];
+            readonly nature: components["schemas"]["Nature"];
+            readonly category?: components["schemas"]["Category"];
+            readonly duration?: components["schemas"]["LoadDuration"];
+            readonly axis: components["schemas"]["BendingAxis"];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "area";
+            /** @description Area load, positive in the same direction for all. */
+            readonly value: components["schemas"]["QuantityInput"];
+            /** @description Width that the member carries. */
+            readonly width: components["schemas"]["QuantityInput"];
+            /** @description Where it begins, from the lower end. Default: the lower end. */
+            readonly from?: components["schemas"]["QuantityInput"];
+            /** @description Where it ends, from the lower end. Default: the upper end. */
+            readonly to?: components["schemas"]["QuantityInput"];
+        };
+        /** Moment applied at a point across a prop */
+        readonly PropMomentLoad: {
+            readonly name: components["schemas"]["SourceName"];
+            readonly nature: components["schemas"]["Nature"];
+            readonly category?: components["schemas"]["Category"];
+            readonly duration?: components["schemas"]["LoadDuration"];
+            readonly axis: components["schemas"]["BendingAxis"];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "moment";
+            /** @description Moment; positive where the bending moment M rises by it as x passes. */
+            readonly value: components["schemas"]["QuantityInput"];
+            /** @description Where it acts, from the lower end. */
+            readonly at: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * Transverse load on a prop
+         * @description A load of a beam check with the axis about which it bends.
+         */
+        readonly PropLoad: components["schemas"]["PropUniformLoad"] | components["schemas"]["PropLinearLoad"] | components["schemas"]["PropPointLoad"] | components["schemas"]["PropAreaLoad"] | components["schemas"]["PropMomentLoad"];
+        /**
+         * Eccentricity of the axial force at both ends
+         * @description The same at both ends, in the worse direction. Default the profile's rule; without one the check is incomplete.
+         */
+        readonly Eccentricity: {
+            /** @description The offset that makes M_y. */
+            readonly y?: components["schemas"]["QuantityInput"];
+            /** @description The offset that makes M_z. */
+            readonly z?: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * Change of temperature of a restrained prop
+         * @description N_T = restraintRatio · alpha · deltaT · E · A, a variable action of category temperature, of both signs, leading in turn.
+         */
+        readonly Thermal: {
+            /** @description Difference of temperature; of both signs. */
+            readonly deltaT: components["schemas"]["QuantityInput"];
+            /** @description Part of the free movement that is prevented. A ratio. */
+            readonly restraintRatio: number;
+        };
+        /**
+         * Prop check
+         * @description A compression member between a waler and its reaction.
+         */
+        readonly PropRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            /** @description Compression by source; the reactions of a waler go in unchanged. */
+            readonly axial: readonly components["schemas"]["PropAxial"][];
+            /** @description Loads across the prop. */
+            readonly transverse?: readonly components["schemas"]["PropLoad"][];
+            /** @description Angle to the horizontal. Self-weight bends by g cos and adds g L sin to N. Default 0. */
+            readonly inclination?: components["schemas"]["QuantityInput"];
+            /**
+             * @description Whether self-weight counts.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            /**
+             * @description The axis that self-weight bends about.
+             * @default y
+             * @enum {string}
+             */
+            readonly selfWeightAxis?: "y" | "z";
+            readonly eccentricity?: components["schemas"]["Eccentricity"];
+            readonly thermal?: components["schemas"]["Thermal"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        };
+        /**
+         * Resistance that the maker declares
+         * @description A characteristic strength over gamma_M stands against design load, a safe working load against the sum of characteristic loads; never mixed.
+         */
+        readonly DeclaredResistance: {
+            /** @description At the extension. */
+            readonly resistance: components["schemas"]["QuantityInput"];
+            /**
+             * @description What the figure is.
+             * @enum {string}
+             */
+            readonly basis: "characteristic" | "design" | "safe-working-load";
+            /** @description Where the figure stands. */
+            readonly source: components["schemas"]["Reason"];
+        };
+        /**
+         * Adjustable prop check
+         * @description An adjustable telescopic steel prop of EN 1065, vertical within the standard's tolerance.
+         */
+        readonly AdjustablePropRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            /**
+             * @description Class of EN 1065.
+             * @enum {string}
+             */
+            readonly propClass: "A" | "B" | "C" | "D" | "E";
+            /** @description Length fully extended. */
+            readonly maxLength: components["schemas"]["QuantityInput"];
+            /** @description Length fully closed. */
+            readonly minLength?: components["schemas"]["QuantityInput"];
+            /** @description Length it is used at. */
+            readonly extension: components["schemas"]["QuantityInput"];
+            /** @description Compression by source. */
+            readonly axial: readonly components["schemas"]["PropAxial"][];
+            readonly declared?: components["schemas"]["DeclaredResistance"];
+            readonly waive?: components["schemas"]["Waivers"];
+        };
+        /** Timber by strength class, with the duration of its load */
+        readonly TimberByClassWithDuration: {
+            /** @constant */
+            readonly type: "timber";
+            readonly class: components["schemas"]["TimberClass"];
+            readonly serviceClass: components["schemas"]["ServiceClass"];
+            readonly loadSharing?: components["schemas"]["LoadSharing"];
+            readonly loadDuration: components["schemas"]["LoadDuration"];
+        };
+        /** Timber by strengths, with the duration of its load */
+        readonly TimberByStrengthsWithDuration: {
+            /** @constant */
+            readonly type: "timber";
+            readonly strengths: components["schemas"]["TimberStrengths"];
+            readonly product: components["schemas"]["TimberProduct"];
+            readonly serviceClass: components["schemas"]["ServiceClass"];
+            readonly loadSharing?: components["schemas"]["LoadSharing"];
+            readonly loadDuration: components["schemas"]["LoadDuration"];
+        };
+        /**
+         * Material of a check whose effects are known
+         * @description Timber needs the duration of its load, since no load names it.
+         */
+        readonly MaterialWithDurationInput: components["schemas"]["SteelByGrade"] | components["schemas"]["SteelByStrength"] | components["schemas"]["TimberByClassWithDuration"] | components["schemas"]["TimberByStrengthsWithDuration"];
+        /**
+         * Buckling lengths
+         * @description Each defaults to `length`; 0 is held all along.
+         */
+        readonly BucklingLengths: {
+            /** @description Flexural, about y-y. */
+            readonly y?: components["schemas"]["QuantityInput"];
+            /** @description Flexural, about z-z. */
+            readonly z?: components["schemas"]["QuantityInput"];
+            /** @description Torsional. */
+            readonly T?: components["schemas"]["QuantityInput"];
+            /** @description Lateral torsional. */
+            readonly LT?: components["schemas"]["QuantityInput"];
+        };
+        /** Moment that varies linearly */
+        readonly MomentLinear: {
+            /**
+             * @default linear
+             * @constant
+             */
+            readonly shape?: "linear";
+            /** @description At the start. */
+            readonly start: components["schemas"]["QuantityInput"];
+            /** @description At the end. */
+            readonly end: components["schemas"]["QuantityInput"];
+        };
+        /** Moment under a uniform load */
+        readonly MomentUniformLoad: {
+            /** @constant */
+            readonly shape: "uniform-load";
+            /** @description At the start. */
+            readonly start: components["schemas"]["QuantityInput"];
+            /** @description At the end. */
+            readonly end: components["schemas"]["QuantityInput"];
+            /** @description At mid-length. */
+            readonly mid: components["schemas"]["QuantityInput"];
+        };
+        /** Moment under a central point load */
+        readonly MomentPointLoad: {
+            /** @constant */
+            readonly shape: "point-load";
+            /** @description At the start. */
+            readonly start: components["schemas"]["QuantityInput"];
+            /** @description At the end. */
+            readonly end: components["schemas"]["QuantityInput"];
+            /** @description At mid-length. */
+            readonly mid: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * A moment along the member
+         * @description One quantity: uniform. Start and end, the same sign being single curvature; and `mid` where a load makes the diagram curved or kinked.
+         */
+        readonly MomentInput: components["schemas"]["QuantityInput"] | components["schemas"]["MomentLinear"] | components["schemas"]["MomentUniformLoad"] | components["schemas"]["MomentPointLoad"];
+        /**
+         * Design effects along a member
+         * @description `compression` or `tension`, at most one, never negative.
+         */
+        readonly MemberEffects: {
+            /** @description N_Ed as compression. */
+            readonly compression?: components["schemas"]["QuantityInput"];
+            /** @description N_Ed as tension. */
+            readonly tension?: components["schemas"]["QuantityInput"];
+            /** @description Bending about y-y. */
+            readonly My?: components["schemas"]["MomentInput"];
+            /** @description Bending about z-z. */
+            readonly Mz?: components["schemas"]["MomentInput"];
+            /** @description Shear along z-z. */
+            readonly Vz?: components["schemas"]["QuantityInput"];
+            /** @description Shear along y-y. */
+            readonly Vy?: components["schemas"]["QuantityInput"];
+        };
+        /** @description A factor of equivalent uniform moment. */
+        readonly MomentFactor: number;
+        /**
+         * Member check
+         * @description A member whose design effects are known.
+         */
+        readonly MemberRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialWithDurationInput"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingLengths?: components["schemas"]["BucklingLengths"];
+            readonly effects: components["schemas"]["MemberEffects"];
+            /** @default shear-centre */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            /** @description Override of C_1, named in the working. A ratio. */
+            readonly C1?: number;
+            /** @description Override of C_my, named in the working. A ratio. */
+            readonly Cmy?: components["schemas"]["MomentFactor"];
+            /** @description Override of C_mz, named in the working. A ratio. */
+            readonly Cmz?: components["schemas"]["MomentFactor"];
+            /** @description Override of C_mLT, named in the working. A ratio. */
+            readonly CmLT?: components["schemas"]["MomentFactor"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+        };
+        /**
+         * Design effects at one cross-section
+         * @description `compression` or `tension`, at most one, never negative.
+         */
+        readonly SectionEffects: {
+            /** @description N_Ed as compression. */
+            readonly compression?: components["schemas"]["QuantityInput"];
+            /** @description N_Ed as tension. */
+            readonly tension?: components["schemas"]["QuantityInput"];
+            /** @description Bending about y-y. */
+            readonly My?: components["schemas"]["QuantityInput"];
+            /** @description Bending about z-z. */
+            readonly Mz?: components["schemas"]["QuantityInput"];
+            /** @description Shear along y-y. */
+            readonly Vy?: components["schemas"]["QuantityInput"];
+            /** @description Shear along z-z. */
+            readonly Vz?: components["schemas"]["QuantityInput"];
+            /** @description Torsion; on an open section with its parts `stVenant` and `warping`. */
+            readonly T?: components["schemas"]["QuantityInput"];
+            /** @description St Venant part of T. */
+            readonly stVenant?: components["schemas"]["QuantityInput"];
+            /** @description Warping part of T. */
+            readonly warping?: components["schemas"]["QuantityInput"];
+            /** @description Bimoment. */
+            readonly bimoment?: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * Cross-section check
+         * @description Design effects that act together at one cross-section. V above 0.5 V_pl reduces the yield strength of A_v by (1 - rho) in N and M (EN 1993-1-1 6.2.10).
+         */
+        readonly SectionRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly material: components["schemas"]["MaterialWithDurationInput"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly effects: components["schemas"]["SectionEffects"];
+            /** @description Net area at the holes, of one member. Default the gross area. */
+            readonly netArea?: components["schemas"]["QuantityInput"];
+            /**
+             * @description Whether von Mises' criterion (EN 1993-1-1 6.2.1(5)) counts.
+             * @default false
+             */
+            readonly vonMises?: boolean;
+        };
+        /** Plane state of stress */
+        readonly StressState: {
+            /** @description Along the member, tension positive. Default 0. */
+            readonly sigmaX?: components["schemas"]["QuantityInput"];
+            /** @description Across the member, tension positive. Default 0. */
+            readonly sigmaZ?: components["schemas"]["QuantityInput"];
+            /** @description Shear stress. Default 0. */
+            readonly tau?: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * Stress check
+         * @description States of stress as they are, or effects at the named points of a section. Tension is positive. M_y positive stretches z > 0.
+         */
+        readonly StressRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly material: components["schemas"]["MaterialInput"];
+            /** @description States of stress; give either these or a section with effects. */
+            readonly states?: readonly components["schemas"]["StressState"][];
+            readonly section?: components["schemas"]["SectionInput"];
+            readonly effects?: components["schemas"]["SectionEffects"];
+        } & (unknown | unknown);
+        /**
+         * Timber across the grain
+         * @description EN 1995-1-1 6.1.5, at an angle 6.2.2.
+         */
+        readonly BearingAcrossGrain: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "across-grain";
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly material: components["schemas"]["MaterialWithDurationInput"];
+            /** @description Width of the contact. */
+            readonly width: components["schemas"]["QuantityInput"];
+            /** @description Length of the contact along the grain. */
+            readonly length: components["schemas"]["QuantityInput"];
+            /** @description From the contact to the end of the member, a. Default 0. */
+            readonly edgeDistance?: components["schemas"]["QuantityInput"];
+            /** @description Clear distance to the next contact, l_1. */
+            readonly spacing?: components["schemas"]["QuantityInput"];
+            /** @description Depth of the member, h. */
+            readonly depth: components["schemas"]["QuantityInput"];
+            /**
+             * @description How the member lies.
+             * @enum {string}
+             */
+            readonly support: "continuous" | "discrete";
+            /** @description Design force. */
+            readonly force: components["schemas"]["QuantityInput"];
+            /** @description Angle of the force to the grain. Default 90°. */
+            readonly angle?: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * Transverse force on a steel web
+         * @description EN 1993-1-5 section 6.
+         */
+        readonly BearingTransverseForce: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "transverse-force";
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly section: components["schemas"]["SectionInput"];
+            /**
+             * @description Type of load application of Figure 6.1.
+             * @enum {string}
+             */
+            readonly type: "a" | "b" | "c";
+            /** @description Stiff bearing length s_s. */
+            readonly bearingLength: components["schemas"]["QuantityInput"];
+            /** @description Distance between transverse stiffeners. Default none. */
+            readonly stiffenerSpacing?: components["schemas"]["QuantityInput"];
+            /** @description Distance c from the end, for type c. Default 0. */
+            readonly endDistance?: components["schemas"]["QuantityInput"];
+            /** @description Design force. */
+            readonly force: components["schemas"]["QuantityInput"];
+        };
+        /** Sole plate on ground */
+        readonly BearingOnGround: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            readonly kind: "ground";
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly material?: components["schemas"]["MaterialWithDurationInput"];
+            /** @description Width of the plate. */
+            readonly width: components["schemas"]["QuantityInput"];
+            /** @description Length of the plate. */
+            readonly length: components["schemas"]["QuantityInput"];
+            /** @description Depth of the plate. */
+            readonly depth: components["schemas"]["QuantityInput"];
+            /** @description Force on the plate. */
+            readonly force: components["schemas"]["QuantityInput"];
+            /** @description Allowable bearing pressure. */
+            readonly groundPressure: components["schemas"]["QuantityInput"];
+        };
+        /**
+         * Bearing check
+         * @description Timber across the grain, a transverse force on a steel web, or a sole plate on ground.
+         */
+        readonly BearingRequest: components["schemas"]["BearingAcrossGrain"] | components["schemas"]["BearingTransverseForce"] | components["schemas"]["BearingOnGround"];
+        /**
+         * A JSON Schema
+         * @description Draft 2020-12, with all that it refers to under `$defs`.
+         */
+        readonly JsonSchema: {
+            readonly [key: string]: unknown;
+        };
+        /** An element of MathML */
+        readonly MathElement: {
+            readonly [key: string]: unknown;
+        };
+        /** One formula */
+        readonly Formula: {
+            readonly id: string;
+            readonly symbol: components["schemas"]["Symbol"];
             readonly title: string;
-            /** @description The HTTP status. */
-            readonly status: number;
-            /** @description What happened here. */
-            readonly detail: string;
+            readonly unit: components["schemas"]["Unit"];
+            readonly clause: string;
+            /** @description The formula in mathjs syntax. */
+            readonly expression: string;
+            /** @description Unit of each symbol in it. */
+            readonly where: {
+                readonly [key: string]: components["schemas"]["Unit"];
+            };
+            /** @description Presentation MathML. */
+            readonly mathml: string;
+            /** @description The same MathML as a tree, for pages that may not set markup. */
+            readonly elements: components["schemas"]["MathElement"];
+        };
+        /** One revision without its values */
+        readonly RevisionFacts: {
+            readonly revision: number;
+            readonly status: components["schemas"]["RevisionStatus"];
+            readonly standing: components["schemas"]["RevisionStanding"];
+            /** @description Over the canonical JSON of tree and departures, in hex. */
+            readonly sha256: string;
+            /** @description The first day it may be used. */
+            readonly effectiveFrom: string | null;
+            /** @description When it ends; `null`: not. */
+            readonly expiresAt: string | null;
+            readonly approvedAt: string | null;
+            readonly approvedBy: string | null;
+        };
+        /** One factor profile */
+        readonly ProfileSummary: {
+            /** @example uk-na */
+            readonly slug: string;
+            readonly title: string;
+            /** @description Who answers for it. */
+            readonly owner: string;
+            /** @description The revision in effect today, or `null`. */
+            readonly current: number | null;
+            /** @description Newest first. */
+            readonly revisions: readonly components["schemas"]["RevisionFacts"][];
+        };
+        /** The factor profiles there are */
+        readonly ProfileList: {
+            readonly items: readonly components["schemas"]["ProfileSummary"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
+        /** One revision with all its values */
+        readonly ProfileDetail: {
+            /** @example uk-na */
+            readonly slug: string;
+            readonly title: string;
+            /** @description Who answers for it. */
+            readonly owner: string;
+            readonly revision: number;
+            readonly status: components["schemas"]["RevisionStatus"];
+            readonly standing: components["schemas"]["RevisionStanding"];
+            /** @description Over the canonical JSON of tree and departures, in hex. */
+            readonly sha256: string;
+            /** @description The first day it may be used. */
+            readonly effectiveFrom: string | null;
+            /** @description When it ends; `null`: not. */
+            readonly expiresAt: string | null;
+            readonly approvedAt: string | null;
+            readonly approvedBy: string | null;
+            readonly departures: readonly components["schemas"]["DepartureLine"][];
+            /** @description Names to branches or to values; a value carries value, unit, clause, source, locator, kind, confirmedBy and note. */
+            readonly tree: {
+                readonly [key: string]: unknown;
+            };
+        };
+        /** One check of a batch */
+        readonly BatchItem: {
+            /** @description The caller's own, unique in the batch. */
+            readonly id: string;
+            readonly check: components["schemas"]["CheckId"];
+            /** @description The body of that check. It is validated on its own, so that one item's fault leaves its neighbours alone. */
+            readonly input: {
+                readonly [key: string]: unknown;
+            };
+        };
+        /** Many checks at a time */
+        readonly BatchRequest: {
+            readonly items: readonly components["schemas"]["BatchItem"][];
+        };
+        /**
+         * Answer to one item
+         * @description Either `result` or `problem`.
+         */
+        readonly BatchResult: {
+            readonly id: string;
+            readonly httpStatus: number;
+            readonly result?: components["schemas"]["CheckAnswer"];
+            readonly problem?: components["schemas"]["Problem"];
+        };
+        /** Answers in the order of the items */
+        readonly BatchAnswer: {
+            readonly items: readonly components["schemas"]["BatchResult"][];
+        };
+        /** Sections to choose from */
+        readonly Candidates: {
+            /** @description Families of the catalogue. */
+            readonly families: readonly string[];
+            /** @description Greatest depth. */
+            readonly maxDepth?: components["schemas"]["QuantityInput"];
+            /** @description Only these. */
+            readonly designations?: readonly components["schemas"]["SectionName"][];
+        };
+        /**
+         * Lightest section of a waler
+         * @description The body of the check without `section`, and the candidates.
+         */
+        readonly WalerSelectRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly candidates: components["schemas"]["Candidates"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
             /**
-             * Format: uri-reference
-             * @description The path that was asked.
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default compression-only
+             * @enum {string}
              */
-            readonly instance: string;
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
             /**
-             * @description Stable word for programs.
-             * @example not-valid
+             * @description Self-weight bends about z-z, between props or between `verticalSupports`.
+             * @default true
              */
-            readonly code: string;
-            /** @description The log's own id of the request. */
-            readonly requestId: string;
-            /** @description Whether the same request may succeed later. */
-            readonly retryable: boolean;
-            /** @description What is at fault, most specific first. */
-            readonly errors: readonly components["schemas"]["ProblemItem"][];
+            readonly selfWeight?: boolean;
+            readonly verticalSupports?: components["schemas"]["VerticalSupports"];
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /** One candidate */
+        readonly SelectedSection: {
+            readonly designation: string;
+            /** @description Of the set. */
+            readonly mass: components["schemas"]["Quantity"];
+            readonly status: components["schemas"]["CheckStatus"];
+            readonly utilisation: number | null;
+            readonly governing: components["schemas"]["VerificationId"] | null;
+        };
+        /** A candidate that could not be checked */
+        readonly SkippedSection: {
+            readonly designation: string;
+            readonly problem: components["schemas"]["Problem"];
+        };
+        /** The lightest section that passes */
+        readonly SelectAnswer: {
+            readonly check: components["schemas"]["CheckId"];
+            /** @description The first that passes, or `null`. */
+            readonly chosen: components["schemas"]["SelectedSection"] | null;
+            /** @description Those that were checked, by mass. */
+            readonly candidates: readonly components["schemas"]["SelectedSection"][];
+            readonly skipped: readonly components["schemas"]["SkippedSection"][];
+        };
+        /**
+         * Lightest section of a beam
+         * @description The body of the check without `section`, and the candidates.
+         */
+        readonly BeamSelectRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly candidates: components["schemas"]["Candidates"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
+            /**
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default both-ways
+             * @enum {string}
+             */
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
+            /**
+             * @description Self-weight bends about y-y, with the loads.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /**
+         * Lightest section of a prop
+         * @description The body of the check without `section`, and the candidates.
+         */
+        readonly PropSelectRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly candidates: components["schemas"]["Candidates"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            /** @description Compression by source; the reactions of a waler go in unchanged. */
+            readonly axial: readonly components["schemas"]["PropAxial"][];
+            /** @description Loads across the prop. */
+            readonly transverse?: readonly components["schemas"]["PropLoad"][];
+            /** @description Angle to the horizontal. Self-weight bends by g cos and adds g L sin to N. Default 0. */
+            readonly inclination?: components["schemas"]["QuantityInput"];
+            /**
+             * @description Whether self-weight counts.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            /**
+             * @description The axis that self-weight bends about.
+             * @default y
+             * @enum {string}
+             */
+            readonly selfWeightAxis?: "y" | "z";
+            readonly eccentricity?: components["schemas"]["Eccentricity"];
+            readonly thermal?: components["schemas"]["Thermal"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        };
+        /**
+         * Lightest section of a member
+         * @description The body of the check without `section`, and the candidates.
+         */
+        readonly MemberSelectRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly candidates: components["schemas"]["Candidates"];
+            readonly material: components["schemas"]["MaterialWithDurationInput"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingLengths?: components["schemas"]["BucklingLengths"];
+            readonly effects: components["schemas"]["MemberEffects"];
+            /** @default shear-centre */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            /** @description Override of C_1, named in the working. A ratio. */
+            readonly C1?: number;
+            /** @description Override of C_my, named in the working. A ratio. */
+            readonly Cmy?: components["schemas"]["MomentFactor"];
+            /** @description Override of C_mz, named in the working. A ratio. */
+            readonly Cmz?: components["schemas"]["MomentFactor"];
+            /** @description Override of C_mLT, named in the working. A ratio. */
+            readonly CmLT?: components["schemas"]["MomentFactor"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+        };
+        /** @description The profiles to compare, the first being the one that others are compared with. */
+        readonly Profiles: readonly components["schemas"]["ProfileName"][];
+        /**
+         * A waler under several profiles
+         * @description The body of the check, and the profiles.
+         */
+        readonly WalerCompareRequest: {
+            readonly profiles: components["schemas"]["Profiles"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
+            /**
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default compression-only
+             * @enum {string}
+             */
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
+            /**
+             * @description Self-weight bends about z-z, between props or between `verticalSupports`.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            readonly verticalSupports?: components["schemas"]["VerticalSupports"];
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /**
+         * The member under one profile
+         * @description Either `result` or `problem`.
+         */
+        readonly ComparedProfile: {
+            readonly profile: string;
+            readonly httpStatus: number;
+            readonly result?: components["schemas"]["CheckAnswer"];
+            readonly problem?: components["schemas"]["Problem"];
+        };
+        /** The same member under several profiles */
+        readonly CompareAnswer: {
+            readonly check: components["schemas"]["CheckId"];
+            readonly items: readonly components["schemas"]["ComparedProfile"][];
+        };
+        /**
+         * A beam under several profiles
+         * @description The body of the check, and the profiles.
+         */
+        readonly BeamCompareRequest: {
+            readonly profiles: components["schemas"]["Profiles"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
+            /**
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default both-ways
+             * @enum {string}
+             */
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
+            /**
+             * @description Self-weight bends about y-y, with the loads.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /**
+         * A prop under several profiles
+         * @description The body of the check, and the profiles.
+         */
+        readonly PropCompareRequest: {
+            readonly profiles: components["schemas"]["Profiles"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            /** @description Compression by source; the reactions of a waler go in unchanged. */
+            readonly axial: readonly components["schemas"]["PropAxial"][];
+            /** @description Loads across the prop. */
+            readonly transverse?: readonly components["schemas"]["PropLoad"][];
+            /** @description Angle to the horizontal. Self-weight bends by g cos and adds g L sin to N. Default 0. */
+            readonly inclination?: components["schemas"]["QuantityInput"];
+            /**
+             * @description Whether self-weight counts.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            /**
+             * @description The axis that self-weight bends about.
+             * @default y
+             * @enum {string}
+             */
+            readonly selfWeightAxis?: "y" | "z";
+            readonly eccentricity?: components["schemas"]["Eccentricity"];
+            readonly thermal?: components["schemas"]["Thermal"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        };
+        /**
+         * A member under several profiles
+         * @description The body of the check, and the profiles.
+         */
+        readonly MemberCompareRequest: {
+            readonly profiles: components["schemas"]["Profiles"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialWithDurationInput"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingLengths?: components["schemas"]["BucklingLengths"];
+            readonly effects: components["schemas"]["MemberEffects"];
+            /** @default shear-centre */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            /** @description Override of C_1, named in the working. A ratio. */
+            readonly C1?: number;
+            /** @description Override of C_my, named in the working. A ratio. */
+            readonly Cmy?: components["schemas"]["MomentFactor"];
+            /** @description Override of C_mz, named in the working. A ratio. */
+            readonly Cmz?: components["schemas"]["MomentFactor"];
+            /** @description Override of C_mLT, named in the working. A ratio. */
+            readonly CmLT?: components["schemas"]["MomentFactor"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+        };
+        /**
+         * @description `span`: all spans by one factor, or the length of a prop. `loads.NAME`: all loads of that name, thrust and axial force too.
+         * @example loads.earth
+         */
+        readonly Vary: string;
+        /**
+         * Greatest load or span of a waler
+         * @description The body of the check, and what varies.
+         */
+        readonly WalerLimitsRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly vary: components["schemas"]["Vary"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
+            /**
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default compression-only
+             * @enum {string}
+             */
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
+            /**
+             * @description Self-weight bends about z-z, between props or between `verticalSupports`.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            readonly verticalSupports?: components["schemas"]["VerticalSupports"];
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /**
+         * The greatest value that passes
+         * @description Rounded towards pass.
+         */
+        readonly LimitFound: {
+            readonly value: number;
+            readonly unit: components["schemas"]["Unit"];
+            readonly utilisation: number | null;
+            readonly governing: components["schemas"]["VerificationId"] | null;
+        };
+        /** There is no such value */
+        readonly NoLimit: {
+            /** @description Why. */
+            readonly none: string;
+        };
+        /** Greatest load or span */
+        readonly LimitsAnswer: components["schemas"]["LimitFound"] | components["schemas"]["NoLimit"];
+        /**
+         * Greatest load or span of a beam
+         * @description The body of the check, and what varies.
+         */
+        readonly BeamLimitsRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly vary: components["schemas"]["Vary"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            readonly spans: components["schemas"]["Spans"];
+            readonly overhangs?: components["schemas"]["Overhangs"];
+            readonly loads?: components["schemas"]["Loads"];
+            readonly loadSets?: components["schemas"]["LoadSets"];
+            readonly patternLoading?: components["schemas"]["PatternLoading"];
+            readonly thrust?: components["schemas"]["Thrust"];
+            /**
+             * @description `compression-only`: a support only pushes; a combination that would pull on one is solved again without it, until none pulls. `both-ways`: a support holds against lifting too.
+             * @default both-ways
+             * @enum {string}
+             */
+            readonly supports?: "compression-only" | "both-ways";
+            readonly supportStiffness?: components["schemas"]["SupportStiffness"];
+            /**
+             * @description Self-weight bends about y-y, with the loads.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            readonly restraint?: components["schemas"]["Restraint"];
+            /** @default top */
+            readonly loadLevel?: components["schemas"]["LoadLevel"];
+            readonly bearing?: components["schemas"]["StiffBearing"];
+            readonly lossOfProp?: components["schemas"]["LossOfProp"];
+            readonly deflectionLimit?: components["schemas"]["DeflectionLimit"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        } & (unknown | unknown);
+        /**
+         * Greatest load or length of a prop
+         * @description The body of the check, and what varies.
+         */
+        readonly PropLimitsRequest: {
+            readonly profile?: components["schemas"]["ProfileName"];
+            readonly vary: components["schemas"]["Vary"];
+            readonly section: components["schemas"]["SectionInput"];
+            readonly material: components["schemas"]["MaterialInput"];
+            readonly loadBasis: components["schemas"]["LoadBasis"];
+            /** @description Length between its ends. */
+            readonly length: components["schemas"]["QuantityInput"];
+            readonly bucklingFactors?: components["schemas"]["BucklingFactors"];
+            /** @description Compression by source; the reactions of a waler go in unchanged. */
+            readonly axial: readonly components["schemas"]["PropAxial"][];
+            /** @description Loads across the prop. */
+            readonly transverse?: readonly components["schemas"]["PropLoad"][];
+            /** @description Angle to the horizontal. Self-weight bends by g cos and adds g L sin to N. Default 0. */
+            readonly inclination?: components["schemas"]["QuantityInput"];
+            /**
+             * @description Whether self-weight counts.
+             * @default true
+             */
+            readonly selfWeight?: boolean;
+            /**
+             * @description The axis that self-weight bends about.
+             * @default y
+             * @enum {string}
+             */
+            readonly selfWeightAxis?: "y" | "z";
+            readonly eccentricity?: components["schemas"]["Eccentricity"];
+            readonly thermal?: components["schemas"]["Thermal"];
+            readonly interaction?: components["schemas"]["InteractionMethod"];
+            readonly lateralTorsional?: components["schemas"]["LateralTorsionalMethod"];
+            readonly waive?: components["schemas"]["Waivers"];
+        };
+        /** One call */
+        readonly UsageEvent: {
+            /** @description The log's own id of the call; X-Request-Id of its answer. */
+            readonly id: string;
+            /**
+             * Format: date-time
+             * @description When it began.
+             */
+            readonly at: string;
+            /**
+             * @description A streamed answer has a row before its first byte and one after its last.
+             * @enum {string}
+             */
+            readonly phase: "whole" | "start" | "end";
+            readonly clientId: string | null;
+            readonly keyId: string | null;
+            /** @description The public part of the key. */
+            readonly keySelector: string | null;
+            readonly method: string;
+            readonly route: string;
+            readonly checkId: string | null;
+            readonly profile: string | null;
+            readonly profileRevision: number | null;
+            readonly httpStatus: number;
+            /** @description The problem's code. */
+            readonly code: string | null;
+            /** @description Status of the check. */
+            readonly answer: string | null;
+            readonly utilisation: number | null;
+            readonly governing: string | null;
+            /** @description How many items a batch had. */
+            readonly items: number | null;
+            /** @description In microseconds. */
+            readonly durationUs: number;
+            readonly address: string | null;
+            readonly origin: string | null;
+            /** @description The caller's own X-Request-Id. */
+            readonly callerRequestId: string | null;
+            /** @description How many alike calls the row stands for. */
+            readonly repeats: number;
+        };
+        /** A page of the log */
+        readonly UsageList: {
+            /** @description Newest first. */
+            readonly items: readonly components["schemas"]["UsageEvent"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
+        /** An OpenAPI 3.1 document */
+        readonly OpenApiDocument: {
+            readonly [key: string]: unknown;
+        };
+        /** The process answers */
+        readonly Health: {
+            /** @enum {string} */
+            readonly status: "ok";
+        };
+        /** What the service needs, and whether it is there */
+        readonly Readiness: {
+            /** @enum {string} */
+            readonly status: "ready" | "not-ready";
+            /** @description The database answers. */
+            readonly database: boolean;
+            /** @description Changes of keys and profiles are heard. */
+            readonly listener: boolean;
+            /** Partitions of the log */
+            readonly partitions: {
+                readonly ok: boolean;
+                readonly warnings: readonly string[];
+            };
         };
     };
-    responses: never;
-    parameters: never;
+    responses: {
+        /** @description No key, or not a good one. */
+        readonly KeyRefused: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly "WWW-Authenticate": components["headers"]["WwwAuthenticate"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/key-required",
+                 *       "title": "A key is required",
+                 *       "status": 401,
+                 *       "detail": "Send the key in the Authorization header.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "key-required",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The key lacks the scope, may not use the profile, or is used from a foreign origin. */
+        readonly NotAllowed: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly "WWW-Authenticate": components["headers"]["WwwAuthenticate"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/scope-missing",
+                 *       "title": "The key lacks a scope",
+                 *       "status": 403,
+                 *       "detail": "The key lacks the scope \"checks\".",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "scope-missing",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description A query parameter is unknown, stands twice or has a value that it cannot have. */
+        readonly QueryNotValid: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/query-not-valid",
+                 *       "title": "The query is not valid",
+                 *       "status": 422,
+                 *       "detail": "The query is not valid.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "query-not-valid",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": [
+                 *         {
+                 *           "pointer": "/query/detial",
+                 *           "code": "unknown-parameter",
+                 *           "message": "No such parameter.",
+                 *           "fix": "Known here: detail."
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The limit of calls a minute is used up. */
+        readonly TooManyCalls: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly "Retry-After": components["headers"]["RetryAfter"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/rate-limited",
+                 *       "title": "Too many requests",
+                 *       "status": 429,
+                 *       "detail": "The limit \"key\" is used up; it begins anew in 12 s.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "rate-limited",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": true,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description A defect of this service. */
+        readonly Unexpected: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/unexpected",
+                 *       "title": "Something went wrong here",
+                 *       "status": 500,
+                 *       "detail": "A defect of this service.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "unexpected",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": true,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The log or the database is away, or too much waits. Nothing was done. */
+        readonly Away: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly "Retry-After": components["headers"]["RetryAfter"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/log-unavailable",
+                 *       "title": "The call could not be logged",
+                 *       "status": 503,
+                 *       "detail": "The call could not be logged. Nothing was done; ask again.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "log-unavailable",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": true,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The body is not JSON. */
+        readonly NotJson: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/not-json",
+                 *       "title": "The body is not JSON",
+                 *       "status": 400,
+                 *       "detail": "The body cannot be read as JSON.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "not-json",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The body has more than 1 MB. */
+        readonly TooLarge: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/too-large",
+                 *       "title": "The body is too large",
+                 *       "status": 413,
+                 *       "detail": "The body has more than 1 MB.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "too-large",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The body is not declared as JSON in UTF-8. */
+        readonly NotDeclaredAsJson: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/media-type",
+                 *       "title": "The body is not declared as JSON",
+                 *       "status": 415,
+                 *       "detail": "Send the body as application/json in UTF-8.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "media-type",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description Not valid, or outside what the check covers. Each fault has its JSON pointer; a `fix` where one is known. At most 20, the most specific first. Codes of `errors` are wrong-type, missing-field, unknown-field, not-one-of, one-of-both, not-a-quantity, wrong-unit, unknown-unit, negative, must-be-positive, too-large, too-small, too-many, too-few, empty, too-long, too-short, repeated, wrong-form, control-character, reserved-word, not-finite. */
+        readonly NotValid: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/not-valid",
+                 *       "title": "The request is not valid",
+                 *       "status": 422,
+                 *       "detail": "Some of the body is not what the check takes.",
+                 *       "instance": "/v1/checks/waler",
+                 *       "code": "not-valid",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": [
+                 *         {
+                 *           "pointer": "/spans/1",
+                 *           "code": "wrong-unit",
+                 *           "message": "`spans[1]`: The unit \"kN\" does not measure what m measures.",
+                 *           "fix": "Give a number in m, or text such as \"2.4 m\"."
+                 *         },
+                 *         {
+                 *           "pointer": "/overhang",
+                 *           "code": "unknown-field",
+                 *           "message": "There is no field `overhang`.",
+                 *           "fix": "Did you mean `overhangs`?"
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description There is nothing here, or nothing that the key may know of. */
+        readonly NotFound: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/not-found",
+                 *       "title": "There is nothing here",
+                 *       "status": 404,
+                 *       "detail": "There is no such thing.",
+                 *       "instance": "/v1/profiles/no-such",
+                 *       "code": "not-found",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+    };
+    parameters: {
+        /** @description The caller's own id of the call; it is kept in the log as a label. */
+        readonly RequestId: string;
+        /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+        readonly Detail: "full" | "summary";
+        /**
+         * @description One of the checks.
+         * @example waler
+         */
+        readonly CheckIdInPath: components["schemas"]["CheckId"];
+        /** @description A step's `formula`. */
+        readonly FormulaIdInPath: string;
+        /**
+         * @description `uk-na` is the revision in effect, else the newest; `uk-na@2` is that revision.
+         * @example uk-na
+         */
+        readonly ProfileInPath: string;
+        /** @description `full` shows the working of every item; `summary` gathers none, and is quicker. Default `summary`. */
+        readonly BatchDetail: "full" | "summary";
+        /** @description `nextPageToken` of the page before. Default the first page. */
+        readonly PageToken: string;
+        /**
+         * @description X-Request-Id of the answer.
+         * @example 01K4QZ6T3M8V5W2C7R9B0N1XJD
+         */
+        readonly RequestIdInPath: string;
+        /**
+         * @description A problem's `code`.
+         * @example not-valid
+         */
+        readonly ProblemCodeInPath: string;
+    };
     requestBodies: never;
-    headers: never;
+    headers: {
+        /**
+         * @description The log's own id of the call. A caller's own X-Request-Id is kept beside it.
+         * @example 01K4QZ6T3M8V5W2C7R9B0N1XJD
+         */
+        readonly XRequestId: string;
+        /**
+         * @description What is left of each limit, and the seconds until it begins anew.
+         * @example "key"; r=5999; t=60
+         */
+        readonly RateLimit: string;
+        /**
+         * @description The limits that apply, with their windows in seconds.
+         * @example "key"; q=6000; w=60
+         */
+        readonly RateLimitPolicy: string;
+        /**
+         * @description What the key lacks, by RFC 6750.
+         * @example Bearer realm="headtree", error="invalid_token"
+         */
+        readonly WwwAuthenticate: string;
+        /**
+         * @description Seconds to wait before the same request is sent again.
+         * @example 12
+         */
+        readonly RetryAfter: string;
+        /**
+         * @description How long the answer may be kept.
+         * @example private, max-age=31536000, immutable
+         */
+        readonly CacheControl: string;
+    };
     pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-    readonly checkWaler: {
+    readonly listChecks: {
         readonly parameters: {
             readonly query?: never;
-            readonly header?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The checks. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "items": [
+                     *         {
+                     *           "id": "waler",
+                     *           "title": "Waler",
+                     *           "path": "/v1/checks/waler",
+                     *           "schema": "/v1/checks/waler/schema"
+                     *         }
+                     *       ],
+                     *       "nextPageToken": null
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["CheckList"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkWaler: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
             readonly path?: never;
             readonly cookie?: never;
         };
@@ -1026,24 +3242,1223 @@ export interface operations {
             };
         };
         readonly responses: {
-            /** @description The answer. */
+            /** @description The answer. Only `pass` is a pass. */
             readonly 200: {
                 headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
                     readonly [name: string]: unknown;
                 };
                 content: {
                     readonly "application/json": components["schemas"]["CheckAnswer"];
                 };
             };
-            /** @description Not valid. */
-            readonly 422: {
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkBeam: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["BeamRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
                 headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
                     readonly [name: string]: unknown;
                 };
                 content: {
-                    readonly "application/problem+json": components["schemas"]["Problem"];
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
                 };
             };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkProp: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["PropRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkAdjustableProp: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["AdjustablePropRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkMember: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["MemberRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkSection: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["SectionRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkStress: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["StressRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly checkBearing: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working, line by line; `summary` gathers none, and is quicker. Default `full`. */
+                readonly detail?: components["parameters"]["Detail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["BearingRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answer. Only `pass` is a pass. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CheckAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readCheckSchema: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description One of the checks.
+                 * @example waler
+                 */
+                readonly check: components["parameters"]["CheckIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The schema. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "$schema": "https://json-schema.org/draft/2020-12/schema",
+                     *       "title": "Waler check",
+                     *       "type": "object"
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["JsonSchema"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readFormula: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /** @description A step's `formula`. */
+                readonly id: components["parameters"]["FormulaIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The formula. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly "Cache-Control": components["headers"]["CacheControl"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Formula"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly listProfiles: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The profiles. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ProfileList"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readProfile: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description `uk-na` is the revision in effect, else the newest; `uk-na@2` is that revision.
+                 * @example uk-na
+                 */
+                readonly slug: components["parameters"]["ProfileInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The revision. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ProfileDetail"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly runBatch: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working of every item; `summary` gathers none, and is quicker. Default `summary`. */
+                readonly detail?: components["parameters"]["BatchDetail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["BatchRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The answers, in the order of the items. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["BatchAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly runCsvBatch: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `full` shows the working of every item; `summary` gathers none, and is quicker. Default `summary`. */
+                readonly detail?: components["parameters"]["BatchDetail"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description One of the checks.
+                 * @example waler
+                 */
+                readonly check: components["parameters"]["CheckIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example ref,section,spans,loads.0.name,loads.0.value
+                 *     W1,UB 457x191x67,3+3+2.4,earth,95
+                 */
+                readonly "text/csv": string;
+            };
+        };
+        readonly responses: {
+            /** @description The rows. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example ref,row,status,utilisation,governing,error
+                     *     W1,1,pass,0.62,bending-y,
+                     *     #end,1
+                     */
+                    readonly "text/csv": string;
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly selectWaler: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["WalerSelectRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The choice. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SelectAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly selectBeam: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["BeamSelectRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The choice. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SelectAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly selectProp: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["PropSelectRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The choice. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SelectAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly selectMember: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["MemberSelectRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The choice. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SelectAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly compareWaler: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["WalerCompareRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The comparison. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CompareAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly compareBeam: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["BeamCompareRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The comparison. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CompareAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly compareProp: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["PropCompareRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The comparison. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CompareAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly compareMember: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["MemberCompareRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The comparison. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["CompareAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly limitsWaler: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["WalerLimitsRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The limit. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["LimitsAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly limitsBeam: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["BeamLimitsRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The limit. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["LimitsAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly limitsProp: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                readonly "application/json": components["schemas"]["PropLimitsRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The limit. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["LimitsAnswer"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly listUsage: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description `nextPageToken` of the page before. Default the first page. */
+                readonly pageToken?: components["parameters"]["PageToken"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page of the log. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["UsageList"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readUsage: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description X-Request-Id of the answer.
+                 * @example 01K4QZ6T3M8V5W2C7R9B0N1XJD
+                 */
+                readonly requestId: components["parameters"]["RequestIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The call. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["UsageEvent"];
+                };
+            };
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readContract: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The contract. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["OpenApiDocument"];
+                };
+            };
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+        };
+    };
+    readonly isAlive: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description It does. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "status": "ok"
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["Health"];
+                };
+            };
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 500: components["responses"]["Unexpected"];
+        };
+    };
+    readonly isReady: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description It is. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "status": "ready",
+                     *       "database": true,
+                     *       "listener": true,
+                     *       "partitions": {
+                     *         "ok": true,
+                     *         "warnings": []
+                     *       }
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["Readiness"];
+                };
+            };
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 500: components["responses"]["Unexpected"];
+            /** @description It is not. */
+            readonly 503: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly "Retry-After": components["headers"]["RetryAfter"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "status": "not-ready",
+                     *       "database": false,
+                     *       "listener": false,
+                     *       "partitions": {
+                     *         "ok": true,
+                     *         "warnings": []
+                     *       }
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["Readiness"];
+                };
+            };
+        };
+    };
+    readonly readProblem: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description A problem's `code`.
+                 * @example not-valid
+                 */
+                readonly code: components["parameters"]["ProblemCodeInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The page. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "text/html": string;
+                };
+            };
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 500: components["responses"]["Unexpected"];
         };
     };
 }

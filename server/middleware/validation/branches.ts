@@ -1,7 +1,12 @@
 import { type ContractSchema, nameOf, type QuantityRule, resolved } from './document';
 
 /** A schema as Ajv takes it: no OpenAPI words, each choice decided before its branches are tried. */
-export type AjvSchema = Record<string, unknown> & { oneOf?: unknown; exactlyOne?: unknown };
+export type AjvSchema = Record<string, unknown> & {
+  oneOf?: unknown;
+  not?: unknown;
+  exactlyOne?: unknown;
+  atMostOne?: unknown;
+};
 
 /** Why no branch of a choice was meant. */
 export type NoBranch =
@@ -36,6 +41,10 @@ export function toAjv(schema: ContractSchema): AjvSchema {
     } else {
       Object.assign(out, choice(schema.oneOf));
     }
+  }
+  if (schema.not?.required) {
+    delete out.not;
+    out.atMostOne = schema.not.required;
   }
   return out;
 }
@@ -100,15 +109,19 @@ function choiceOfObjects(objects: readonly Branch[]): AjvSchema {
   }
   return values.reduceRight<AjvSchema>((after, value) => {
     const group = objects.filter((branch) => kindOf(branch)?.[1] === value);
-    const isKind = { ...has(property ?? ''), properties: { [property ?? '']: { const: value } } };
+    const mayBeLeftOut = group.some(({ full }) => !full.required?.includes(property ?? ''));
+    const guard = { ...has(property ?? ''), properties: { [property ?? '']: { const: value } } };
+    const isKind = mayBeLeftOut ? { type: 'object', properties: guard.properties } : guard;
     return { if: isKind, then: choiceByOwnProperties(group), else: after };
   }, rest);
 }
 
 /** Objects without a kind: the one whose own properties are there, else what they would be. */
 function choiceByShape(branches: readonly Branch[], kind: string | undefined): AjvSchema {
-  const names = [...new Set(branches.flatMap(({ full }) => Object.keys(full.properties ?? {})))];
-  const properties = kind === undefined ? names : [kind, ...identifying(branches)];
+  const properties =
+    kind === undefined
+      ? branches.flatMap((branch) => ownProperties(branch, branches))
+      : [kind, ...identifying(branches)];
   return branches.reduceRight<AjvSchema>(
     (after, branch) => ({
       if: hasAny(ownProperties(branch, branches)),

@@ -185,10 +185,12 @@ export function itemsOf(error: ErrorObject): readonly RefusalItem[] {
     case 'noBranch':
       return badChoice(pointer, data, params.why);
     case 'exactlyOne':
+    case 'atMostOne':
       return badSelection(pointer, params.names, params.given);
     case 'additionalProperties':
       return [unknownField(pointer, params.additionalProperty, parent)];
     case 'required':
+    case 'dependentRequired':
       return [missingField(pointer, params.missingProperty, parent)];
     case 'type':
       return [wrongType(pointer, data, typeWords([params.type].flat()))];

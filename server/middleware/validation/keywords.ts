@@ -38,12 +38,18 @@ const exactlyOne: SchemaValidateFunction = (names: readonly string[], data: obje
   return given.length === 1 || faulty(exactlyOne, 'exactlyOne', { names, given });
 };
 
+const atMostOne: SchemaValidateFunction = (names: readonly string[], data: object) => {
+  const given = names.filter((name) => Object.hasOwn(data, name));
+  return given.length < 2 || faulty(atMostOne, 'atMostOne', { names, given });
+};
+
 const noBranch: SchemaValidateFunction = (why: NoBranch) => faulty(noBranch, 'noBranch', { why });
 
 /** Adds the contract's own keywords: quantities, one field of several, a choice that fits none. */
 export function addKeywords(ajv: Ajv2020): void {
   ajv.addKeyword({ keyword: 'x-quantity', validate: isQuantity, errors: true });
   ajv.addKeyword({ keyword: 'exactlyOne', validate: exactlyOne, type: 'object', errors: true });
+  ajv.addKeyword({ keyword: 'atMostOne', validate: atMostOne, type: 'object', errors: true });
   ajv.addKeyword({ keyword: 'noBranch', validate: noBranch, errors: true });
   ajv.addKeyword({ keyword: 'x-hints', schemaType: 'object' });
 }
