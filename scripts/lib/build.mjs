@@ -1,11 +1,11 @@
 import { createHash } from 'node:crypto';
 import { mkdirSync, readdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
-import { dirname, join } from 'node:path';
+import { basename, dirname, join } from 'node:path';
 import { root } from './home.mjs';
 import { say, Stop } from './say.mjs';
 
 /** What is bundled, and the name it gets in `dist/server`. */
-const ENTRIES = {
+const PROCESSES = {
   main: 'server/main.ts',
   worker: 'server/worker.ts',
   prepare: 'db/prepare-command.ts',
@@ -29,7 +29,7 @@ async function bundle() {
   const { build: esbuild } = await import('esbuild');
   const built = await esbuild({
     absWorkingDir: root,
-    entryPoints: ENTRIES,
+    entryPoints: { ...PROCESSES, ...threads() },
     outdir: output,
     bundle: true,
     platform: 'node',
@@ -52,9 +52,19 @@ async function bundle() {
   }
 }
 
+/** Code of worker threads: each `*-thread.ts` is bundled beside the processes. */
+function threads() {
+  const files = readdirSync(join(root, 'server'), { recursive: true, encoding: 'utf8' });
+  return Object.fromEntries(
+    files
+      .filter((file) => file.endsWith('-thread.ts'))
+      .map((file) => [basename(file, '.ts'), join('server', file)]),
+  );
+}
+
 /** Hash over everything that the bundle is made of. */
 function sourcesHash() {
-  const hash = createHash('sha256').update(JSON.stringify(ENTRIES));
+  const hash = createHash('sha256');
   const folders = ['server', 'db', 'openapi/generated'];
   const files = folders.flatMap((folder) =>
     readdirSync(join(root, folder), { recursive: true, withFileTypes: true })

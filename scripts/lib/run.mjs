@@ -5,9 +5,16 @@ import { spawn } from 'node:child_process';
  * @property {string} [cwd]
  * @property {NodeJS.ProcessEnv} [env]
  * @property {{ uid: number, gid: number }} [as] another user to run as; for root only
- * @property {'pipe' | 'inherit'} [output] `inherit` shows it instead of gathering it
+ * @property {'gather' | 'show' | 'errors'} [output] whether to gather it, show it, or show errors only
  * @typedef {{ code: number, stdout: string, stderr: string }} Ran
  */
+
+/** @type {Record<string, import('node:child_process').StdioOptions>} */
+const OUTPUTS = {
+  gather: ['ignore', 'pipe', 'pipe'],
+  show: ['ignore', 'inherit', 'inherit'],
+  errors: ['ignore', 'ignore', 'inherit'],
+};
 
 /** @type {Set<import('node:child_process').ChildProcess>} */
 const underWay = new Set();
@@ -18,13 +25,13 @@ const underWay = new Set();
  * @returns {Promise<Ran>}
  */
 export function run(program, args, options = {}) {
-  const { cwd, env, as, output = 'pipe' } = options;
+  const { cwd, env, as, output = 'gather' } = options;
   return new Promise((resolve, reject) => {
     const child = spawn(program, args, {
       ...(cwd === undefined ? {} : { cwd }),
       ...(env === undefined ? {} : { env }),
       ...as,
-      stdio: ['ignore', output, output],
+      stdio: OUTPUTS[output],
     });
     underWay.add(child);
     let stdout = '';
