@@ -1,19 +1,27 @@
 import { BandFactor } from './band-factor';
 import type { BeamFrame, LoadVector } from './beam-frame';
 import { BeamState } from './beam-state';
+import { Q0, Q1, STRIDE, THETA, V, W, shearIn } from './piece';
 import {
-  M,
-  Q0,
-  Q1,
-  STRIDE,
-  THETA,
-  V,
-  W,
-  momentArea,
-  momentAreaLever,
-  momentIn,
-  shearIn,
-} from './piece';
+  addEndMoments,
+  deflectRightwards,
+  deflectStartOverhang,
+  marchEndOverhang,
+  marchSimply,
+  marchStartOverhang,
+} from './piece-march';
+
+/** What acts at each acting support, and the spans' end slopes when simply supported (rad). */
+interface SupportActions {
+  /** Just left and just right of the supports, in N and N mm. */
+  readonly shearLeft: Float64Array;
+  readonly shearRight: Float64Array;
+  readonly momentLeft: Float64Array;
+  readonly momentRight: Float64Array;
+  /** Left and right end of each span. */
+  readonly simpleLeft: Float64Array;
+  readonly simpleRight: Float64Array;
+}
 
 /**
  * A beam on a fixed set of acting supports, factorised once and solved for any load.
@@ -57,48 +65,31 @@ export class BeamSystem {
   }
 
   solve(load: LoadVector): BeamState {
-    const { frame, nodes } = this;
-    const state = new BeamState(frame, this.acting);
+    const { frame, nodes, acting } = this;
+    const state = new BeamState(frame, acting);
     const a = state.pieces;
     for (let i = 0; i < frame.pieces; i++) {
       a[i * STRIDE + Q0] = load.intensity[2 * i]!;
       a[i * STRIDE + Q1] = load.intensity[2 * i + 1]!;
     }
-    const count = nodes.length;
-    // Actions just left and just right of each acting support: of the overhangs, then of the spans.
-    const momentLeft = new Float64Array(count);
-    const momentRight = new Float64Array(count);
-    const shearLeft = new Float64Array(count);
-    const shearRight = new Float64Array(count);
-    [shearLeft[0], momentLeft[0]] = this.marchStartOverhang(a, load);
-    [shearRight[count - 1], momentRight[count - 1]] = this.marchEndOverhang(a, load);
-    const simpleSlopes = new Float64Array(2 * (count - 1));
-    for (let k = 0; k + 1 < count; k++) this.marchSimply(a, load, k, simpleSlopes);
-
-    const x = this.rightHandSide(
-      a,
-      load,
-      simpleSlopes,
-      momentLeft,
-      momentRight,
-      shearLeft,
-      shearRight,
-    );
+    const actions = this.unrestrained(a, load);
+    const x = this.rightHandSide(load, actions);
     this.factor.solve(x);
-    this.supportMoments(x, load, simpleSlopes, momentLeft, momentRight);
-    for (let k = 0; k + 1 < count; k++) {
-      this.addEndMoments(a, k, momentRight[k]!, momentLeft[k + 1]!);
-      const first = nodes[k]! * STRIDE;
-      const last = nodes[k + 1]! - 1;
-      shearRight[k] = a[first + V]!;
-      shearLeft[k + 1] = shearIn(a, last * STRIDE, frame.lengths[last]!, frame.lengths[last]!);
-      this.deflect(a, x, k, simpleSlopes);
+    this.findMoments(x, load, actions);
+    for (let k = 0; k + 1 < nodes.length; k++) {
+      const [left, right] = [actions.momentRight[k]!, actions.momentLeft[k + 1]!];
+      addEndMoments(frame, a, this.spanBreaks(k), left, right);
     }
-    for (let k = 0; k < count; k++) {
-      state.reactions[this.acting[k]!] = shearRight[k]! - shearLeft[k]! + load.force[nodes[k]!]!;
+    this.findShears(a, actions);
+    for (let k = 0; k < nodes.length; k++) {
+      const jump = actions.shearRight[k]! - actions.shearLeft[k]!;
+      state.reactions[acting[k]!] = jump + load.force[nodes[k]!]!;
     }
-    this.deflectOverhangs(a, x);
-    this.readSupportDeflections(state, x);
+    const endDeflection = this.deflect(a, x, actions);
+    frame.supportBreaks.forEach((node, s) => {
+      state.supportDeflections[s] = node < frame.pieces ? a[node * STRIDE + W]! : endDeflection;
+    });
+    acting.forEach((s, k) => (state.supportDeflections[s] = this.deflectionOf(x, k)));
     return state;
   }
 
@@ -108,6 +99,11 @@ export class BeamSystem {
 
   private spanLength(k: number): number {
     return this.frame.breaks[this.nodes[k + 1]!]! - this.frame.breaks[this.nodes[k]!]!;
+  }
+
+  /** First and last breakpoint of span k. */
+  private spanBreaks(k: number): [number, number] {
+    return [this.nodes[k]!, this.nodes[k + 1]!];
   }
 
   private deflectionOf(x: Float64Array, k: number): number {
@@ -147,82 +143,44 @@ export class BeamSystem {
     return factor.factorise();
   }
 
-  /** Fills the start overhang from its free end; shear and moment just left of the first support. */
-  private marchStartOverhang(a: Float64Array, load: LoadVector): [number, number] {
-    const end = this.nodes[0]!;
-    let shear = 0;
-    let moment = 0;
-    for (let i = 0; i < end; i++) {
-      const [o, h] = [i * STRIDE, this.frame.lengths[i]!];
-      a[o + V] = shear - load.force[i]!;
-      a[o + M] = moment + load.moment[i]!;
-      shear = shearIn(a, o, h, h);
-      moment = momentIn(a, o, h, h);
+  /** Fills the pieces with the overhangs' shears and moments and those of simply supported spans. */
+  private unrestrained(a: Float64Array, load: LoadVector): SupportActions {
+    const { frame, nodes } = this;
+    const last = nodes.length - 1;
+    const actions: SupportActions = {
+      shearLeft: new Float64Array(nodes.length),
+      shearRight: new Float64Array(nodes.length),
+      momentLeft: new Float64Array(nodes.length),
+      momentRight: new Float64Array(nodes.length),
+      simpleLeft: new Float64Array(last),
+      simpleRight: new Float64Array(last),
+    };
+    const start = marchStartOverhang(frame, a, load, nodes[0]!);
+    actions.shearLeft[0] = start.shear;
+    actions.momentLeft[0] = start.moment;
+    const end = marchEndOverhang(frame, a, load, nodes[last]!);
+    actions.shearRight[last] = end.shear;
+    actions.momentRight[last] = end.moment;
+    for (let k = 0; k < last; k++) {
+      const slopes = marchSimply(frame, a, load, nodes[k]!, nodes[k + 1]!);
+      actions.simpleLeft[k] = slopes.left / this.rigidity;
+      actions.simpleRight[k] = slopes.right / this.rigidity;
     }
-    return [shear, moment];
+    this.findShears(a, actions);
+    return actions;
   }
 
-  /** Fills the end overhang from its free end; shear and moment just right of the last support. */
-  private marchEndOverhang(a: Float64Array, load: LoadVector): [number, number] {
-    const start = this.nodes[this.nodes.length - 1]!;
-    let shear = 0;
-    let moment = 0;
-    for (let i = this.frame.pieces - 1; i >= start; i--) {
-      const [o, h] = [i * STRIDE, this.frame.lengths[i]!];
-      const [q0, q1] = [a[o + Q0]!, a[o + Q1]!];
-      shear += load.force[i + 1]! + ((q0 + q1) * h) / 2;
-      moment += -load.moment[i + 1]! - h * (shear - h * (q0 / 2 + (q1 - q0) / 6));
-      a[o + V] = shear;
-      a[o + M] = moment;
+  /** Reads the shears at the ends of the spans from the pieces. */
+  private findShears(a: Float64Array, { shearLeft, shearRight }: SupportActions): void {
+    for (let k = 0; k + 1 < this.nodes.length; k++) {
+      const [first, last] = this.spanBreaks(k);
+      const h = this.frame.lengths[last - 1]!;
+      shearRight[k] = a[first * STRIDE + V]!;
+      shearLeft[k + 1] = shearIn(a, (last - 1) * STRIDE, h, h);
     }
-    return [shear, moment];
   }
 
-  /** Fills span k as if simply supported, and its end slopes. */
-  private marchSimply(a: Float64Array, load: LoadVector, k: number, slopes: Float64Array): void {
-    const { breaks, lengths } = this.frame;
-    const [first, last] = [this.nodes[k]!, this.nodes[k + 1]!];
-    const [xa, xb] = [breaks[first]!, breaks[last]!];
-    const length = xb - xa;
-    let turning = 0;
-    for (let i = first; i < last; i++) {
-      const [o, h] = [i * STRIDE, lengths[i]!];
-      const [q0, q1] = [a[o + Q0]!, a[o + Q1]!];
-      turning += h * (((q0 + q1) / 2) * (xb - breaks[i]!) - (h * (q0 + 2 * q1)) / 6);
-      if (i > first) turning += load.force[i]! * (xb - breaks[i]!) - load.moment[i]!;
-    }
-    let shear = turning / length;
-    let moment = 0;
-    let area = 0;
-    let areaFromLeft = 0;
-    for (let i = first; i < last; i++) {
-      const [o, h] = [i * STRIDE, lengths[i]!];
-      if (i > first) {
-        shear -= load.force[i]!;
-        moment += load.moment[i]!;
-      }
-      a[o + V] = shear;
-      a[o + M] = moment;
-      const part = momentArea(a, o, h, h);
-      area += part;
-      areaFromLeft += part * (breaks[i + 1]! - xa) - momentAreaLever(a, o, h, h);
-      shear = shearIn(a, o, h, h);
-      moment = momentIn(a, o, h, h);
-    }
-    const scale = length * this.rigidity;
-    slopes[2 * k] = (area * length - areaFromLeft) / scale;
-    slopes[2 * k + 1] = -areaFromLeft / scale;
-  }
-
-  private rightHandSide(
-    a: Float64Array,
-    load: LoadVector,
-    slopes: Float64Array,
-    momentLeft: Float64Array,
-    momentRight: Float64Array,
-    shearLeft: Float64Array,
-    shearRight: Float64Array,
-  ): Float64Array {
+  private rightHandSide(load: LoadVector, actions: SupportActions): Float64Array {
     const { nodes, slopeDof, deflectionDof } = this;
     const x = new Float64Array(this.factor.order);
     const last = nodes.length - 1;
@@ -231,44 +189,35 @@ export class BeamSystem {
     };
     for (let k = 0; k <= last; k++) {
       x[slopeDof[k]!]! += load.moment[nodes[k]!]!;
-      push(k, load.force[nodes[k]!]!);
+      push(k, load.force[nodes[k]!]! + actions.shearRight[k]! - actions.shearLeft[k]!);
     }
-    x[slopeDof[0]!]! += momentLeft[0]!;
-    x[slopeDof[last]!]! -= momentRight[last]!;
-    push(0, -shearLeft[0]!);
-    push(last, shearRight[last]!);
+    x[slopeDof[0]!]! += actions.momentLeft[0]!;
+    x[slopeDof[last]!]! -= actions.momentRight[last]!;
     for (let k = 0; k < last; k++) {
       const length = this.spanLength(k);
-      const [sa, sb] = [slopes[2 * k]!, slopes[2 * k + 1]!];
+      const left = actions.simpleLeft[k]!;
+      const right = actions.simpleRight[k]!;
       const rotation = (2 * this.rigidity) / length;
-      x[slopeDof[k]!]! += rotation * (2 * sa + sb);
-      x[slopeDof[k + 1]!]! += rotation * (sa + 2 * sb);
-      const shift = (3 * rotation * (sa + sb)) / length;
-      const end = nodes[k + 1]! - 1;
-      const h = this.frame.lengths[end]!;
-      push(k, a[nodes[k]! * STRIDE + V]! + shift);
-      push(k + 1, -shearIn(a, end * STRIDE, h, h) - shift);
+      x[slopeDof[k]!]! += rotation * (2 * left + right);
+      x[slopeDof[k + 1]!]! += rotation * (left + 2 * right);
+      const shift = (3 * rotation * (left + right)) / length;
+      push(k, shift);
+      push(k + 1, -shift);
     }
     return x;
   }
 
-  /** Moments on both sides of the inner supports, and across moment loads at the outer ones. */
-  private supportMoments(
-    x: Float64Array,
-    load: LoadVector,
-    slopes: Float64Array,
-    momentLeft: Float64Array,
-    momentRight: Float64Array,
-  ): void {
+  /** Moments on both sides of each support; the outermost follow from the overhangs alone. */
+  private findMoments(x: Float64Array, load: LoadVector, actions: SupportActions): void {
+    const { momentLeft, momentRight } = actions;
     const last = this.nodes.length - 1;
     momentRight[0] = momentLeft[0]! + load.moment[this.nodes[0]!]!;
     momentLeft[last] = momentRight[last]! - load.moment[this.nodes[last]!]!;
     for (let k = 0; k < last; k++) {
-      const length = this.spanLength(k);
-      const chord = (this.deflectionOf(x, k + 1) - this.deflectionOf(x, k)) / length;
-      const left = x[this.slopeDof[k]!]! - chord - slopes[2 * k]!;
-      const right = x[this.slopeDof[k + 1]!]! - chord - slopes[2 * k + 1]!;
-      const rotation = (2 * this.rigidity) / length;
+      const chord = this.chordSlope(x, k);
+      const left = x[this.slopeDof[k]!]! - chord - actions.simpleLeft[k]!;
+      const right = x[this.slopeDof[k + 1]!]! - chord - actions.simpleRight[k]!;
+      const rotation = (2 * this.rigidity) / this.spanLength(k);
       // Both neighbours of an inner support give its moment; their mean keeps mirrored beams mirrored.
       if (k > 0) {
         const jump = load.moment[this.nodes[k]!]!;
@@ -279,77 +228,27 @@ export class BeamSystem {
     }
   }
 
-  private addEndMoments(a: Float64Array, k: number, left: number, right: number): void {
-    const { breaks } = this.frame;
-    const first = this.nodes[k]!;
-    const slope = (right - left) / this.spanLength(k);
-    for (let i = first; i < this.nodes[k + 1]!; i++) {
-      a[i * STRIDE + V]! += slope;
-      a[i * STRIDE + M]! += left + slope * (breaks[i]! - breaks[first]!);
-    }
+  private chordSlope(x: Float64Array, k: number): number {
+    return (this.deflectionOf(x, k + 1) - this.deflectionOf(x, k)) / this.spanLength(k);
   }
 
-  /** Slopes and deflections of span k. The end slopes follow from the moments, so the span closes. */
-  private deflect(a: Float64Array, x: Float64Array, k: number, slopes: Float64Array): void {
-    const { lengths } = this.frame;
-    const [first, last] = [this.nodes[k]!, this.nodes[k + 1]!];
-    const length = this.spanLength(k);
-    const start = this.deflectionOf(x, k);
-    const left = a[first * STRIDE + M]!;
-    const h = lengths[last - 1]!;
-    const right = momentIn(a, (last - 1) * STRIDE, h, h);
-    const chord = (this.deflectionOf(x, k + 1) - start) / length;
-    const bend = length / (6 * this.rigidity);
-    let slope = slopes[2 * k]! + chord + bend * (2 * left + right);
-    let deflection = start;
-    for (let i = first; i < last; i++) {
-      const o = i * STRIDE;
-      a[o + THETA] = slope;
-      a[o + W] = deflection;
-      deflection +=
-        slope * lengths[i]! - momentAreaLever(a, o, lengths[i]!, lengths[i]!) / this.rigidity;
-      slope -= momentArea(a, o, lengths[i]!, lengths[i]!) / this.rigidity;
+  /**
+   * Slopes and deflections everywhere. Each span starts with the slope that its end moments give,
+   * so that it closes on its far support. Returns the deflection at the member's right end.
+   */
+  private deflect(a: Float64Array, x: Float64Array, actions: SupportActions): number {
+    const { frame, nodes } = this;
+    const last = nodes.length - 1;
+    let slope = 0;
+    for (let k = 0; k < last; k++) {
+      const [left, right] = [actions.momentRight[k]!, actions.momentLeft[k + 1]!];
+      const bent = (this.spanLength(k) * (2 * left + right)) / (6 * this.rigidity);
+      const start = actions.simpleLeft[k]! + this.chordSlope(x, k) + bent;
+      ({ slope } = deflectRightwards(frame, a, this.spanBreaks(k), start, this.deflectionOf(x, k)));
     }
-    if (k + 2 === this.nodes.length) {
-      x[this.slopeDof[k + 1]!] = slopes[2 * k + 1]! + chord - bend * (left + 2 * right);
-    }
-    if (k === 0) x[this.slopeDof[0]!] = a[first * STRIDE + THETA]!;
-  }
-
-  private deflectOverhangs(a: Float64Array, x: Float64Array): void {
-    const { lengths, pieces } = this.frame;
-    const last = this.nodes.length - 1;
-    let slope = x[this.slopeDof[0]!]!;
-    let deflection = this.deflectionOf(x, 0);
-    for (let i = this.nodes[0]! - 1; i >= 0; i--) {
-      const [o, h] = [i * STRIDE, lengths[i]!];
-      slope += momentArea(a, o, h, h) / this.rigidity;
-      deflection += momentAreaLever(a, o, h, h) / this.rigidity - slope * h;
-      a[o + THETA] = slope;
-      a[o + W] = deflection;
-    }
-    slope = x[this.slopeDof[last]!]!;
-    deflection = this.deflectionOf(x, last);
-    for (let i = this.nodes[last]!; i < pieces; i++) {
-      const [o, h] = [i * STRIDE, lengths[i]!];
-      a[o + THETA] = slope;
-      a[o + W] = deflection;
-      deflection += slope * h - momentAreaLever(a, o, h, h) / this.rigidity;
-      slope -= momentArea(a, o, h, h) / this.rigidity;
-    }
-  }
-
-  private readSupportDeflections(state: BeamState, x: Float64Array): void {
-    const { supportBreaks, lengths, pieces } = this.frame;
-    const a = state.pieces;
-    supportBreaks.forEach((node, s) => {
-      if (node < pieces) state.supportDeflections[s] = a[node * STRIDE + W]!;
-      else {
-        const [o, h] = [(pieces - 1) * STRIDE, lengths[pieces - 1]!];
-        state.supportDeflections[s] =
-          a[o + W]! + a[o + THETA]! * h - momentAreaLever(a, o, h, h) / this.rigidity;
-      }
-    });
-    this.acting.forEach((s, k) => (state.supportDeflections[s] = this.deflectionOf(x, k)));
+    const first = nodes[0]!;
+    deflectStartOverhang(frame, a, first, a[first * STRIDE + THETA]!, this.deflectionOf(x, 0));
+    const overhang: [number, number] = [nodes[last]!, frame.pieces];
+    return deflectRightwards(frame, a, overhang, slope, this.deflectionOf(x, last)).deflection;
   }
 }
