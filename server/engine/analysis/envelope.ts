@@ -3,7 +3,8 @@ import type { BeamFrame } from './beam-frame';
 import type { BeamState } from './beam-state';
 import { type DeflectionOptions, deflectionExtremes, relativeDeflections } from './deflection';
 import { momentExtremes, shearExtremes } from './extremes';
-import { type Side, valuesAt } from './values-at';
+import { STRIDE, momentIn, shearIn } from './piece';
+import type { Side } from './values-at';
 
 /** Least and greatest value over the states at one place of a diagram. */
 export interface EnvelopePoint {
@@ -24,6 +25,14 @@ export interface EnvelopeDiagrams {
   readonly deflection: EnvelopePoint[];
 }
 
+/** A point of a diagram at `s` mm into a piece that is `h` mm long. */
+interface Station {
+  readonly point: EnvelopePoint;
+  readonly piece: number;
+  readonly h: number;
+  readonly s: number;
+}
+
 /** Interior stations of every span and overhang beside the breakpoints. */
 const INTERIOR = 20;
 
@@ -36,45 +45,55 @@ export function envelope(
   states: readonly BeamState[],
   options: DeflectionOptions = {},
 ): EnvelopeDiagrams {
-  const first = states[0];
-  if (!first) return { moment: [], shear: [], deflection: [] };
-  const { frame } = first;
-  const diagrams: EnvelopeDiagrams = {
-    moment: stations(
-      frame,
-      extremePlaces(frame, states, (state, panel) => momentExtremes(state, panel)),
-    ),
-    shear: stations(
-      frame,
-      extremePlaces(frame, states, (state, panel) => shearExtremes(state, panel)),
-    ),
-    deflection: stations(frame, deflectionPlaces(states, options)),
-  };
-  for (const state of states) accumulate(diagrams, state, options);
-  return diagrams;
+  return { ...forceEnvelope(states), deflection: deflectionEnvelope(states, options) };
 }
 
-function accumulate(
-  diagrams: EnvelopeDiagrams,
-  state: BeamState,
-  options: DeflectionOptions,
-): void {
-  for (const point of diagrams.moment) widen(point, valuesAt(state, point.x, point.side).M);
-  for (const point of diagrams.shear) widen(point, valuesAt(state, point.x, point.side).V);
-  const points = diagrams.deflection;
-  let next = 0;
-  for (const bay of bays(state)) {
-    const start = next;
-    while (next < points.length && isIn(bay, points[next]!)) next++;
-    const inBay = points.slice(start, next);
-    const values = relativeDeflections(
-      state,
-      bay,
-      inBay.map(({ x }) => x),
-      options,
-    );
-    inBay.forEach((point, i) => widen(point, values[i]!));
+/** Moment and shear of {@link envelope} alone: deflections cost most. */
+export function forceEnvelope(
+  states: readonly BeamState[],
+): Pick<EnvelopeDiagrams, 'moment' | 'shear'> {
+  return {
+    moment: ofForce(states, momentExtremes, momentIn),
+    shear: ofForce(states, shearExtremes, shearIn),
+  };
+}
+
+/** Deflection of {@link envelope} alone. */
+export function deflectionEnvelope(
+  states: readonly BeamState[],
+  options: DeflectionOptions = {},
+): EnvelopePoint[] {
+  const frame = states[0]?.frame;
+  if (!frame) return [];
+  const points = stations(frame, deflectionPlaces(states, options)).map(({ point }) => point);
+  for (const state of states) {
+    let next = 0;
+    for (const bay of bays(state)) {
+      const start = next;
+      while (next < points.length && isIn(bay, points[next]!)) next++;
+      const inBay = points.slice(start, next);
+      const positions = inBay.map(({ x }) => x);
+      const values = relativeDeflections(state, bay, positions, options);
+      inBay.forEach((point, i) => widen(point, values[i]!));
+    }
   }
+  return points;
+}
+
+function ofForce(
+  states: readonly BeamState[],
+  extremes: typeof momentExtremes,
+  evaluate: typeof momentIn,
+): EnvelopePoint[] {
+  const frame = states[0]?.frame;
+  if (!frame) return [];
+  const list = stations(frame, extremePlaces(frame, states, extremes));
+  for (const { pieces } of states) {
+    for (const { point, piece, h, s } of list) {
+      widen(point, evaluate(pieces, piece * STRIDE, h, s));
+    }
+  }
+  return list.map(({ point }) => point);
 }
 
 function isIn(bay: Bay, { x, side }: EnvelopePoint): boolean {
@@ -87,14 +106,17 @@ function widen(point: EnvelopePoint, value: number): void {
 }
 
 /** Both sides of the breakpoints, interior points of the panels and the given places, in order. */
-function stations(frame: BeamFrame, places: readonly number[]): EnvelopePoint[] {
+function stations(frame: BeamFrame, places: readonly number[]): Station[] {
   const inside = [...places];
   for (const { from, to } of frame.panels) {
     for (let i = 1; i <= INTERIOR; i++) inside.push(from + ((to - from) * i) / (INTERIOR + 1));
   }
-  const points: EnvelopePoint[] = [];
-  const add = (piece: number, x: number, side: Side) =>
-    points.push({ span: frame.pieceSpans[piece]!, x, side, min: Infinity, max: -Infinity });
+  const list: Station[] = [];
+  const add = (piece: number, x: number, side: Side) => {
+    const h = frame.lengths[piece]!;
+    const point = { span: frame.pieceSpans[piece]!, x, side, min: Infinity, max: -Infinity };
+    list.push({ point, piece, h, s: Math.min(x - frame.breaks[piece]!, h) });
+  };
   const sorted = [...new Set(inside)].sort((a, b) => a - b);
   let next = 0;
   for (let piece = 0; piece < frame.pieces; piece++) {
@@ -107,7 +129,7 @@ function stations(frame: BeamFrame, places: readonly number[]): EnvelopePoint[] 
     while (next < sorted.length && sorted[next]! <= to + near) next++;
     add(piece, to, 'left');
   }
-  return points;
+  return list;
 }
 
 function extremePlaces(
