@@ -28,7 +28,7 @@ import { headers, plainPath } from './middleware/headers';
 import { mount } from './middleware/mount';
 import { limits, rateLimit, type Limits } from './middleware/rate-limit';
 import { rateCounts } from './middleware/rate-store';
-import { requestId } from './middleware/request-id';
+import { requestId, underVersion } from './middleware/request-id';
 import { assertRoutes, type Route } from './middleware/route';
 
 /** All that the application stands on; tests hand in what they want to see. */
@@ -88,7 +88,7 @@ export function createApp(deps: AppDeps, routes: readonly Route[] = routeTable(d
   app.set('strict routing', true);
   app.use(requestId, plainPath, headers);
   app.use('/docs', docs());
-  app.use('/v1', cors(keys), bearer(keys));
+  app.use('/v1', underVersion, cors(keys), bearer(keys));
   mount(app, routes, { send, rate });
   app.use(fail);
   return app;

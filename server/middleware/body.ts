@@ -11,13 +11,19 @@ const notJson = (detail: string, cause?: unknown): Problem =>
 const refuseType = (): Problem =>
   new Problem('media-type', 'Send the body as application/json in UTF-8.');
 
+/** JSON between systems is UTF-8 (RFC 8259); the parser would take any of its relatives. */
+const isUtf8 = (contentType = ''): boolean => {
+  const charset = /;\s*charset\s*=\s*"?([^\s";]*)/i.exec(contentType)?.[1];
+  return charset === undefined || charset.toLowerCase() === 'utf-8';
+};
+
 /** Reads a JSON body, after the key was held good: nobody else makes us read a megabyte. */
 const read: RequestHandler = (request, response, next) => {
   const { headers } = request;
   const length = headers['content-length'];
   if (headers['transfer-encoding'] === undefined && (length === undefined || length === '0'))
     throw notJson('There is no body.');
-  if (!request.is(['json', '+json'])) throw refuseType();
+  if (!request.is(['json', '+json']) || !isUtf8(headers['content-type'])) throw refuseType();
   parse(request, response, next);
 };
 

@@ -1,5 +1,11 @@
 import type { RequestHandler } from 'express';
-import { Call } from './call';
+import { Call, callOf } from './call';
+
+/** Under /v1 every refusal has its row in the log, whatever route it fails to find. */
+export const underVersion: RequestHandler = (_request, response, next) => {
+  callOf(response).logged = 'refused';
+  next();
+};
 
 /** Begins the call: every answer carries our id of it. */
 export const requestId: RequestHandler = (request, response, next) => {
