@@ -41,7 +41,7 @@ export function formula<Symbols extends string>(
     ...definition,
     id: `${definition.symbol}-${contentHash(definition)}`,
     tree,
-    compute: compileNode(tree) as Formula<Symbols>['compute'],
+    compute: compileNode(tree),
   };
   register(made);
   return made;

@@ -38,7 +38,7 @@ export function literalQuantity(node: MathNode): number | undefined {
     const [number, unit] = node.args as [MathNode, MathNode];
     const scale = unitPower(unit);
     if (scale === undefined) return undefined;
-    if (isConstantNode(number)) return Number(number.value) * scale;
+    if (isConstantNode(number)) return number.value * scale;
     const base = literalQuantity(number);
     return base === undefined ? undefined : base * scale;
   }
@@ -59,7 +59,7 @@ function unitPower(node: MathNode): number | undefined {
     const [unit, power] = node.args as [MathNode, MathNode];
     const scale = unitPower(unit);
     if (scale === undefined || !isConstantNode(power)) return undefined;
-    return scale ** Number(power.value);
+    return scale ** power.value;
   }
   return undefined;
 }

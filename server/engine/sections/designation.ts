@@ -30,9 +30,9 @@ export function nearest(text: string, candidates: readonly string[], count: numb
 
 export function editDistance(a: string, b: string): number {
   let previous = Array.from({ length: b.length + 1 }, (_, index) => index);
-  for (const [i, left] of [...a].entries()) {
+  for (const [i, left] of Array.from(a).entries()) {
     const current = [i + 1];
-    for (const [j, right] of [...b].entries()) {
+    for (const [j, right] of Array.from(b).entries()) {
       const substitution = (previous[j] ?? 0) + (left === right ? 0 : 1);
       current.push(Math.min(substitution, (previous[j + 1] ?? 0) + 1, (current[j] ?? 0) + 1));
     }

@@ -6,9 +6,7 @@ import { propertiesOf } from './properties';
 
 const folder = join(__dirname, '../../../test/published/sections');
 
-interface TableRow {
-  readonly [column: string]: string;
-}
+type TableRow = Readonly<Record<string, string>>;
 
 function readTable(name: string): TableRow[] {
   const [header = '', ...lines] = readFileSync(join(folder, `${name}.csv`), 'utf8')

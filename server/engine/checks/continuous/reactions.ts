@@ -43,7 +43,7 @@ function rangeOf(solved: readonly SolvedCase[], support: number): Range | null {
   for (const { id, state } of solved) {
     const reaction = state?.reactions[support];
     if (reaction === undefined) continue;
-    if (!range) range = { min: reaction, max: reaction, combination: id };
+    range ??= { min: reaction, max: reaction, combination: id };
     if (reaction < range.min) range.min = reaction;
     if (reaction > range.max) {
       range.max = reaction;

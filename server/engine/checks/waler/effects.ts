@@ -18,7 +18,7 @@ export interface Effects {
 }
 
 /** Places inside a piece that are looked at beside its ends: shear and moment may govern together. */
-const INSIDE = 12;
+const INSIDE = 8;
 
 /**
  * Every place of every strength combination where a cross-section may govern: supports, jumps,
@@ -56,10 +56,9 @@ function* placesOf(state: BeamState, weight: OwnWeight) {
     const from = frame.breaks[piece] ?? 0;
     for (let i = 1; i < INSIDE; i += 1) inside.push(from + (length * i) / INSIDE);
   });
+  // Where something jumps both sides were seen above.
   for (const x of inside) {
-    for (const side of ['left', 'right'] as const) {
-      const { M, V } = valuesAt(state, x, side);
-      yield { span: frame.pieceSpans[frame.pieceAt(x, side)] ?? 0, x, M, V };
-    }
+    const { M, V } = valuesAt(state, x);
+    yield { span: frame.pieceSpans[frame.pieceAt(x)] ?? 0, x, M, V };
   }
 }

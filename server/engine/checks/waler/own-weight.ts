@@ -59,14 +59,22 @@ function betweenProps(layout: SupportLayout, section: SteelISection): OwnWeight 
   const rigid = layout.supportStiffness.map(() => null);
   const geometry = { ...layout, flexuralRigidity: E * properties.I_z, supportStiffness: rigid };
   const state = new ContinuousBeam(geometry, [load]).solve([load]);
-  return { at: (x) => effectAt(state, x), places: sectionPoints(state).map((point) => point.x) };
+  // The same places come again with every combination.
+  const known = new Map<number, SideEffect>();
+  const at = (x: number): SideEffect => {
+    const effect = known.get(x) ?? effectAt(state, x);
+    known.set(x, effect);
+    return effect;
+  };
+  return { at, places: [...new Set(sectionPoints(state).map((point) => point.x))] };
 }
 
 /** The greater of both sides, where the reaction makes the shear jump. */
 function effectAt(state: BeamState, x: number): SideEffect {
-  const sides = [valuesAt(state, x, 'left'), valuesAt(state, x, 'right')];
+  const left = valuesAt(state, x, 'left');
+  const right = valuesAt(state, x, 'right');
   return {
-    M_z: Math.max(...sides.map(({ M }) => Math.abs(M))),
-    V_y: Math.max(...sides.map(({ V }) => Math.abs(V))),
+    M_z: Math.max(Math.abs(left.M), Math.abs(right.M)),
+    V_y: Math.max(Math.abs(left.V), Math.abs(right.V)),
   };
 }

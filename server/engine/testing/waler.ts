@@ -1,0 +1,38 @@
+import type { CheckAnswer, WalerRequest } from '../checks/contract';
+import { waler } from '../checks/waler/waler';
+import { publishedRevision } from './profiles';
+
+/** A waler that passes: north face, three spans, both flanges held all along. */
+export const northFace: WalerRequest = {
+  material: { type: 'steel', grade: 'S275' },
+  section: 'UB 457x191x67',
+  loadBasis: 'characteristic',
+  spans: [3, 3, 2.4],
+  loads: [
+    { name: 'earth', nature: 'permanent', kind: 'uniform', value: 95 },
+    { name: 'surcharge', nature: 'variable', category: 'surcharge', kind: 'uniform', value: 22 },
+  ],
+  restraint: 'full',
+  deflectionLimit: 'span/200',
+  waive: [{ verification: 'transverse-force', reason: 'web stiffened at every prop' }],
+};
+
+export function runWaler(
+  change: Partial<WalerRequest> = {},
+  profile = 'en-recommended',
+  detail: 'full' | 'summary' = 'full',
+): CheckAnswer {
+  return waler.run({ ...northFace, ...change }, { profile: publishedRevision(profile), detail });
+}
+
+/** The verification of an answer by its id. */
+export function verification(answer: CheckAnswer, id: string) {
+  const found = answer.verifications.find((one) => one.id === id);
+  if (!found) throw new Error(`${id} was not verified`);
+  return found;
+}
+
+/** One permanent uniform load in kN/m. */
+export function uniform(value: number): WalerRequest['loads'] {
+  return [{ name: 'earth', nature: 'permanent', kind: 'uniform', value }];
+}
