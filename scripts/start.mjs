@@ -16,11 +16,14 @@ import { startService, waitUntilReady } from './lib/service.mjs';
 import { welcome } from './lib/welcome.mjs';
 
 const ending = makeEnding();
+/** What is told to be full or shut when a failure does not say. */
+let home = root;
 
 /** Starts everything; resolves with what keeps running. */
 async function launch() {
   const place = readPlace(process.env);
-  const { home, url } = place;
+  const { url } = place;
+  home = place.home;
   makeHome(home);
   const claim = await claimHome(home, url);
   ending.add(claim.forget);
@@ -58,7 +61,7 @@ async function launch() {
 }
 
 /** @param {ReturnType<typeof readPlace>} place */
-async function openDatabase({ home, ownDatabase }) {
+async function openDatabase({ ownDatabase }) {
   if (!ownDatabase) return startDatabase({ home, database: 'headtree', ending });
   say('using the database of HEADTREE_DATABASE_URL');
   return { urls: ownDatabase, settings: undefined, cluster: undefined };
@@ -90,7 +93,7 @@ async function main() {
     if (!ending.begun()) throw new Stop(over);
   } catch (error) {
     if (ending.begun()) return;
-    process.stderr.write(`\n${(explain(error, root) ?? new Stop(textOf(error))).message}\n`);
+    process.stderr.write(`\n${(explain(error, home) ?? new Stop(textOf(error))).message}\n`);
     stopRunning();
     await ending.end();
     process.exit(1);

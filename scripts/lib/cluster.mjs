@@ -74,7 +74,6 @@ export async function makeCluster({ binaries, folder, as, superuserPassword }) {
  * @returns {Promise<Cluster>}
  */
 export async function startCluster(options) {
-  await endLeftover(options.folder);
   for (let attempt = 1; ; attempt++) {
     const cluster = launch(options);
     const failure = await Promise.race([cluster.ended, ready(options.folder, cluster.mark.pid)]);
@@ -108,7 +107,7 @@ function launch({ binaries, folder, as, port, log, throwAway = false }) {
   /** @type {Promise<string>} */
   const ended = new Promise((resolve) => {
     child.once('error', (error) => resolve(error.message));
-    child.once('exit', () => resolve(lastWords(log)));
+    child.once('exit', (_, signal) => resolve(signal ? `by ${signal}` : lastWords(log)));
   });
   const mark = { pid: child.pid ?? 0, started: markOf(child.pid ?? 0)?.started ?? '' };
   return {

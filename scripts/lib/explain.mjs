@@ -6,7 +6,7 @@ import { Stop } from './say.mjs';
  */
 const KNOWN = [
   [
-    /ENOSPC|No space left on device|Disk quota exceeded/i,
+    /ENOSPC|No space left on device|Disk quota exceeded|wrote only \d+ of \d+ bytes/i,
     (place) =>
       `The disk that holds ${place} is full. Free some space, or choose another folder: ` +
       'HEADTREE_HOME=/some/where npm start',
@@ -38,8 +38,7 @@ export function explain(error, place) {
 
 /** @param {unknown} error */
 export function textOf(error) {
-  if (!(error instanceof Error)) return String(error);
-  return 'code' in error ? `${String(error.code)} ${error.message}` : error.message;
+  return error instanceof Error ? error.message : String(error);
 }
 
 /** @param {unknown} error */

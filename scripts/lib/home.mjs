@@ -1,4 +1,12 @@
-import { chmodSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
+import {
+  accessSync,
+  chmodSync,
+  constants,
+  mkdirSync,
+  readFileSync,
+  renameSync,
+  writeFileSync,
+} from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { Stop } from './say.mjs';
@@ -25,9 +33,18 @@ export const isRoot = process.getuid?.() === 0;
  * @param {string} home
  */
 export function makeHome(home) {
-  mkdirSync(home, { recursive: true });
-  chmodSync(home, isRoot ? 0o711 : 0o700);
-  mkdirSync(join(home, 'logs'), { recursive: true, mode: 0o700 });
+  try {
+    mkdirSync(home, { recursive: true });
+    chmodSync(home, isRoot ? 0o711 : 0o700);
+    mkdirSync(join(home, 'logs'), { recursive: true, mode: 0o700 });
+    accessSync(home, constants.W_OK);
+  } catch (error) {
+    const reason = error instanceof Error && 'code' in error ? String(error.code) : 'unknown';
+    throw new Stop(
+      `The private folder ${home} cannot be used (${reason}). Make it this user's own, or choose ` +
+        'another: HEADTREE_HOME=/some/where npm start',
+    );
+  }
 }
 
 /** @param {string} home @param {() => Settings} fresh @returns {Settings} */

@@ -6,11 +6,23 @@ import { say, Stop } from './say.mjs';
 
 /** @typedef {Record<string, { version?: string, integrity?: string, optional?: boolean, link?: boolean }>} Locked */
 
+/** Versions of Node older than this lack what the service uses. */
+const OLDEST_NODE = [20, 19];
+
+/** Stops when this Node is too old. */
+export function requireNode(version = process.versions.node) {
+  const [major = 0, minor = 0] = version.split('.').map(Number);
+  const [oldestMajor = 0, oldestMinor = 0] = OLDEST_NODE;
+  if (major > oldestMajor || (major === oldestMajor && minor >= oldestMinor)) return;
+  throw new Stop(`This is Node ${version}; Headtree needs ${OLDEST_NODE.join('.')} or newer.`);
+}
+
 /**
  * Installs what `package-lock.json` names, when that is not what is installed.
  * @param {string} root @param {string} log file that keeps npm's output
  */
 export async function ensurePackages(root, log) {
+  requireNode();
   const stale = stalePackages(root);
   if (stale === undefined) return say('packages are installed');
   say(`installing packages, about a minute (${stale})`);

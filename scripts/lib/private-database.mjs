@@ -2,7 +2,7 @@ import { randomBytes } from 'node:crypto';
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { chooseClusterFolder, clusterMajor } from './cluster-folder.mjs';
-import { makeCluster, startCluster } from './cluster.mjs';
+import { endLeftover, makeCluster, startCluster } from './cluster.mjs';
 import { makeDatabase, urlsOf } from './database.mjs';
 import { readSettings, writeSettings } from './home.mjs';
 import { freePort } from './port.mjs';
@@ -23,6 +23,8 @@ export async function startDatabase({ home, database, ending, throwAway = false 
   const as = await postgresUser();
   const folder = await chooseClusterFolder(home, remembered.databaseFolder, as);
   const { folder: binaries } = await ensurePostgres(clusterMajor(folder));
+  // First, for it may hold the very port that is remembered.
+  await endLeftover(folder);
   const settings = {
     ...remembered,
     databasePort: await freePort(remembered.databasePort),

@@ -35,7 +35,7 @@ export function startService({ name, script, env, log }) {
   /** @type {Promise<string>} */
   const ended = new Promise((resolve) => {
     child.once('error', (error) => resolve(error.message));
-    child.once('exit', () => resolve(lastWords(log)));
+    child.once('exit', (_, signal) => resolve(signal ? `by ${signal}` : lastWords(log)));
   });
   const mark = { pid: child.pid ?? 0, started: markOf(child.pid ?? 0)?.started ?? '' };
   return {
