@@ -1,4 +1,4 @@
-import type { CheckAnswer, WalerRequest } from '../checks/contract';
+import type { CheckAnswer, LoadInput, WalerRequest } from '../checks/contract';
 import { waler } from '../checks/waler/waler';
 import { publishedRevision } from './profiles';
 
@@ -22,7 +22,10 @@ export function runWaler(
   profile = 'en-recommended',
   detail: 'full' | 'summary' = 'full',
 ): CheckAnswer {
-  return waler.run({ ...northFace, ...change }, { profile: publishedRevision(profile), detail });
+  // Load sets come in place of loads.
+  const { loads, ...rest } = northFace;
+  const base = change.loadSets || !loads ? rest : { ...rest, loads };
+  return waler.run({ ...base, ...change }, { profile: publishedRevision(profile), detail });
 }
 
 /** The verification of an answer by its id. */
@@ -33,6 +36,6 @@ export function verification(answer: CheckAnswer, id: string) {
 }
 
 /** One permanent uniform load in kN/m. */
-export function uniform(value: number): WalerRequest['loads'] {
+export function uniform(value: number): LoadInput[] {
   return [{ name: 'earth', nature: 'permanent', kind: 'uniform', value }];
 }
