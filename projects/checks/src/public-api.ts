@@ -1,0 +1,2 @@
+/** What the library gives to the elements and the console; a change here is on purpose. */
+export {};
