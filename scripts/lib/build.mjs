@@ -26,22 +26,25 @@ export async function build() {
 }
 
 async function bundle() {
-  const { build: esbuild } = await import('esbuild');
-  const built = await esbuild({
-    absWorkingDir: root,
-    entryPoints: { ...PROCESSES, ...threads() },
-    outdir: output,
-    bundle: true,
-    platform: 'node',
-    target: 'node20',
-    format: 'cjs',
-    packages: 'external',
-    sourcemap: true,
-    write: false,
-    logLevel: 'silent',
-  }).catch((error) => {
-    throw new Stop(`The server cannot be built: ${firstProblem(error)}`);
-  });
+  const esbuild = await import('esbuild');
+  const built = await esbuild
+    .build({
+      absWorkingDir: root,
+      entryPoints: { ...PROCESSES, ...threads() },
+      outdir: output,
+      bundle: true,
+      platform: 'node',
+      target: 'node20',
+      format: 'cjs',
+      packages: 'external',
+      sourcemap: true,
+      write: false,
+      logLevel: 'silent',
+    })
+    .catch((error) => {
+      throw new Stop(`The server cannot be built: ${firstProblem(error)}`);
+    });
+  await esbuild.stop();
   mkdirSync(output, { recursive: true });
   rmSync(stamp, { force: true });
   for (const { path, contents } of built.outputFiles) {
