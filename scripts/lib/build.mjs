@@ -8,6 +8,7 @@ import { say, Stop } from './say.mjs';
 const PROCESSES = {
   main: 'server/main.ts',
   worker: 'server/worker.ts',
+  'check-thread': 'server/features/checks/check-thread.ts',
   prepare: 'db/prepare-command.ts',
 };
 export const output = join(root, 'dist/server');

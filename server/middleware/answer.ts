@@ -80,14 +80,19 @@ export function answers({ usage, logger, onKeyUse }: AnswerDeps): {
       const answer = problemAnswer(problem, request, call.id);
       await sendCoded(request, response, answer, problem.code);
     } catch (error) {
-      sendUnlogged(request, response, error);
+      sendUnlogged(request, response, error, problem);
     }
   };
 
-  /** Nothing but this 503 ever goes out without its row. */
-  const sendUnlogged = (request: Request, response: Response, error: unknown): void => {
+  /** Nothing but a 503 ever goes out without its row. */
+  const sendUnlogged = (
+    request: Request,
+    response: Response,
+    error: unknown,
+    first?: Problem,
+  ): void => {
     const call = callOf(response);
-    const problem = awayProblem('log-unavailable');
+    const problem = first?.status === 503 ? first : awayProblem('log-unavailable');
     logger.error({ requestId: call.id, code: problem.code, cause: messageOf(error) });
     if (response.headersSent) return void response.destroy();
     const answer = problemAnswer(problem, request, call.id);

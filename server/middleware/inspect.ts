@@ -9,14 +9,15 @@ const control = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f]/;
 
 function textFault(text: string): Pick<RefusalItem, 'code' | 'message'> | undefined {
   if (!isWellFormed(text))
-    return { code: 'text', message: 'Holds half of a surrogate pair, which is no character.' };
-  if (control.test(text)) return { code: 'text', message: 'Holds a control character.' };
+    return { code: 'not-text', message: 'Holds half of a surrogate pair, which is no character.' };
+  if (control.test(text))
+    return { code: 'control-character', message: 'Holds a control character.' };
   return undefined;
 }
 
 /**
  * What no schema has to think of: numbers too large for a double (JSON's 1e999 reads as infinity),
- * text that is no text, names that reach for a prototype, nesting without end.
+ * text that is no text, nesting without end.
  */
 export function inspect(body: unknown): RefusalItem[] {
   const items: RefusalItem[] = [];
@@ -27,13 +28,17 @@ export function inspect(body: unknown): RefusalItem[] {
     if (items.length >= maxItems) return;
     if (typeof value === 'number') {
       if (!Number.isFinite(value))
-        items.push({ pointer, code: 'number', message: 'Too large for a number.' });
+        items.push({ pointer, code: 'not-finite', message: 'The number is too large.' });
     } else if (typeof value === 'string') {
       const fault = textFault(value);
       if (fault) items.push({ pointer, ...fault });
     } else if (typeof value === 'object' && value !== null) {
       if (depth >= maxDepth) {
-        items.push({ pointer, code: 'depth', message: `Nested deeper than ${maxDepth} levels.` });
+        items.push({
+          pointer,
+          code: 'too-deep',
+          message: `Nested deeper than ${maxDepth} levels.`,
+        });
       } else if (Array.isArray(value)) {
         value.forEach((item, index) => look(item, `${pointer}/${index}`, depth + 1));
       } else {
@@ -44,10 +49,7 @@ export function inspect(body: unknown): RefusalItem[] {
 
   function lookAt(name: string, item: unknown, above: string, depth: number): void {
     const pointer = `${above}/${pointerPart(name)}`;
-    const fault =
-      name === '__proto__' || name === 'constructor'
-        ? { code: 'unknown-field', message: `There is no field "${name}".` }
-        : textFault(name);
+    const fault = textFault(name);
     if (fault) items.push({ pointer, ...fault });
     else look(item, pointer, depth + 1);
   }

@@ -136,6 +136,18 @@ export const problemKinds = {
     'The profile has no approved revision in effect today: they are drafts, withdrawn, expired or begin later.',
     'Pin a revision as slug@number: the answer is then provisional. Or ask for one to be approved.',
   ),
+  'profile-value-missing': kind(
+    422,
+    'The profile lacks a value',
+    'The check needs a value that the factor profile does not hold. None is ever assumed.',
+    'Use a profile that holds it, or have a revision drafted that does.',
+  ),
+  'profile-value-unusable': kind(
+    422,
+    'A value of the profile cannot be used',
+    'The factor profile holds a value that is not of the kind that the check needs.',
+    'Have a revision drafted that puts it right; the detail names the value.',
+  ),
   'rate-limited': kind(
     429,
     'Too many requests',

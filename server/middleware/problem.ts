@@ -41,11 +41,18 @@ export const awayProblem = (
     cause,
   });
 
-/** A refusal of the engine keeps its own code where that has a page. */
-export function problemOfRefusal({ code, detail, items }: Refusal): Problem {
-  const known = isProblemCode(code) && problemKinds[code].status === 422;
-  return new Problem(known ? code : 'outside-scope', detail, { errors: items });
+/**
+ * A refusal of the engine keeps its own code where that has a page. Otherwise the clause tells:
+ * what a clause leaves out lies outside the check, the rest is for the caller to mend.
+ */
+function codeOfRefusal({ code, items }: Refusal): ProblemCode {
+  if (isProblemCode(code) && problemKinds[code].status === 422) return code;
+  const mendable = items.length > 0 && items.every(({ clause }) => clause === undefined);
+  return mendable ? 'not-valid' : 'outside-scope';
 }
+
+const problemOfRefusal = (refusal: Refusal): Problem =>
+  new Problem(codeOfRefusal(refusal), refusal.detail, { errors: refusal.items });
 
 /** What went wrong, as a problem. Whatever is not expected says nothing of its inside. */
 export function toProblem(error: unknown): Problem {

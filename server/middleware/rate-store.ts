@@ -1,6 +1,7 @@
 import type { ClientRateLimitInfo, Store } from 'express-rate-limit';
 import type { Pool } from 'pg';
 import { Gatherer } from './gather';
+import { patience } from './patience';
 
 interface Hit {
   readonly policy: string;
@@ -20,6 +21,7 @@ export type RateCounts = Gatherer<Hit, ClientRateLimitInfo>;
 
 /** The window is the minute of the database's clock, so that all processes count alike. */
 const upsert = {
+  ...patience,
   name: 'rate-counts',
   text: `INSERT INTO rate_counts AS counted (policy, subject, window_start, hits)
     SELECT policy, subject, date_trunc('minute', now()), hits

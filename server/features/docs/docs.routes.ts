@@ -20,9 +20,9 @@ export const contractRoutes = (): Route[] => [
 export function docs(): RequestHandler {
   const router = express.Router();
   const options = { url: '/v1/openapi.json', deepLinking: true, persistAuthorization: false };
-  router.use(
-    docsHeaders,
-    swaggerUi.serve,
+  router.use(docsHeaders, swaggerUi.serve);
+  router.get(
+    '/',
     swaggerUi.setup(undefined, { swaggerOptions: options, customSiteTitle: 'Headtree API' }),
   );
   return router;

@@ -11,7 +11,6 @@ export const healthRoutes = (readiness: () => Promise<Readiness>): Route[] => [
     path: '/readyz',
     handler: async () => {
       const found = await readiness();
-      // A month that is missing is a warning: the DEFAULT partition takes its rows.
       const ready = found.database && found.listener;
       return {
         status: ready ? 200 : 503,

@@ -7,8 +7,15 @@ export interface Readiness {
   readonly database: boolean;
   /** Whether keys and profiles in memory are as the database has them. */
   readonly listener: boolean;
-  /** Null when the database does not say. */
-  readonly partitions: PartitionHealth | null;
+  /** A warning is no reason to be taken out: the DEFAULT partition takes what has no other. */
+  readonly partitions: { readonly ok: boolean; readonly warnings: readonly string[] };
+}
+
+function warningsOf({ missing, strayRows }: PartitionHealth): string[] {
+  return [
+    ...missing.map((table) => `The partition ${table} is missing.`),
+    ...(strayRows > 0 ? [`${strayRows} rows lie in the DEFAULT partition.`] : []),
+  ];
 }
 
 export const readinessOf =
@@ -16,8 +23,10 @@ export const readinessOf =
   async () => {
     const listener = feed.isTrusted('keys') && feed.isTrusted('profiles');
     try {
-      return { database: true, listener, partitions: await partitionHealth(sequelize) };
+      const warnings = warningsOf(await partitionHealth(sequelize));
+      return { database: true, listener, partitions: { ok: warnings.length === 0, warnings } };
     } catch {
-      return { database: false, listener, partitions: null };
+      const warnings = ['The database does not answer.'];
+      return { database: false, listener, partitions: { ok: false, warnings } };
     }
   };

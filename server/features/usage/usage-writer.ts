@@ -1,5 +1,6 @@
 import type { Pool } from 'pg';
 import { Gatherer } from '../../middleware/gather';
+import { patience } from '../../middleware/patience';
 import type { UsageRow } from './usage-row';
 
 const columns = {
@@ -35,6 +36,7 @@ const arrays = names.map((name, index) => `$${index + 1}::${columns[name]}[]`);
  * its connection broke, adds no row twice.
  */
 const insert = {
+  ...patience,
   name: 'usage-rows',
   text: `INSERT INTO usage_events (${names.join(', ')})
     SELECT * FROM unnest(${arrays.join(', ')}) ON CONFLICT DO NOTHING`,
@@ -78,11 +80,12 @@ export function usageRows(pool: Pool): UsageRows {
   return new Gatherer<UsageRow, void>({
     isPoison,
     flush: async (rows) => {
+      const began = Date.now();
       try {
         await write(rows);
       } catch (error) {
-        // A connection that broke while idle fails its first use: the next one is new.
-        if (!isCut(error)) throw error;
+        // A connection that broke while idle fails its first use, and at once: the next one is new.
+        if (!isCut(error) || Date.now() - began > 500) throw error;
         await write(rows);
       }
       return rows.map(() => undefined);

@@ -81,7 +81,7 @@ function readFilters(query: Query): Filters {
 
 function toCall(row: UsageEvent) {
   return {
-    requestId: row.id,
+    id: row.id,
     at: row.at,
     phase: row.phase,
     clientId: row.clientId,
@@ -89,10 +89,10 @@ function toCall(row: UsageEvent) {
     keySelector: row.keySelector,
     method: row.method,
     route: row.route,
-    check: row.checkId,
+    checkId: row.checkId,
     profile: row.profile,
     profileRevision: row.profileRevision,
-    status: row.httpStatus,
+    httpStatus: row.httpStatus,
     code: row.code,
     answer: row.answer,
     utilisation: row.utilisation,
@@ -116,7 +116,7 @@ export async function listUsage(
   const rows = await UsageEvent.findAll({ where, order: [['id', 'DESC']], limit: size + 1 });
   const items = rows.slice(0, size).map(toCall);
   const last = items.at(-1);
-  return { items, nextPageToken: rows.length > size && last ? pageToken(last.requestId) : null };
+  return { items, nextPageToken: rows.length > size && last ? pageToken(last.id) : null };
 }
 
 /** One call by the id that its answer carried. */
