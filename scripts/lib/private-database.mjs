@@ -20,9 +20,11 @@ import { say } from './say.mjs';
  */
 export async function startDatabase({ home, database, ending, throwAway = false }) {
   const remembered = readSettings(home, freshSettings);
+  const there = remembered.databaseFolder ?? join(home, 'database');
+  const { folder: binaries } = await ensurePostgres(clusterMajor(there));
+  // Only now: the package that brings the programs brings their user too.
   const as = await postgresUser();
   const folder = await chooseClusterFolder(home, remembered.databaseFolder, as);
-  const { folder: binaries } = await ensurePostgres(clusterMajor(folder));
   // First, for it may hold the very port that is remembered.
   await endLeftover(folder);
   const settings = {
