@@ -32,8 +32,13 @@ const KNOWN = [
  */
 export function explain(error, place) {
   if (error instanceof Stop) return error;
-  const known = KNOWN.find(([pattern]) => pattern.test(textOf(error)));
-  return known && new Stop(known[1](pathOf(error) ?? place));
+  const known = advice(textOf(error), pathOf(error) ?? place);
+  return known === undefined ? undefined : new Stop(known);
+}
+
+/** @param {string} said @param {string} place */
+export function advice(said, place) {
+  return KNOWN.find(([pattern]) => pattern.test(said))?.[1](place);
 }
 
 /** @param {unknown} error */
