@@ -4,6 +4,8 @@ import { Call, callOf } from './call';
 /** Under /v1 every refusal has its row in the log, whatever route it fails to find. */
 export const underVersion: RequestHandler = (_request, response, next) => {
   callOf(response).logged = 'refused';
+  // An answer is of its key; what may be kept says so itself.
+  response.setHeader('Cache-Control', 'no-store');
   next();
 };
 
