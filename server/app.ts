@@ -6,6 +6,7 @@ import { checkRunner, type RunApart } from './features/checks/check-runner';
 import { checkRoutes } from './features/checks/checks.routes';
 import { CheckService, type Validate } from './features/checks/checks.service';
 import { contractRoutes, docs } from './features/docs/docs.routes';
+import { elementRoutes } from './features/elements/elements.routes';
 import { formulaRoutes } from './features/formulas/formulas.routes';
 import { healthRoutes } from './features/health/health.routes';
 import type { Readiness } from './features/health/readiness';
@@ -54,6 +55,7 @@ export function routeTable(deps: AppDeps): Route[] {
   const checks = new CheckService({ profiles, validate: deps.validate, run });
   return [
     ...homeRoutes(deps.checks),
+    ...elementRoutes(),
     ...healthRoutes(deps.readiness),
     ...problemRoutes(),
     ...contractRoutes(),

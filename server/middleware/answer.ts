@@ -28,16 +28,17 @@ function problemAnswer(problem: Problem, request: Request, requestId: string): A
   };
 }
 
-function write(response: Response, answer: Answer, text: string): void {
+function write(response: Response, answer: Answer, content: string | Uint8Array): void {
   response.statusCode = answer.status;
   for (const [name, value] of Object.entries(answer.headers ?? {})) response.setHeader(name, value);
+  if (answer.status === 204 || answer.status === 304) return void response.end();
   response.setHeader('Content-Type', answer.contentType ?? 'application/json; charset=utf-8');
-  response.setHeader('Content-Length', Buffer.byteLength(text));
-  response.end(text);
+  response.setHeader('Content-Length', Buffer.byteLength(content));
+  response.end(content);
 }
 
-const textOf = ({ body }: Answer): string =>
-  typeof body === 'string' ? body : JSON.stringify(body);
+const contentOf = ({ body }: Answer): string | Uint8Array =>
+  typeof body === 'string' || body instanceof Uint8Array ? body : JSON.stringify(body);
 
 /** The one place that writes answers: first the row of the call, committed, then the answer. */
 export function answers({ usage, logger, onKeyUse }: AnswerDeps): {
@@ -52,10 +53,10 @@ export function answers({ usage, logger, onKeyUse }: AnswerDeps): {
   ): Promise<void> => {
     const call = callOf(response);
     const { status } = answer;
-    const text = textOf(answer);
+    const content = contentOf(answer);
     const ending = { method: request.method, status, code, address: addressOf(request) };
     if (call.isLogged(status)) await usage.write(call, ending);
-    write(response, answer, text);
+    write(response, answer, content);
     if (call.key) onKeyUse(call.key.id);
     logger.info({
       requestId: call.id,
@@ -64,6 +65,7 @@ export function answers({ usage, logger, onKeyUse }: AnswerDeps): {
       status,
       code: code ?? undefined,
       selector: call.keySelector,
+      person: call.person?.id,
       microseconds: call.microseconds,
     });
   };
@@ -96,7 +98,7 @@ export function answers({ usage, logger, onKeyUse }: AnswerDeps): {
     logger.error({ requestId: call.id, code: problem.code, cause: messageOf(error) });
     if (response.headersSent) return void response.destroy();
     const answer = problemAnswer(problem, request, call.id);
-    write(response, answer, textOf(answer));
+    write(response, answer, contentOf(answer));
   };
 
   return {

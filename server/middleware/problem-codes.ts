@@ -58,6 +58,30 @@ export const problemKinds = {
     'The key was issued for a limited time, which is over.',
     'Ask the administrator for a new key. Rotating a key before it expires lets both work for a while.',
   ),
+  'sign-in-required': kind(
+    401,
+    'Nobody is signed in',
+    'This is done by people who are signed in at the console; no key does it. A session ends eight hours after its last request.',
+    'Sign in at the console.',
+  ),
+  'sign-in-refused': kind(
+    401,
+    'The sign-in is refused',
+    'The email and the password do not belong together, or the person is out of use: the answer is the same.',
+    'Type both again. The administrator of this service gives a new password.',
+  ),
+  'permission-missing': kind(
+    403,
+    'Your roles do not allow it',
+    'Each role allows certain things, and none of yours allows this.',
+    'Ask an administrator to do it, or to give you the role.',
+  ),
+  'csrf-token-missing': kind(
+    403,
+    'The request does not come from our own page',
+    'A browser sends the cookie of a session whoever makes it ask. So every change carries a token that only our own pages can read.',
+    'Send the csrfToken of GET /v1/session in the header X-CSRF-Token. Reload the page when the session has changed.',
+  ),
   'scope-missing': kind(
     403,
     'The key lacks a scope',
@@ -87,6 +111,18 @@ export const problemKinds = {
     'There is nothing here',
     'No such path, or nothing of that name that the key may know of.',
     'Look the path up in /docs. A path is written without a slash at its end.',
+  ),
+  'name-taken': kind(
+    409,
+    'The name is taken',
+    'Another client has this name; capitals do not tell them apart.',
+    'Choose a name that tells the tools apart in the log.',
+  ),
+  'client-disabled': kind(
+    409,
+    'The client is out of use',
+    'A client that is out of use gets no new keys.',
+    'Take the client into use again, or issue the key for another.',
   ),
   'too-large': kind(
     413,
@@ -181,6 +217,13 @@ export const problemKinds = {
     'Too much to do',
     'More large checks are waiting than can be done soon.',
     askAgain,
+    true,
+  ),
+  'elements-not-built': kind(
+    503,
+    'The elements are not built',
+    'The script of the elements, its fonts and its manifest are made from this repository by the start command, and they are not there.',
+    'Tell the administrator of this service: "npm start" builds them and says why when it cannot.',
     true,
   ),
 } as const satisfies Readonly<Record<string, ProblemKind>>;

@@ -1,17 +1,26 @@
 import type { Request } from 'express';
 import type { Key, Scope } from '../features/keys/key';
 import type { KeyKind } from '../features/keys/key-format';
+import type { SignedIn } from '../features/people/person';
+import type { Permission } from '../features/people/policy';
 import type { Call } from './call';
 
 /** Who may call. There is no default: a route that says nothing does not start. */
 export type Policy =
   | { readonly kind: 'public' }
-  | { readonly kind: 'key'; readonly scope: Scope; readonly keyKinds: readonly KeyKind[] };
+  | {
+      readonly kind: 'key';
+      readonly scope: Scope;
+      readonly keyKinds: readonly KeyKind[];
+      /** With it somebody who is signed in may call as well, without a key. */
+      readonly permission?: Permission;
+    }
+  | { readonly kind: 'session'; readonly permission: Permission };
 
 /** What a handler gives back; it never writes the response itself. */
 export interface Answer {
   readonly status: number;
-  /** Sent as JSON; text is sent as it is, with the type named. */
+  /** Sent as JSON; text and bytes are sent as they are, with the type named. */
   readonly body: unknown;
   readonly contentType?: string;
   readonly headers?: Readonly<Record<string, string>>;
@@ -23,8 +32,10 @@ export type Query = Readonly<Record<string, string | undefined>>;
 export interface Asked {
   readonly request: Request;
   readonly call: Call;
-  /** Present where the route's policy wants a key. */
+  /** Present where the call came with a good key. */
   readonly key: Key | undefined;
+  /** Present where somebody is signed in and no key was sent. */
+  readonly person: SignedIn | undefined;
   readonly params: Readonly<Record<string, string>>;
   readonly query: Query;
   readonly body: unknown;
@@ -34,7 +45,7 @@ export type Handler = (asked: Asked) => Answer | Promise<Answer>;
 
 /** One row of the route table. */
 export interface Route {
-  readonly method: 'get' | 'post';
+  readonly method: 'get' | 'post' | 'patch' | 'delete';
   readonly path: string;
   readonly policy: Policy;
   /** Counted against the caller's limit, or not at all (probes and pages). */
@@ -43,6 +54,8 @@ export interface Route {
   readonly logged: boolean;
   /** Allowed query parameters with their values, or `text` for any. */
   readonly query?: Readonly<Record<string, 'text' | readonly string[]>>;
+  /** For a POST that takes none; whatever is sent is not read. */
+  readonly body?: 'none';
   /** The check whose own route it is. */
   readonly check?: string;
   readonly handler: Handler;
@@ -85,6 +98,7 @@ export function assertRoutes(routes: readonly Route[], checkIds: readonly string
 /** The table is typed; this holds for a row that got past the types. */
 function assertPolicy(name: string, policy: Policy | undefined): void {
   if (policy?.kind === 'public') return;
+  if (policy?.kind === 'session' && policy.permission.length > 0) return;
   if (policy?.kind === 'key' && policy.keyKinds.length > 0 && policy.scope.length > 0) return;
   throw new Error(`${name} has no policy.`);
 }
