@@ -66,7 +66,7 @@ export class BuiltFiles {
       this.remembered.set(name, { changed: mtimeMs, file });
       return file;
     } catch (error) {
-      if (error instanceof Error && 'code' in error && error.code === 'ENOENT') return undefined;
+      if ((error as NodeJS.ErrnoException).code === 'ENOENT') return undefined;
       throw error;
     }
   }
