@@ -1,4 +1,5 @@
 import js from '@eslint/js';
+import angular from 'angular-eslint';
 import tseslint from 'typescript-eslint';
 
 /** The house's walls: who may import whom. Each message names the room that was entered. */
@@ -52,6 +53,22 @@ export default tseslint.config(
   },
   {
     files: ['projects/**/*.ts'],
+    extends: [angular.configs.tsRecommended],
+    processor: angular.processInlineTemplates,
+    rules: {
+      '@angular-eslint/prefer-on-push-component-change-detection': 'error',
+      '@angular-eslint/prefer-signals': 'error',
+      '@angular-eslint/component-class-suffix': 'off',
+      '@angular-eslint/directive-class-suffix': 'off',
+      '@typescript-eslint/no-extraneous-class': ['error', { allowWithDecorator: true }],
+    },
+  },
+  {
+    files: ['projects/**/*.html'],
+    extends: [angular.configs.templateRecommended, angular.configs.templateAccessibility],
+  },
+  {
+    files: ['projects/**/*.ts'],
     rules: walls([
       wall('Both sides meet only in the generated contract types.', '**/server/**', '**/db/**'),
     ]),
@@ -69,7 +86,15 @@ export default tseslint.config(
   {
     files: ['**/*.mjs'],
     languageOptions: {
-      globals: { process: 'readonly', console: 'readonly', setTimeout: 'readonly', fetch: 'readonly', clearTimeout: 'readonly', URL: 'readonly', Buffer: 'readonly' },
+      globals: {
+        process: 'readonly',
+        console: 'readonly',
+        setTimeout: 'readonly',
+        fetch: 'readonly',
+        clearTimeout: 'readonly',
+        URL: 'readonly',
+        Buffer: 'readonly',
+      },
     },
   },
 );

@@ -1,0 +1,65 @@
+import type { components } from '@headtree/checks/contract';
+
+type Schemas = components['schemas'];
+
+/** The body of `POST /v1/checks/waler`. */
+export type WalerRequest = Schemas['WalerRequest'];
+/** What a check answers. */
+export type CheckAnswer = Schemas['CheckAnswer'];
+/** The word of an answer; only `pass` is a pass. */
+export type CheckStatus = Schemas['CheckStatus'];
+/** One verification of an answer. */
+export type Verification = Schemas['Verification'];
+/** Name of a verification, the same in every check. */
+export type VerificationId = Schemas['VerificationId'];
+/** One line of the working. */
+export type Step = Schemas['Step'];
+/** One combination of actions. */
+export type CombinationLine = Schemas['CombinationLine'];
+/** Reaction of one support. */
+export type Reaction = Schemas['Reaction'];
+/** Envelopes along the member. */
+export type Diagrams = Schemas['Diagrams'];
+/** One point of an envelope. */
+export type DiagramPoint = Schemas['DiagramPoint'];
+/** The revision that an answer stands on. */
+export type ProfileStamp = Schemas['ProfileStamp'];
+/** One factor profile of the list. */
+export type ProfileSummary = Schemas['ProfileSummary'];
+/** The text and the MathML of one formula. */
+export type Formula = Schemas['Formula'];
+/** One load across the member. */
+export type Load = Schemas['Load'];
+/** Compression along the member from one source. */
+export type AxialLoad = Schemas['AxialLoad'];
+/** How a request names its section. */
+export type SectionInput = Schemas['SectionInput'];
+/** What a member is made of. */
+export type MaterialInput = Schemas['MaterialInput'];
+/** A verification the caller takes upon themselves. */
+export type Waiver = Schemas['Waiver'];
+/** A number in the field's unit, or text with a unit. */
+export type QuantityInput = Schemas['QuantityInput'];
+/** A problem as the service writes it. */
+export type ProblemBody = Schemas['Problem'];
+/** One thing in a problem that the caller can mend. */
+export type ProblemItem = Schemas['ProblemItem'];
+
+/** An element of MathML as data, so that a page may build it node by node. */
+export interface MathElement {
+  readonly tag: string;
+  readonly text?: string;
+  readonly children?: readonly MathElement[];
+  /** The symbol the element stands for, so that its number can take its place. */
+  readonly symbol?: string;
+  readonly attributes?: Readonly<Record<string, string>>;
+}
+
+/** One section of the catalogue, as the list gives it. */
+export interface SectionLine {
+  readonly designation: string;
+  readonly family?: string;
+  readonly mass?: number | { readonly value: number };
+  readonly h?: number | { readonly value: number };
+  readonly b?: number | { readonly value: number };
+}
