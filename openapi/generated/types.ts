@@ -529,7 +529,7 @@ export interface paths {
         };
         /**
          * Read the log
-         * @description Calls of all keys, newest first. Needs the scope `admin`.
+         * @description Calls of all keys, newest first. Needs the scope `usage`, an administrator's.
          */
         readonly get: operations["listUsage"];
         readonly put?: never;
@@ -549,7 +549,7 @@ export interface paths {
         };
         /**
          * Read one call
-         * @description The call whose answer carried this X-Request-Id. Needs the scope `admin`.
+         * @description The call whose answer carried this X-Request-Id. Needs the scope `usage`, an administrator's.
          */
         readonly get: operations["readUsage"];
         readonly put?: never;
@@ -620,6 +620,26 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/problems": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List every problem
+         * @description Every code that an answer can carry: a page for people, JSON for programs that ask for it.
+         */
+        readonly get: operations["listProblems"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/problems/{code}": {
         readonly parameters: {
             readonly query?: never;
@@ -629,7 +649,7 @@ export interface paths {
         };
         /**
          * Read what a problem means
-         * @description A page for people: why it happens and what to do.
+         * @description Why it happens and what to do: a page for people, JSON for programs that ask for it.
          */
         readonly get: operations["readProblem"];
         readonly put?: never;
@@ -1183,6 +1203,7 @@ export interface components {
              * @enum {string}
              */
             readonly combination: "A1" | "none";
+            /** @description The loads of this set. */
             readonly loads: readonly components["schemas"]["Load"][];
         };
         /** @description Instead of `loads`. All are evaluated; the worst governs and is named. */
@@ -2261,6 +2282,7 @@ export interface components {
         };
         /** Many checks at a time */
         readonly BatchRequest: {
+            /** @description The checks. */
             readonly items: readonly components["schemas"]["BatchItem"][];
         };
         /**
@@ -2807,6 +2829,25 @@ export interface components {
                 readonly warnings: readonly string[];
             };
         };
+        /** What a problem means */
+        readonly ProblemKind: {
+            /** Format: uri-reference */
+            readonly type: string;
+            readonly code: string;
+            readonly status: number;
+            readonly title: string;
+            /** @description Whether the same request may succeed later. */
+            readonly retryable: boolean;
+            /** @description Why it happens. */
+            readonly why: string;
+            /** @description What to do. */
+            readonly remedy: string;
+        };
+        /** Every problem there is */
+        readonly ProblemKindList: {
+            readonly items: readonly components["schemas"]["ProblemKind"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
     };
     responses: {
         /** @description No key, or not a good one. */
@@ -3045,7 +3086,7 @@ export interface components {
                 readonly "application/problem+json": components["schemas"]["Problem"];
             };
         };
-        /** @description Not valid, or outside what the check covers. Each fault has its JSON pointer; a `fix` where one is known. At most 20, the most specific first. Codes of `errors` are wrong-type, missing-field, unknown-field, not-one-of, one-of-both, not-a-quantity, wrong-unit, unknown-unit, negative, must-be-positive, too-large, too-small, too-many, too-few, empty, too-long, too-short, repeated, wrong-form, control-character, reserved-word, not-finite. */
+        /** @description Not valid, or outside what the check covers. Each fault has its JSON pointer; a `fix` where one is known. At most 20, the most specific first. Codes of `errors` are wrong-type, missing-field, unknown-field, not-one-of, one-of-both, not-a-quantity, wrong-unit, unknown-unit, negative, must-be-positive, too-large, too-small, too-many, too-few, empty, too-long, too-short, repeated, wrong-form, control-character, not-text, reserved-word, not-finite. */
         readonly NotValid: {
             headers: {
                 readonly "X-Request-Id": components["headers"]["XRequestId"];
@@ -3128,6 +3169,26 @@ export interface components {
         readonly ProfileInPath: string;
         /** @description `full` shows the working of every item; `summary` gathers none, and is quicker. Default `summary`. */
         readonly BatchDetail: "full" | "summary";
+        /** @description Only calls of this client, by its id. */
+        readonly UsageClient: string;
+        /** @description Only calls of this check. */
+        readonly UsageCheck: components["schemas"]["CheckId"];
+        /** @description Only calls answered with this HTTP status. */
+        readonly UsageStatus: number;
+        /** @description Only checks answered with this status. */
+        readonly UsageAnswer: "pass" | "fail" | "incomplete" | "provisional";
+        /**
+         * @description Only calls from this date, or date and time with its offset, on.
+         * @example 2026-01-31T08:00:00Z
+         */
+        readonly UsageFrom: string;
+        /**
+         * @description Only calls before this date, or date and time with its offset.
+         * @example 2026-02-01
+         */
+        readonly UsageTo: string;
+        /** @description How many to a page. */
+        readonly PageSize: number;
         /** @description `nextPageToken` of the page before. Default the first page. */
         readonly PageToken: string;
         /**
@@ -4244,6 +4305,26 @@ export interface operations {
     readonly listUsage: {
         readonly parameters: {
             readonly query?: {
+                /** @description Only calls of this client, by its id. */
+                readonly client?: components["parameters"]["UsageClient"];
+                /** @description Only calls of this check. */
+                readonly check?: components["parameters"]["UsageCheck"];
+                /** @description Only calls answered with this HTTP status. */
+                readonly status?: components["parameters"]["UsageStatus"];
+                /** @description Only checks answered with this status. */
+                readonly answer?: components["parameters"]["UsageAnswer"];
+                /**
+                 * @description Only calls from this date, or date and time with its offset, on.
+                 * @example 2026-01-31T08:00:00Z
+                 */
+                readonly from?: components["parameters"]["UsageFrom"];
+                /**
+                 * @description Only calls before this date, or date and time with its offset.
+                 * @example 2026-02-01
+                 */
+                readonly to?: components["parameters"]["UsageTo"];
+                /** @description How many to a page. */
+                readonly pageSize?: components["parameters"]["PageSize"];
                 /** @description `nextPageToken` of the page before. Default the first page. */
                 readonly pageToken?: components["parameters"]["PageToken"];
             };
@@ -4428,6 +4509,33 @@ export interface operations {
             };
         };
     };
+    readonly listProblems: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The page. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ProblemKindList"];
+                    readonly "text/html": string;
+                };
+            };
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 500: components["responses"]["Unexpected"];
+        };
+    };
     readonly readProblem: {
         readonly parameters: {
             readonly query?: never;
@@ -4453,6 +4561,7 @@ export interface operations {
                     readonly [name: string]: unknown;
                 };
                 content: {
+                    readonly "application/json": components["schemas"]["ProblemKind"];
                     readonly "text/html": string;
                 };
             };

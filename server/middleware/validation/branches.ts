@@ -16,7 +16,13 @@ export type NoBranch =
       readonly quantity?: QuantityRule;
     }
   | { readonly because: 'kind'; readonly property: string; readonly values: readonly string[] }
-  | { readonly because: 'shape'; readonly properties: readonly string[]; readonly kind?: string };
+  | {
+      readonly because: 'shape';
+      /** One of these is wanted. */
+      readonly wanted: readonly string[];
+      /** All that any branch has. */
+      readonly known: readonly string[];
+    };
 
 const wordsOfOpenApi = new Set(['discriminator', 'example', 'xml', 'externalDocs']);
 
@@ -102,7 +108,7 @@ function choiceOfObjects(objects: readonly Branch[]): AjvSchema {
   const property = objects.map(kindOf).find((kind) => kind !== undefined)?.[0];
   const unkinded = objects.filter((branch) => kindOf(branch) === undefined);
   const values = [...new Set(objects.flatMap((branch) => kindOf(branch)?.[1] ?? []))];
-  let rest = choiceByShape(unkinded, property);
+  let rest = choiceByShape(unkinded, objects, property);
   if (property !== undefined) {
     const noKind = refuse({ because: 'kind', property, values });
     rest = unkinded.length === 0 ? noKind : { if: has(property), then: noKind, else: rest };
@@ -117,18 +123,23 @@ function choiceOfObjects(objects: readonly Branch[]): AjvSchema {
 }
 
 /** Objects without a kind: the one whose own properties are there, else what they would be. */
-function choiceByShape(branches: readonly Branch[], kind: string | undefined): AjvSchema {
-  const properties =
+function choiceByShape(
+  branches: readonly Branch[],
+  among: readonly Branch[],
+  kind: string | undefined,
+): AjvSchema {
+  const wanted =
     kind === undefined
-      ? branches.flatMap((branch) => ownProperties(branch, branches))
+      ? branches.flatMap((branch) => ownProperties(branch, among))
       : [kind, ...identifying(branches)];
+  const known = [...new Set(among.flatMap(({ full }) => Object.keys(full.properties ?? {})))];
   return branches.reduceRight<AjvSchema>(
     (after, branch) => ({
-      if: hasAny(ownProperties(branch, branches)),
+      if: hasAny(ownProperties(branch, among)),
       then: toAjv(branch.schema),
       else: after,
     }),
-    refuse({ because: 'shape', properties, ...(kind !== undefined && { kind }) }),
+    refuse({ because: 'shape', wanted, known }),
   );
 }
 

@@ -18,6 +18,7 @@ export interface ContractSchema {
   readonly properties?: Readonly<Record<string, ContractSchema>>;
   readonly additionalProperties?: boolean | ContractSchema;
   readonly required?: readonly string[];
+  readonly dependentRequired?: Readonly<Record<string, readonly string[]>>;
   readonly items?: ContractSchema;
   readonly oneOf?: readonly ContractSchema[];
   readonly not?: ContractSchema;
@@ -32,6 +33,7 @@ export interface ContractSchema {
   readonly maxItems?: number;
   readonly minLength?: number;
   readonly maxLength?: number;
+  readonly uniqueItems?: boolean;
   readonly pattern?: string;
   readonly 'x-quantity'?: QuantityRule;
   /** Why a field that a caller may expect is not one of this object's. */
@@ -39,7 +41,11 @@ export interface ContractSchema {
 }
 
 type ContractDocument = Omit<OpenAPIV3_1.Document, 'components'> & {
-  readonly components: { readonly schemas: Readonly<Record<string, ContractSchema>> };
+  readonly components: {
+    readonly schemas: Readonly<Record<string, ContractSchema>>;
+    readonly examples: Readonly<Record<string, OpenAPIV3_1.ExampleObject>>;
+    readonly responses: Readonly<Record<string, OpenAPIV3_1.ResponseObject>>;
+  };
 };
 
 /** The whole contract, as `npm run contract` bundles it. */

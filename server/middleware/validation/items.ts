@@ -4,15 +4,7 @@ import type { NoBranch } from './branches';
 import type { ContractSchema, QuantityRule } from './document';
 import type { QuantityFault } from './keywords';
 import { nearest } from './nearest';
-import {
-  either,
-  fieldName,
-  hasControlCharacter,
-  kindOf,
-  quantityWords,
-  shown,
-  typeWords,
-} from './words';
+import { either, fieldName, kindOf, quantityWords, shown, typeWords, unfit } from './words';
 
 /** A longer list of words is not read out. */
 const MOST_WORDS = 12;
@@ -29,7 +21,8 @@ function item(pointer: string, code: string, message: string, fix?: string): Ref
 
 function unknownField(pointer: string, name: string, parent: ContractSchema): RefusalItem {
   const names = Object.keys(parent.properties ?? {});
-  const hint = parent['x-hints']?.[name];
+  const hints = parent['x-hints'] ?? {};
+  const hint = Object.hasOwn(hints, name) ? hints[name] : undefined;
   const meant = nearest(name, names);
   const fix =
     hint ??
@@ -57,6 +50,8 @@ function notOneOf(pointer: string, value: unknown, words: readonly unknown[]): R
       `${fieldName(pointer)} must be ${list}; it is ${kindOf(value)}.`,
     );
   }
+  const fault = typeof value === 'string' ? unfit(value) : undefined;
+  if (fault) return item(pointer, fault.code, `${fieldName(pointer)} holds ${fault.words}.`);
   const wanted = words.length > MOST_WORDS ? `one of the contract's ${words.length} words` : list;
   const given = typeof value === 'string' ? JSON.stringify(shown(value)) : String(value);
   const meant = typeof value === 'string' ? nearest(value, words.map(String)) : undefined;
@@ -106,7 +101,7 @@ function badQuantity(
       return item(
         pointer,
         fault.code,
-        `${name}: ${fault.message ?? ''}`,
+        `${name}: ${shown(fault.message ?? '', 120)}`,
         `Give ${quantityWords(rule)}.`,
       );
     default:
@@ -136,20 +131,20 @@ function badChoice(pointer: string, data: unknown, why: NoBranch): RefusalItem[]
     const fix = `Give ${quoted(why.values)}.`;
     return [item(at, 'missing-field', `${fieldName(at)} is missing.`, fix)];
   }
-  const parent = { properties: Object.fromEntries(why.properties.map((name) => [name, {}])) };
-  const wanted = `Give ${either(why.properties.map((name) => `\`${name}\``))}.`;
-  const misspelt = Object.keys(body).filter((key) => nearest(key, why.properties) !== undefined);
+  const { wanted, known } = why;
+  const parent = { properties: Object.fromEntries(wanted.map((name) => [name, {}])) };
+  const strange = Object.keys(body).filter((key) => !known.includes(key));
+  const misspelt = strange.filter((key) => nearest(key, wanted) !== undefined);
   if (misspelt.length > 0) return misspelt.map((key) => unknownField(pointer, key, parent));
-  const at = child(pointer, why.kind ?? why.properties[0] ?? '');
-  return [item(at, 'missing-field', `${fieldName(at)} is missing.`, wanted)];
+  const at = child(pointer, wanted[0] ?? '');
+  const fix = `Give ${either(wanted.map((name) => `\`${name}\``))}.`;
+  return [item(at, 'missing-field', `${fieldName(at)} is missing.`, fix)];
 }
 
 function badPattern(pointer: string, data: string, schema: ContractSchema): RefusalItem {
   const name = fieldName(pointer);
-  if (hasControlCharacter(data)) {
-    const message = `${name} holds a control character, a line break or half of a character.`;
-    return item(pointer, 'control-character', message);
-  }
+  const fault = unfit(data);
+  if (fault) return item(pointer, fault.code, `${name} holds ${fault.words}.`);
   if (data.trim() === '') return item(pointer, 'empty', `${name} is empty.`);
   const [example] = schema.examples ?? [];
   const fix = example === undefined ? undefined : `Write it like ${JSON.stringify(example)}.`;

@@ -46,7 +46,15 @@ export function prepareValidation(schemaNames: Iterable<string>): void {
 }
 
 /** Codes from the one that says most about its place to the one that says least. */
-const vague = ['wrong-form', 'too-short', 'too-long', 'empty', 'wrong-type', 'not-valid'];
+const vague = [
+  'repeated',
+  'wrong-form',
+  'too-short',
+  'too-long',
+  'empty',
+  'wrong-type',
+  'not-valid',
+];
 
 const precision = ({ code }: RefusalItem) => vague.indexOf(code);
 const depth = ({ pointer }: RefusalItem) => pointer.split('/').length;

@@ -62,5 +62,9 @@ export function shown(text: string, longest = 40): string {
   return clean.length > longest ? `${clean.slice(0, longest)}…` : clean;
 }
 
-/** Whether a text holds what no name may: control characters, halves of a pair, line separators. */
-export const hasControlCharacter = (text: string): boolean => text.search(unprintable) >= 0;
+/** What makes a text unfit to print, if anything does. */
+export function unfit(text: string): { code: string; words: string } | undefined {
+  if (/\p{Cs}/u.test(text)) return { code: 'not-text', words: 'half of a character' };
+  if (text.search(unprintable) < 0) return undefined;
+  return { code: 'control-character', words: 'a control character or a line break' };
+}
