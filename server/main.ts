@@ -15,7 +15,9 @@ import { validateRequest } from './middleware/validation';
 
 async function main(): Promise<void> {
   const config = readConfig();
-  const logger = pino({ level: config.log, base: { process: 'api' } });
+  // Lines are written behind the answers; what must be known is in the usage log already.
+  const lines = pino.destination({ dest: 1, sync: false });
+  const logger = pino({ level: config.log, base: { process: 'api' } }, lines);
   const warn = (message: string): void => logger.warn({ cause: message }, 'database');
   const url = config.databaseUrl;
   const sequelize = connect(url, { name: 'headtree-api' });
@@ -45,6 +47,7 @@ async function main(): Promise<void> {
   });
   server.on('error', (error) => {
     logger.fatal({ cause: error.message }, 'cannot listen');
+    lines.flushSync();
     process.exit(1);
   });
 

@@ -1,10 +1,10 @@
 import type { Request, Response } from 'express';
 import { performance } from 'node:perf_hooks';
-import { decodeTime, monotonicFactory } from 'ulid';
+import { decodeTime } from 'ulid';
 import type { Key } from '../features/keys/key';
+import { nextId } from './ids';
 import type { ProblemCode } from './problem-codes';
 
-const nextId = monotonicFactory();
 const plainLabel = /^[\w.:/+=@,-]{1,100}$/;
 const keyInside = /ht[kpc]_[0-9A-Za-z]{12}_/;
 
