@@ -5,6 +5,7 @@ import { fromStandingPair, solveCompressionOnly } from './compression-only';
 import { ContinuousBeam } from './continuous-beam';
 import { deflectionExtremes } from './deflection';
 import { greatest, momentExtremes, wholeMember } from './extremes';
+import { sectionPoints } from './section-points';
 import { UnitCases } from './unit-cases';
 
 function member(
@@ -89,13 +90,54 @@ describe('a middle support that lifts', () => {
       [1, 0, 6000],
       [3, 6000, 8000],
     ]);
+    const there = sectionPoints(state).filter(({ x }) => x === 3000);
+    expect(there.map(({ side }) => side)).toEqual(['left', 'right']);
     const { min } = deflectionExtremes(state, bays(state)[1]!);
     expect(min.x).toBeCloseTo(3000, 6);
     expect(min.value).toBeCloseTo(state.supportDeflections[1]!, 9);
   });
 });
 
+describe('supports that drop out one by one until a single one is left', () => {
+  it('are taken in again: two of them do hold the member', () => {
+    const loads: BeamLoad[] = [
+      { kind: 'distributed', from: 15651, to: 20330, start: 20, end: -56 },
+      { kind: 'distributed', from: 8744, to: 13868, start: -29, end: 80 },
+    ];
+    const cases = member([3956, 8264, 7271], loads, { start: 1952, end: 839 }, [
+      170393,
+      null,
+      null,
+      192846,
+    ]);
+    expect(standing(cases).lifted).toEqual([2, 3]);
+  });
+});
+
 describe('a mechanism', () => {
+  it('is said where the first support is lost and the loads press on its overhang', () => {
+    const cases = member([3000, 3000], [{ kind: 'point', at: 2000, value: 1 }]);
+    expect(solveCompressionOnly(cases, [1], [1, 2]).kind).toBe('mechanism');
+    expect(solveCompressionOnly(cases, [1], [0, 2]).kind).toBe('state');
+  });
+
+  it('depends on the sense of a couple on an overhanging load', () => {
+    const tip: BeamLoad = { kind: 'point', at: 7000, value: 1e3 };
+    const couple = (value: number): BeamLoad => ({ kind: 'moment', at: 1000, value });
+    for (const [value, kind] of [
+      [-2e6, 'state'],
+      [2e6, 'mechanism'],
+    ] as const) {
+      const cases = member([6000], [tip, couple(value)], { start: 0, end: 1000 });
+      expect(solveCompressionOnly(cases, [1, 1]).kind).toBe(kind);
+    }
+  });
+
+  it('is said of springs without stiffness', () => {
+    const cases = member([3000], [uniform(1, 0, 3000)], { start: 0, end: 0 }, [null, 0]);
+    expect(cases.combine([1]).kind).toBe('mechanism');
+  });
+
   it.each<[string, number[], BeamLoad[], { start: number; end: number }]>([
     ['a load that pulls off', [3000], [uniform(-5, 0, 3000)], { start: 0, end: 0 }],
     [
@@ -142,7 +184,7 @@ describe('a lost prop', () => {
 
 describe('supports that only push, over random members', () => {
   const beams = fc.record({
-    spans: fc.array(fc.integer({ min: 500, max: 8000 }), { minLength: 1, maxLength: 7 }),
+    spans: fc.array(fc.integer({ min: 500, max: 8000 }), { minLength: 1, maxLength: 5 }),
     start: fc.integer({ min: 0, max: 2500 }),
     end: fc.integer({ min: 0, max: 2500 }),
     stiffness: fc.array(fc.option(fc.integer({ min: 500, max: 200000 })), {
@@ -210,7 +252,7 @@ describe('supports that only push, over random members', () => {
         if (solution.kind === 'mechanism') expect(answers).toEqual([]);
         else expect(answers.map((a) => a.join())).toContain(solution.state.acting.join());
       }),
-      { numRuns: 300 },
+      { numRuns: 100 },
     );
   });
 
@@ -225,7 +267,7 @@ describe('supports that only push, over random members', () => {
         const found = fromStandingPair(cases, ones(cases), cases.beam.allSupports, 1e-9 * size);
         expect(allAnswers(cases).map((a) => a.join())).toContain(found?.join());
       }),
-      { numRuns: 300 },
+      { numRuns: 100 },
     );
   });
 });

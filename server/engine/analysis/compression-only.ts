@@ -11,7 +11,8 @@ const NOTHING = 1e-9;
  * in circles, {@link fromStandingPair} finds the one answer there is.
  *
  * A mechanism: the loads' resultant does not press the member on to its supports, or lies beyond
- * the outermost of them. For loads that sum to nothing the unloaded state is the answer.
+ * the outermost of them; loads that balance among themselves do not press it on either. Without
+ * load the unloaded state on all supports is the answer.
  *
  * @param factors one for each case, without unit.
  * @param available indices of the supports that are there, ascending; all by default.

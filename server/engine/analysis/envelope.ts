@@ -1,4 +1,4 @@
-import { type Bay, bays } from './bays';
+import { bays } from './bays';
 import type { BeamFrame } from './beam-frame';
 import type { BeamState } from './beam-state';
 import { type DeflectionOptions, deflectionExtremes, relativeDeflections } from './deflection';
@@ -70,7 +70,7 @@ export function deflectionEnvelope(
     let next = 0;
     for (const bay of bays(state)) {
       const start = next;
-      while (next < points.length && isIn(bay, points[next]!)) next++;
+      while (next < points.length && points[next]!.x <= bay.to) next++;
       const inBay = points.slice(start, next);
       const positions = inBay.map(({ x }) => x);
       const values = relativeDeflections(state, bay, positions, options);
@@ -94,10 +94,6 @@ function ofForce(
     }
   }
   return list.map(({ point }) => point);
-}
-
-function isIn(bay: Bay, { x, side }: EnvelopePoint): boolean {
-  return x < bay.to || (x === bay.to && side === 'left');
 }
 
 function widen(point: EnvelopePoint, value: number): void {

@@ -1,3 +1,5 @@
+import type { Stretch } from './extremes';
+
 /** Which panels (start overhang, spans, end overhang, in order) a variable load acts on. */
 export interface LoadPattern {
   /** `all`, `none`, `odd`, `even`; `neighbours-2`: both panels of the inner support between panels 2 and 3; `without-neighbours-2`: its complement. */
@@ -8,8 +10,13 @@ export interface LoadPattern {
 
 /**
  * The patterns of a variable load over n panels: all, none, odd and even ones, and for each inner
- * support both its neighbours with every second panel beyond, and the complement of that. These
- * 2n + 2 give the full envelope of support moments, greatest span moments and reactions.
+ * support both its neighbours with every second panel beyond, and the complement of that. On rigid
+ * supports that act both ways these 2n + 2 give the full envelope of support moments, greatest
+ * span moments, shears at supports, reactions and deflections for loads of one sign.
+ *
+ * They do not where effects stop alternating from span to span: on springs, on supports that lift,
+ * and where a lost support makes two panels one bay (then {@link baywise} patterns do).
+ * {@link everyPattern} covers those.
  *
  * Patterns that coincide are listed once: one panel has 2 (all, none), two panels have 4.
  */
@@ -48,4 +55,29 @@ export function loadPatterns(panelCount: number): LoadPattern[] {
     );
   }
   return patterns;
+}
+
+/** All 2^n patterns, for the members whose envelope {@link loadPatterns} may miss. */
+export function everyPattern(panelCount: number): LoadPattern[] {
+  return Array.from({ length: 2 ** panelCount }, (_, bits) => {
+    const loaded = Array.from(
+      { length: panelCount },
+      (_, i) => Math.floor(bits / 2 ** i) % 2 === 1,
+    );
+    return { name: `panels-${loaded.map(Number).join('')}`, loaded };
+  });
+}
+
+/**
+ * The patterns of {@link loadPatterns} made over bays (both ends in mm, such as `bays()` gives)
+ * instead of panels: all panels of a bay are loaded together.
+ */
+export function baywise(panels: readonly Stretch[], bays: readonly Stretch[]): LoadPattern[] {
+  const bayOf = panels.map(({ from, to }) =>
+    bays.findIndex((bay) => (from + to) / 2 > bay.from && (from + to) / 2 < bay.to),
+  );
+  return loadPatterns(bays.length).map(({ name, loaded }) => ({
+    name,
+    loaded: bayOf.map((bay) => loaded[bay] === true),
+  }));
 }

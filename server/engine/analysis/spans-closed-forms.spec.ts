@@ -1,9 +1,10 @@
 import { bays } from './bays';
 import type { BeamLoad } from './beam.types';
 import { ContinuousBeam } from './continuous-beam';
-import { deflectionExtremes } from './deflection';
-import { greatest, momentExtremes } from './extremes';
-import { valuesAt } from './values-at';
+import { deflectionExtremes, relativeDeflections } from './deflection';
+import { greatest, momentExtremes, shearExtremes } from './extremes';
+import { sectionPoints } from './section-points';
+import { supportValues, valuesAt } from './values-at';
 
 const EI = 6.1e13;
 const L = 6000;
@@ -126,6 +127,38 @@ describe('a simply supported span', () => {
   });
 });
 
+describe('a stretch of a span', () => {
+  const { state } = span([uniform(20)]);
+
+  it('has its extreme at its end when the moment turns outside it', () => {
+    const { min, max } = momentExtremes(state, { from: 500, to: 2000 });
+    exact(max.value, (20 * 2000 * (L - 2000)) / 2);
+    expect(max.x).toBe(2000);
+    exact(min.value, (20 * 500 * (L - 500)) / 2);
+  });
+});
+
+describe('a load that changes sign', () => {
+  it('has the greatest shear where it is zero', () => {
+    const { state } = span([trapezoid(-10, 20)]);
+    const { max } = shearExtremes(state, { from: 0, to: L });
+    exact(max.x, L / 3);
+    exact(max.value, (10 * L) / 6);
+    const point = sectionPoints(state).find(({ x }) => x === max.x);
+    expect(point).toMatchObject({ V: max.value, side: 'both' });
+  });
+});
+
+describe('the supports of a member without overhangs', () => {
+  it('have nothing beyond them and do not move', () => {
+    const [first, last] = supportValues(span([uniform(20)]).state);
+    expect(first).toMatchObject({ left: { V: 0, M: 0 }, deflection: 0 });
+    expect(last).toMatchObject({ right: { V: 0, M: 0 }, deflection: 0 });
+    exact(first!.right.V, 10 * L);
+    exact(last!.left.V, -10 * L);
+  });
+});
+
 describe('a span fixed at one end', () => {
   it.each([
     [1, 1],
@@ -211,6 +244,24 @@ describe('deflection by shear', () => {
     const { state, bays } = span([uniform(20)]);
     const { max } = deflectionExtremes(state, bays[0]!, { shearRigidity });
     exact(max.value, (5 * 20 * L ** 4) / (384 * EI) + (20 * L ** 2) / (8 * shearRigidity));
+  });
+
+  it('adds M/GA everywhere in a simply supported span', () => {
+    const { state, bays } = span([trapezoid(4, 13), point(2e4, 2000)]);
+    const places = [700, 2000, 3100, 5500];
+    const sheared = relativeDeflections(state, bays[0]!, places, { shearRigidity });
+    relativeDeflections(state, bays[0]!, places).forEach((bent, i) => {
+      exact(sheared[i]!, bent + valuesAt(state, places[i]!).M / shearRigidity);
+    });
+  });
+
+  it('is the same on a start overhang', () => {
+    const a = 1500;
+    const { state, bays } = span([point(1e4, -a)], { start: a, end: 0 });
+    const { max } = deflectionExtremes(state, bays[0]!, { shearRigidity });
+    const bent = (1e4 * a ** 2 * (L + a)) / (3 * EI);
+    exact(max.value, bent + (1e4 * a * (1 + a / L)) / shearRigidity);
+    expect(relativeDeflections(state, bays[0]!, [0], { shearRigidity })[0]).toBeCloseTo(0, 12);
   });
 
   it('adds W a (1 + a/L) / GA at the end of an overhang: the span beside it leans too', () => {
