@@ -28,7 +28,7 @@ async function launch() {
   const claim = await claimHome(home, url);
   ending.add(claim.forget);
   await requirePort(place.port, place.host);
-  await ensurePackages(root, join(home, 'logs/npm.log'));
+  await ensurePackages(root, join(home, 'logs/npm.log'), (npm) => claim.remember([npm]));
   ending.check();
 
   const [database] = await allSettled(openDatabase(place), build());
@@ -53,7 +53,7 @@ async function launch() {
     return service;
   };
   const services = [start('api', 'main.js', apiEnv), start('worker', 'worker.js')];
-  claim.remember(services.map(({ mark }) => mark));
+  claim.remember(services.map(({ mark }) => mark.pid));
   await waitUntilReady(url, services, ending);
   say('ready');
   welcome({ url, demoKey, home });

@@ -1,9 +1,8 @@
-import { createHash } from 'node:crypto';
-import { existsSync, lstatSync, mkdirSync, readFileSync } from 'node:fs';
+import { chmodSync, existsSync, mkdtempSync, readFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { run } from './run.mjs';
-import { say, Stop } from './say.mjs';
+import { say } from './say.mjs';
 
 /**
  * Where the cluster of a home is, or is to be: in the home, or under the system's temporary folder
@@ -17,12 +16,8 @@ export async function chooseClusterFolder(home, remembered, as) {
   if (as === undefined || existsSync(inside)) return inside;
   const reached = await run('test', ['-x', home], { as, cwd: '/' });
   if (reached.code === 0) return inside;
-  const outside = join(tmpdir(), `headtree-${shortHash(home)}`);
-  mkdirSync(outside, { recursive: true, mode: 0o711 });
-  const { uid } = lstatSync(outside);
-  if (!lstatSync(outside).isDirectory() || uid !== process.getuid?.()) {
-    throw new Stop(`${outside} belongs to someone else. Remove it, then start again.`);
-  }
+  const outside = mkdtempSync(join(tmpdir(), 'headtree-'));
+  chmodSync(outside, 0o711);
   say(`user postgres cannot reach ${home}: the database goes to ${outside}`);
   return join(outside, 'database');
 }
@@ -34,9 +29,4 @@ export function clusterMajor(folder) {
   } catch {
     return undefined;
   }
-}
-
-/** @param {string} text */
-function shortHash(text) {
-  return createHash('sha256').update(text).digest('hex').slice(0, 12);
 }

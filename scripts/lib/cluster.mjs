@@ -107,7 +107,10 @@ function launch({ binaries, folder, as, port, log, throwAway = false }) {
   /** @type {Promise<string>} */
   const ended = new Promise((resolve) => {
     child.once('error', (error) => resolve(error.message));
-    child.once('exit', (_, signal) => resolve(signal ? `by ${signal}` : lastWords(log)));
+    // A server that ends itself with a signal has said why.
+    child.once('exit', (_, signal) =>
+      resolve(signal === 'SIGKILL' ? `by ${signal}` : lastWords(log)),
+    );
   });
   const mark = { pid: child.pid ?? 0, started: markOf(child.pid ?? 0)?.started ?? '' };
   return {

@@ -26,9 +26,11 @@ export function urlsOf(port, settings, database) {
  * @param {number} options.port
  * @param {import('./home.mjs').Settings} options.settings
  * @param {string} options.database
+ * @param {string} options.folder of the cluster, to name it when it cannot be opened
  * @param {boolean} [options.ownerMakesDatabases] for tests, which clone one each
  */
-export async function makeDatabase({ port, settings, database, ownerMakesDatabases = false }) {
+export async function makeDatabase(options) {
+  const { port, settings, database, folder, ownerMakesDatabases = false } = options;
   // Not at the top: this is read before anything is installed.
   const { default: pg } = await import('pg');
   /** @param {string} name @param {(client: import('pg').Client) => Promise<void>} work */
@@ -44,7 +46,7 @@ export async function makeDatabase({ port, settings, database, ownerMakesDatabas
       await client.connect();
       await work(client);
     } catch (error) {
-      throw unusable(error);
+      throw unusable(error, folder);
     } finally {
       await client.end().catch(() => undefined);
     }
@@ -68,12 +70,12 @@ export async function makeDatabase({ port, settings, database, ownerMakesDatabas
   });
 }
 
-/** Only the message: a driver's error object can hold the password. @param {unknown} error */
-function unusable(error) {
+/** Only the message: a driver's error object can hold the password. @param {unknown} error @param {string} folder */
+function unusable(error, folder) {
   const text = textOf(error);
   if (!text.includes('password authentication failed')) return new Error(text);
   return new Stop(
-    'The passwords in settings.json do not open the database beside it. Put the settings back ' +
-      'that belong to it, or move the whole folder away to begin anew.',
+    `The passwords in settings.json do not open the database in ${folder}. Put back the ` +
+      'settings that belong to it, or move it away to begin anew without its data.',
   );
 }

@@ -20,19 +20,23 @@ export function requireNode(version = process.versions.node) {
 /**
  * Installs what `package-lock.json` names, when that is not what is installed.
  * @param {string} root @param {string} log file that keeps npm's output
+ * @param {(pid: number) => void} [started] told of npm's process
  */
-export async function ensurePackages(root, log) {
+export async function ensurePackages(root, log, started) {
   requireNode();
   const stale = stalePackages(root);
   if (stale === undefined) return say('packages are installed');
   say(`installing packages, about a minute (${stale})`);
   const installed = await run('npm', ['ci', '--include=dev', '--no-audit', '--no-fund'], {
     cwd: root,
+    ...(started && { started }),
   });
   const output = installed.stdout + installed.stderr;
   writeFileSync(log, output);
   if (installed.code !== 0) {
-    const reason = output.split('\n').find((line) => /^npm (error|ERR!) [^c]/.test(line));
+    const reason = /^npm (?:error|ERR!) (?!code |syscall |path |dest |errno )(.+)$/m.exec(
+      output,
+    )?.[1];
     throw (
       explain(output, root) ??
       new Stop(

@@ -30,7 +30,7 @@ export async function startDatabase({ home, database, ending, throwAway = false 
   const settings = {
     ...remembered,
     databasePort: await freePort(remembered.databasePort),
-    ...(folder.startsWith(home) ? {} : { databaseFolder: folder }),
+    ...(folder === join(home, 'database') ? {} : { databaseFolder: folder }),
   };
   // Before the cluster: one whose passwords were never written down could not be opened again.
   writeSettings(home, settings);
@@ -43,7 +43,7 @@ export async function startDatabase({ home, database, ending, throwAway = false 
   }
   const cluster = await startCluster(options);
   ending.add(cluster.stop);
-  await makeDatabase({ port, settings, database, ownerMakesDatabases: throwAway });
+  await makeDatabase({ port, settings, database, folder, ownerMakesDatabases: throwAway });
   say(`database started on port ${port} of 127.0.0.1`);
   return { cluster, settings, urls: urlsOf(port, settings, database) };
 }

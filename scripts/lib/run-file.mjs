@@ -11,7 +11,7 @@ import { Stop } from './say.mjs';
  * Says that this command runs in the home, and that no other may; ends what a command that was
  * killed has left running.
  * @param {string} home @param {string} url
- * @returns {Promise<{ remember: (children: ProcessMark[]) => void, forget: () => void }>}
+ * @returns {Promise<{ remember: (pids: number[]) => void, forget: () => void }>}
  */
 export async function claimHome(home, url) {
   const file = join(home, 'run.json');
@@ -25,7 +25,10 @@ export async function claimHome(home, url) {
   }
   writeFileSync(file, JSON.stringify({ command, url, children: [] }));
   return {
-    remember: (children) => writeWhole(file, JSON.stringify({ command, url, children })),
+    remember: (pids) => {
+      const children = pids.map(markOf).filter((mark) => mark !== undefined);
+      writeWhole(file, JSON.stringify({ command, url, children }));
+    },
     forget: () => rmSync(file, { force: true }),
   };
 }

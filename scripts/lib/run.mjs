@@ -6,6 +6,7 @@ import { spawn } from 'node:child_process';
  * @property {NodeJS.ProcessEnv} [env]
  * @property {{ uid: number, gid: number }} [as] another user to run as; for root only
  * @property {'gather' | 'show' | 'errors'} [output] whether to gather it, show it, or show errors only
+ * @property {(pid: number) => void} [started] told of its process
  * @typedef {{ code: number, stdout: string, stderr: string }} Ran
  */
 
@@ -34,6 +35,7 @@ export function run(program, args, options = {}) {
       stdio: OUTPUTS[output],
     });
     underWay.add(child);
+    if (child.pid !== undefined) options.started?.(child.pid);
     let stdout = '';
     let stderr = '';
     child.stdout?.setEncoding('utf8').on('data', (text) => (stdout += text));
