@@ -1,0 +1,5 @@
+/** A page of a list; the token is the service's own. */
+export interface Page<T> {
+  readonly items: readonly T[];
+  readonly nextPageToken: string | null;
+}
