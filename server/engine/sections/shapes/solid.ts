@@ -1,0 +1,112 @@
+import { formula } from '../../formula/formula';
+import type { Sheet } from '../../formula/sheet';
+import { GEOMETRY, lengths } from './fillet';
+
+/** A solid rectangle in mm, h along z-z. */
+export interface RectangleDimensions {
+  readonly b: number;
+  readonly h: number;
+}
+
+/** A solid round in mm. */
+export interface RoundDimensions {
+  readonly d: number;
+}
+
+export const rectangleArea = formula({
+  symbol: 'A',
+  title: 'Area of a rectangle',
+  unit: 'mm^2',
+  clause: GEOMETRY,
+  expression: 'b * h',
+  where: lengths('b', 'h'),
+});
+
+export const rectangleInertiaY = formula({
+  symbol: 'I_y',
+  title: 'Second moment of area about y-y',
+  unit: 'mm^4',
+  clause: GEOMETRY,
+  expression: 'b * h^3 / 12',
+  where: lengths('b', 'h'),
+});
+
+export const rectangleInertiaZ = formula({
+  symbol: 'I_z',
+  title: 'Second moment of area about z-z',
+  unit: 'mm^4',
+  clause: GEOMETRY,
+  expression: 'h * b^3 / 12',
+  where: lengths('b', 'h'),
+});
+
+/** The series of St Venant for a rectangle, cut after its strongest term: within 0.5 % of it. */
+export const rectangleTorsionConstant = formula({
+  symbol: 'I_t',
+  title: 'Torsion constant of a rectangle',
+  unit: 'mm^4',
+  clause: 'Timoshenko and Goodier, torsion of a rectangular bar; from memory, unconfirmed',
+  expression:
+    'max(b, h) * min(b, h)^3 * (1 / 3 - 0.21 * min(b, h) / max(b, h) * (1 - min(b, h)^4 / (12 * max(b, h)^4)))',
+  where: lengths('b', 'h'),
+});
+
+export const roundArea = formula({
+  symbol: 'A',
+  title: 'Area of a round',
+  unit: 'mm^2',
+  clause: GEOMETRY,
+  expression: 'pi * d^2 / 4',
+  where: lengths('d'),
+});
+
+export const roundInertia = formula({
+  symbol: 'I_y',
+  title: 'Second moment of area of a round',
+  unit: 'mm^4',
+  clause: GEOMETRY,
+  expression: 'pi * d^4 / 64',
+  where: lengths('d'),
+});
+
+/** mm², mm³, mm⁴. */
+export interface SolidProperties {
+  readonly A: number;
+  readonly I_y: number;
+  readonly I_z: number;
+  readonly W_el_y: number;
+  readonly W_el_z: number;
+  readonly W_pl_y: number;
+  readonly W_pl_z: number;
+  readonly I_t: number;
+}
+
+export function rectangleProperties({ b, h }: RectangleDimensions, sheet: Sheet): SolidProperties {
+  const I_y = sheet.evaluate(rectangleInertiaY, { b, h });
+  const I_z = sheet.evaluate(rectangleInertiaZ, { b, h });
+  return {
+    A: sheet.evaluate(rectangleArea, { b, h }),
+    I_y,
+    I_z,
+    W_el_y: (2 * I_y) / h,
+    W_el_z: (2 * I_z) / b,
+    W_pl_y: (b * h ** 2) / 4,
+    W_pl_z: (h * b ** 2) / 4,
+    I_t: sheet.evaluate(rectangleTorsionConstant, { b, h }),
+  };
+}
+
+export function roundProperties({ d }: RoundDimensions, sheet: Sheet): SolidProperties {
+  const I_y = sheet.evaluate(roundInertia, { d });
+  const W_el_y = (2 * I_y) / d;
+  return {
+    A: sheet.evaluate(roundArea, { d }),
+    I_y,
+    I_z: I_y,
+    W_el_y,
+    W_el_z: W_el_y,
+    W_pl_y: d ** 3 / 6,
+    W_pl_z: d ** 3 / 6,
+    I_t: 2 * I_y,
+  };
+}
