@@ -100,7 +100,7 @@ function read(file) {
 
 /** Builds a project of angular.json into a folder. @param {string} project @param {string} folder */
 async function angular(project, folder) {
-  const args = ['build', project, '--output-path', folder, '--stats-json', '--no-progress'];
+  const args = ['build', project, '--output-path', folder, '--stats-json', '--progress', 'false'];
   const { code, stdout, stderr } = await run(join(root, 'node_modules/.bin/ng'), args, {
     cwd: root,
     env: { ...process.env, NG_CLI_ANALYTICS: 'false', NO_COLOR: '1', CI: '1' },

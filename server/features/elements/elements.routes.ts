@@ -18,7 +18,7 @@ const files: readonly (readonly [name: string, contentType: string, cache: strin
   ['fonts/headtree-mono-400.woff2', font, week],
   ['fonts/headtree-mono-600.woff2', font, week],
   ['fonts/headtree-math.woff2', font, week],
-  ['fonts/LICENSES.txt', text, week],
+  ['licenses.txt', text, week],
 ];
 
 /** Static files hold nothing of a caller: any page may load them. */

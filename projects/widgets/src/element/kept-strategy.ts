@@ -1,0 +1,116 @@
+import {
+  ApplicationRef,
+  createComponent,
+  type ComponentRef,
+  type Injector,
+  type OutputRef,
+  type Type,
+} from '@angular/core';
+import type {
+  NgElementStrategy,
+  NgElementStrategyEvent,
+  NgElementStrategyFactory,
+} from '@angular/elements';
+import type { ApiError, CheckAnswer } from '@headtree/checks';
+import { EMPTY, type Observable } from 'rxjs';
+import { linger, stay, type Lingering } from './lingering';
+
+/** What every check of the library offers to its element. */
+export interface CheckComponent {
+  readonly valueChange: OutputRef<object>;
+  readonly result: OutputRef<CheckAnswer>;
+  readonly failed: OutputRef<ApiError>;
+  check(): Promise<CheckAnswer | undefined>;
+  reset(): void;
+}
+
+/** What an element is told by its check. */
+export interface CheckListener {
+  /** Where the check is drawn. */
+  readonly place: Element;
+  onInput(value: object): void;
+  onResult(answer: CheckAnswer): void;
+  onFailed(error: ApiError): void;
+}
+
+/**
+ * Keeps the check of an element through moves. Angular's own strategy destroys it 10 ms after it
+ * left the page and forgets its inputs; this one lets it linger, and makes it anew with the same
+ * inputs when the element comes back even later.
+ */
+export class KeptStrategy implements NgElementStrategy, Lingering {
+  /** The element sends its events itself, so that they bubble. */
+  readonly events: Observable<NgElementStrategyEvent> = EMPTY;
+  private readonly inputs = new Map<string, unknown>();
+  private made: ComponentRef<CheckComponent> | undefined;
+  private listener: CheckListener | undefined;
+
+  constructor(
+    private readonly component: Type<CheckComponent>,
+    private readonly injector: Injector,
+  ) {}
+
+  /** Before anything is drawn. */
+  listen(listener: CheckListener): void {
+    this.listener = listener;
+  }
+
+  connect(): void {
+    stay(this);
+    this.instance();
+  }
+
+  disconnect(): void {
+    if (this.made) linger(this);
+  }
+
+  /** The check itself, made when it is first asked for. */
+  instance(): CheckComponent {
+    return (this.made ??= this.make()).instance;
+  }
+
+  /** Out of the page for long: only what was put in is kept. */
+  end(): void {
+    this.made?.destroy();
+    this.made = undefined;
+  }
+
+  getInputValue(name: string): unknown {
+    return this.inputs.get(name);
+  }
+
+  setInputValue(name: string, value: unknown): void {
+    this.inputs.set(name, value);
+    this.made?.setInput(name, value);
+  }
+
+  private make(): ComponentRef<CheckComponent> {
+    const { listener } = this;
+    if (!listener) throw new Error('A check needs its element.');
+    const application = this.injector.get(ApplicationRef);
+    const made = createComponent(this.component, {
+      environmentInjector: application.injector,
+      hostElement: listener.place,
+    });
+    for (const [name, value] of this.inputs) made.setInput(name, value);
+    const { valueChange, result, failed } = made.instance;
+    valueChange.subscribe((value) => {
+      this.inputs.set('value', value);
+      listener.onInput(value);
+    });
+    result.subscribe((answer) => listener.onResult(answer));
+    failed.subscribe((error) => listener.onFailed(error));
+    application.attachView(made.hostView);
+    made.changeDetectorRef.detectChanges();
+    return made;
+  }
+}
+
+/** Gives each element a strategy of its own. */
+export class KeptStrategyFactory implements NgElementStrategyFactory {
+  constructor(private readonly component: Type<CheckComponent>) {}
+
+  create(injector: Injector): KeptStrategy {
+    return new KeptStrategy(this.component, injector);
+  }
+}
