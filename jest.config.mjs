@@ -24,7 +24,13 @@ const library = {
 export default {
   projects: [
     { ...shared, displayName: 'unit', testMatch: ['<rootDir>/{server,db,openapi}/**/*.spec.ts'] },
-    { ...shared, displayName: 'service', testMatch: ['<rootDir>/test/**/*.spec.ts'] },
+    {
+      ...shared,
+      displayName: 'service',
+      testMatch: ['<rootDir>/test/**/*.spec.ts'],
+      testPathIgnorePatterns: ['/node_modules/', '<rootDir>/test/browser/'],
+    },
+    { ...shared, displayName: 'browser', testMatch: ['<rootDir>/test/browser/**/*.spec.ts'] },
     library,
   ],
 };

@@ -1,6 +1,7 @@
 /** `npm start`: makes what is missing, starts the database, the API and the worker, stops them. */
 import { join } from 'node:path';
 import { build, output } from './lib/build.mjs';
+import { buildWeb } from './lib/build-web.mjs';
 import { makeEnding } from './lib/ending.mjs';
 import { explain, textOf } from './lib/explain.mjs';
 import { makeHome, root, writeSettings } from './lib/home.mjs';
@@ -36,6 +37,9 @@ async function launch() {
   const { urls, settings, cluster } = database;
   const { demoKey } = await prepare(urls, settings && { key: settings.demoKey });
   if (settings && demoKey !== undefined) writeSettings(home, { ...settings, demoKey });
+  ending.check();
+  // Callers of the API are served all the same: the pages answer that they are not built.
+  await buildWeb().catch((error) => say(textOf(error)));
   ending.check();
 
   const env = serviceEnvironment(urls, {

@@ -2,9 +2,11 @@
  * `npm test`: lint, types, contract and every spec, on a database of its own that is thrown away.
  * `npm test -- waler` runs only the specs whose path holds that word. The last line counts.
  */
-import { readFileSync, rmSync } from 'node:fs';
+import { readdirSync, readFileSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
+import { findBrowser } from './lib/browser.mjs';
 import { build } from './lib/build.mjs';
+import { buildWeb } from './lib/build-web.mjs';
 import { makeEnding } from './lib/ending.mjs';
 import { explain, textOf } from './lib/explain.mjs';
 import { root } from './lib/home.mjs';
@@ -28,6 +30,9 @@ async function test(only) {
   await ensurePackages(root, join(home, 'logs/npm.log'));
   ending.check();
   await build();
+  const browser = meetsBrowser(only) ? await findBrowser() : undefined;
+  if (browser !== undefined) await buildWeb();
+  ending.check();
   const { urls } = await startDatabase({
     home,
     database: 'headtree_template',
@@ -44,7 +49,10 @@ async function test(only) {
     program('types of scripts', 'tsc', ['--noEmit', '-p', 'scripts/tsconfig.json']),
     { name: 'contract', run: checkContract },
   ];
-  const specs = { name: 'specs', run: () => jest(urls, join(home, 'jest.json'), only) };
+  const specs = {
+    name: 'specs',
+    run: () => jest({ urls, browser, results: join(home, 'jest.json') }, only),
+  };
   const total = { passed: 0, failed: 0 };
   const failures = [];
   for (const step of only.length > 0 ? [specs] : [...checks, specs]) {
@@ -77,10 +85,20 @@ async function checkContract() {
   return problems.length === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 };
 }
 
+/** Whether a spec that drives a browser is among those that run. @param {readonly string[]} only */
+function meetsBrowser(only) {
+  const folder = 'test/browser';
+  const specs = readdirSync(join(root, folder)).filter((name) => name.endsWith('.spec.ts'));
+  return only.length === 0
+    ? specs.length > 0
+    : specs.some((name) => only.some((word) => `${folder}/${name}`.includes(word)));
+}
+
 /**
- * @param {import('./lib/database.mjs').Urls} urls @param {string} results @param {readonly string[]} only
+ * @param {{ urls: import('./lib/database.mjs').Urls, browser: string | undefined, results: string }} given
+ * @param {readonly string[]} only
  */
-async function jest(urls, results, only) {
+async function jest({ urls, browser, results }, only) {
   const { code } = await run(
     bin('jest'),
     [
@@ -91,7 +109,11 @@ async function jest(urls, results, only) {
       '--passWithNoTests',
       ...only,
     ],
-    { cwd: root, output: 'errors', env: serviceEnvironment(urls, { NODE_ENV: 'test' }) },
+    {
+      cwd: root,
+      output: 'errors',
+      env: serviceEnvironment(urls, { NODE_ENV: 'test', HEADTREE_BROWSER: browser }),
+    },
   );
   try {
     const { numPassedTests, numFailedTests, numRuntimeErrorTestSuites } = JSON.parse(
