@@ -97,4 +97,8 @@ export default tseslint.config(
       },
     },
   },
+  {
+    files: ['examples/**/*.js'],
+    languageOptions: { globals: { document: 'readonly' } },
+  },
 );
