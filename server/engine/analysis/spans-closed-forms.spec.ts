@@ -154,6 +154,8 @@ describe('the supports of a member without overhangs', () => {
     const [first, last] = supportValues(span([uniform(20)]).state);
     expect(first).toMatchObject({ left: { V: 0, M: 0 }, deflection: 0 });
     expect(last).toMatchObject({ right: { V: 0, M: 0 }, deflection: 0 });
+    const odd = span([trapezoid(4.1, 13.7), point(2.3e4, 1234)]).state;
+    expect([...odd.supportDeflections]).toEqual([0, 0]);
     exact(first!.right.V, 10 * L);
     exact(last!.left.V, -10 * L);
   });
