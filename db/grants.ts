@@ -18,6 +18,8 @@ const GRANTS: readonly (readonly [rights: string, table: string])[] = [
   ['select', 'usage_hourly'],
   ['select, insert, update, delete', 'rate_counts'],
   ['select, insert', 'audit_events'],
+  ['select, update (last_sign_in)', 'users'],
+  ['select, insert, update, delete', 'sessions'],
   ['select', 'schema_migrations'],
 ];
 

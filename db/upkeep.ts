@@ -3,11 +3,13 @@ import { tryWithLock } from './lock';
 import { makePartitions } from './partitions';
 import { forgetRateCounts } from './rate-counts';
 import { rollUpHours } from './rollup';
+import { forgetSessions } from './sessions';
 
 export interface UpkeepDone {
   readonly partitionsMade: readonly string[];
   readonly hoursRolledUp: number;
   readonly rateCountsForgotten: number;
+  readonly sessionsForgotten: number;
 }
 
 export interface UpkeepOptions {
@@ -29,6 +31,7 @@ export function upkeepOnce(owner: Sequelize, ownerUrl: string): Promise<UpkeepDo
     partitionsMade: await makePartitions(owner),
     hoursRolledUp: await rollUpHours(owner),
     rateCountsForgotten: await forgetRateCounts(owner),
+    sessionsForgotten: await forgetSessions(owner),
   }));
 }
 

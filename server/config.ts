@@ -15,6 +15,10 @@ export interface Config {
   /** Connection of the owner role; only the worker and the migrations are given it. */
   readonly databaseOwnerUrl: string | undefined;
   readonly log: LogLevel;
+  /** Address that people open, where it is not host and port: `https://headtree.firm.example`. */
+  readonly publicUrl: URL | undefined;
+  /** Signs the cookies of sessions; the same for every process over one database. */
+  readonly sessionSecret: string | undefined;
 }
 
 /** Every setting that cannot be used, one line each; its message is fit to print as it is. */
@@ -53,6 +57,8 @@ export function readConfig(environment: Environment = process.env): Config {
     databaseUrl: databaseUrl ?? '',
     databaseOwnerUrl: readUrl('HEADTREE_DATABASE_OWNER_URL'),
     log: readLog(),
+    publicUrl: readPublicUrl(),
+    sessionSecret: readSecret(),
   };
   if (problems.length > 0) throw new SettingsProblem(problems);
   return config;
@@ -72,6 +78,23 @@ export function readConfig(environment: Environment = process.env): Config {
     const level = LOG_LEVELS.find((known) => known === given);
     if (!level) problems.push(`HEADTREE_LOG is "${given}": it must be ${LOG_LEVELS.join(', ')}.`);
     return level ?? 'info';
+  }
+
+  function readPublicUrl(): URL | undefined {
+    const given = text('HEADTREE_PUBLIC_URL');
+    if (given === undefined) return undefined;
+    const url = URL.canParse(given) ? new URL(given) : undefined;
+    if (url && /^https?:$/.test(url.protocol) && url.pathname === '/') return url;
+    problems.push(`HEADTREE_PUBLIC_URL is "${given}": it must read https://host or http://host.`);
+    return undefined;
+  }
+
+  // Nor is a secret ever repeated.
+  function readSecret(): string | undefined {
+    const given = text('HEADTREE_SESSION_SECRET');
+    if (given !== undefined && given.length < 32)
+      problems.push('HEADTREE_SESSION_SECRET is too short: it must have at least 32 characters.');
+    return given;
   }
 
   // The value itself stays out of the message: it holds a password.

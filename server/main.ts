@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import { createServer } from 'node:http';
 import { join } from 'node:path';
 import pino from 'pino';
@@ -8,6 +9,7 @@ import { checks } from './engine/checks/registry';
 import { checkPool } from './features/checks/check-pool';
 import { readinessOf } from './features/health/readiness';
 import { DatabaseKeyStore } from './features/keys/key-store';
+import { passwordPool } from './features/people/password-pool';
 import { DatabaseProfileStore } from './features/profiles/profile-store';
 import { UsageLog } from './features/usage/usage-log';
 import { DatabaseChangeFeed } from './middleware/change-feed';
@@ -25,17 +27,27 @@ async function main(): Promise<void> {
   const feed = new DatabaseChangeFeed({ url, onGap: warn });
   const usage = new UsageLog(pool);
   const apart = checkPool(join(__dirname, 'check-thread.js'));
+  const passwords = passwordPool(join(__dirname, 'password-thread.js'));
+  if (config.sessionSecret === undefined)
+    logger.warn('HEADTREE_SESSION_SECRET is not set: sessions end with this process.');
   const app = createApp({
     checks,
     validate: validateRequest,
     runApart: apart.run,
     pool,
+    sequelize,
     keyStore: new DatabaseKeyStore(sequelize),
     profileStore: new DatabaseProfileStore(),
     feed,
     usage,
     readiness: readinessOf(sequelize, feed),
     logger,
+    matchPassword: passwords.match,
+    session: {
+      secret: config.sessionSecret ?? randomBytes(32).toString('base64url'),
+      secure: config.publicUrl?.protocol === 'https:',
+    },
+    consoleFolder: join(__dirname, '../console'),
   });
   await feed.start();
 
@@ -55,7 +67,7 @@ async function main(): Promise<void> {
   const stop = (): void => {
     logger.info('stopping');
     server.close(() => {
-      void Promise.allSettled([usage.close(), feed.close(), apart.close()])
+      void Promise.allSettled([usage.close(), feed.close(), apart.close(), passwords.close()])
         .then(() => Promise.allSettled([pool.end(), sequelize.close()]))
         .then(() => process.exit(0));
     });

@@ -7,6 +7,7 @@ import { initProfileRevision, ProfileRevisionRow } from './profile-revision';
 import { initRateCount, RateCount } from './rate-count';
 import { initUsageEvent, UsageEvent } from './usage-event';
 import { initUsageHour, UsageHour } from './usage-hour';
+import { initUser, User } from './user';
 
 export {
   ApiKey,
@@ -17,6 +18,7 @@ export {
   RateCount,
   UsageEvent,
   UsageHour,
+  User,
 };
 export type { KeyKind } from './api-key';
 export type { UsagePhase } from './usage-event';
@@ -31,4 +33,5 @@ export function initModels(sequelize: Sequelize): void {
   initUsageHour(sequelize);
   initRateCount(sequelize);
   initAuditEvent(sequelize);
+  initUser(sequelize);
 }

@@ -22,6 +22,8 @@ export class UsageEvent extends Model<
   declare clientId: CreationOptional<string | null>;
   declare keyId: CreationOptional<string | null>;
   declare keySelector: CreationOptional<string | null>;
+  /** Who was signed in; null for a call with a key. */
+  declare personId: CreationOptional<string | null>;
   declare method: string;
   declare route: string;
   declare checkId: CreationOptional<string | null>;
@@ -51,6 +53,7 @@ export function initUsageEvent(sequelize: Sequelize): void {
       clientId: { type: DataTypes.UUID },
       keyId: { type: DataTypes.UUID },
       keySelector: { type: DataTypes.TEXT },
+      personId: { type: DataTypes.UUID },
       method: { type: DataTypes.TEXT, allowNull: false },
       route: { type: DataTypes.TEXT, allowNull: false },
       checkId: { type: DataTypes.TEXT },

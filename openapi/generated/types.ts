@@ -260,6 +260,46 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/v1/sections": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the sections
+         * @description Those that begin as searched, in any spelling, then those that hold it. An answer that has not changed is a 304 and counts against no limit.
+         */
+        readonly get: operations["listSections"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/sections/{designation}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a section
+         * @description Its dimensions, and its properties as computed from them. Any spelling will do.
+         */
+        readonly get: operations["readSection"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/v1/batch": {
         readonly parameters: {
             readonly query?: never;
@@ -554,6 +594,126 @@ export interface paths {
         readonly get: operations["readUsage"];
         readonly put?: never;
         readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/session": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Ask who is signed in
+         * @description Also what they may do, and the token that every change carries. Nobody signed in is an answer, too.
+         */
+        readonly get: operations["readSession"];
+        readonly put?: never;
+        /**
+         * Sign in
+         * @description Sets the cookie of a session. Unknown people and wrong passwords get the same answer after the same time; ten failures in a quarter of an hour are all that one address has at one account.
+         */
+        readonly post: operations["signIn"];
+        /**
+         * Sign out
+         * @description Ends the session, here and in the database. Done twice it answers the same.
+         */
+        readonly delete: operations["signOut"];
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/clients": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the clients
+         * @description The tools that call the service, by name. Needs the permission `clients:read`.
+         */
+        readonly get: operations["listClients"];
+        readonly put?: never;
+        /**
+         * Make a client
+         * @description Needs the permission `clients:write`.
+         */
+        readonly post: operations["makeClient"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/clients/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a client
+         * @description Needs the permission `clients:read`.
+         */
+        readonly get: operations["readClient"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        /**
+         * Change a client
+         * @description Needs the permission `clients:write`. Out of use, none of its keys opens, within moments.
+         */
+        readonly patch: operations["changeClient"];
+        readonly trace?: never;
+    };
+    readonly "/v1/clients/{id}/keys": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the keys of a client
+         * @description Never more than the public part of each. Needs the permission `keys:read`.
+         */
+        readonly get: operations["listKeys"];
+        readonly put?: never;
+        /**
+         * Issue a key
+         * @description The answer holds the text of the key: this once, never again. Needs the permission `keys:write`.
+         */
+        readonly post: operations["issueKey"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/v1/keys/{selector}/revoke": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Revoke a key
+         * @description For good. No call with it begins more than two seconds later, and as a rule none after milliseconds. Needs the permission `keys:write`.
+         */
+        readonly post: operations["revokeKey"];
         readonly delete?: never;
         readonly options?: never;
         readonly head?: never;
@@ -2270,6 +2430,68 @@ export interface components {
                 readonly [key: string]: unknown;
             };
         };
+        /** Dimensions of a section */
+        readonly SectionDimensions: {
+            /** @description Depth. */
+            readonly h: components["schemas"]["Quantity"];
+            /** @description Width. */
+            readonly b: components["schemas"]["Quantity"];
+            /** @description Thickness of the web. */
+            readonly tw: components["schemas"]["Quantity"];
+            /** @description Thickness of the flange. */
+            readonly tf: components["schemas"]["Quantity"];
+            /** @description Radius of the root. */
+            readonly r: components["schemas"]["Quantity"];
+        };
+        /**
+         * Properties of a section
+         * @description Computed from the dimensions, of one member, gross.
+         */
+        readonly SectionPropertyValues: {
+            /** @description Area. */
+            readonly A: components["schemas"]["Quantity"];
+            /** @description Second moment of area about y-y. */
+            readonly Iy: components["schemas"]["Quantity"];
+            /** @description Second moment of area about z-z. */
+            readonly Iz: components["schemas"]["Quantity"];
+            /** @description Elastic modulus about y-y. */
+            readonly Wely: components["schemas"]["Quantity"];
+            /** @description Elastic modulus about z-z. */
+            readonly Welz: components["schemas"]["Quantity"];
+            /** @description Plastic modulus about y-y. */
+            readonly Wply: components["schemas"]["Quantity"];
+            /** @description Plastic modulus about z-z. */
+            readonly Wplz: components["schemas"]["Quantity"];
+            /** @description Radius of gyration about y-y. */
+            readonly iy: components["schemas"]["Quantity"];
+            /** @description Radius of gyration about z-z. */
+            readonly iz: components["schemas"]["Quantity"];
+            /** @description St Venant torsion constant. */
+            readonly It: components["schemas"]["Quantity"];
+            /** @description Warping constant. */
+            readonly Iw: components["schemas"]["Quantity"];
+        };
+        /** A section of the catalogue */
+        readonly SectionFacts: {
+            /** @description As a request names it. */
+            readonly designation: string;
+            readonly family: string;
+            /** @enum {string} */
+            readonly shape: "I";
+            /** @enum {string} */
+            readonly fabrication: "rolled" | "welded";
+            /** @description Where the dimensions come from. */
+            readonly source: string;
+            /** @description Per length, as published; `null` where none is. */
+            readonly mass: components["schemas"]["Quantity"] | null;
+            readonly dimensions: components["schemas"]["SectionDimensions"];
+            readonly properties: components["schemas"]["SectionPropertyValues"];
+        };
+        /** A page of the sections */
+        readonly SectionList: {
+            readonly items: readonly components["schemas"]["SectionFacts"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
         /** One check of a batch */
         readonly BatchItem: {
             /** @description The caller's own, unique in the batch. */
@@ -2774,9 +2996,15 @@ export interface components {
              */
             readonly phase: "whole" | "start" | "end";
             readonly clientId: string | null;
+            /** @description As it is called today. */
+            readonly clientName: string | null;
             readonly keyId: string | null;
             /** @description The public part of the key. */
             readonly keySelector: string | null;
+            /** @description Who was signed in; `null` for a call with a key. */
+            readonly personId: string | null;
+            /** @description As they are called today. */
+            readonly personName: string | null;
             readonly method: string;
             readonly route: string;
             readonly checkId: string | null;
@@ -2805,6 +3033,166 @@ export interface components {
             /** @description Newest first. */
             readonly items: readonly components["schemas"]["UsageEvent"][];
             readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
+        /**
+         * @description What a person is to the firm.
+         * @enum {string}
+         */
+        readonly Role: "admin" | "lead" | "engineer" | "checker" | "developer";
+        /** A person */
+        readonly PersonFacts: {
+            readonly id: string;
+            readonly email: string;
+            readonly name: string;
+            readonly roles: readonly components["schemas"]["Role"][];
+        };
+        /**
+         * @description What a person may do; the roles give it.
+         * @enum {string}
+         */
+        readonly Permission: "catalogue:read" | "checks:run" | "profiles:read" | "clients:read" | "clients:write" | "keys:read" | "keys:write" | "usage:read";
+        /** Who is signed in */
+        readonly SessionState: {
+            /** @description `null`: nobody is signed in. */
+            readonly person: components["schemas"]["PersonFacts"] | null;
+            readonly permissions: readonly components["schemas"]["Permission"][];
+            /** @description Goes into the header X-CSRF-Token of every change; `null` before the sign-in. */
+            readonly csrfToken: string | null;
+        };
+        /** A sign-in */
+        readonly SessionRequest: {
+            /**
+             * @description The person's email; capitals do not matter.
+             * @example admin@saltmarsh.example
+             */
+            readonly email: string;
+            /**
+             * Format: password
+             * @description The password; one of more than 72 bytes is nobody's.
+             */
+            readonly password: string;
+        };
+        /** A client */
+        readonly ClientFacts: {
+            readonly id: string;
+            readonly name: string;
+            readonly defaultProfile: string | null;
+            readonly pins: readonly string[];
+            readonly createdAt: string;
+            /** @description When it was taken out of use; `null`: it is in use. */
+            readonly disabledAt: string | null;
+            /** @description Keys that are neither revoked nor expired. */
+            readonly liveKeys: number;
+        };
+        /** A page of the clients */
+        readonly ClientList: {
+            /** @description By name. */
+            readonly items: readonly components["schemas"]["ClientFacts"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
+        /** A client to be made */
+        readonly ClientRequest: {
+            /**
+             * @description What the tool is called in the log. No two clients share it.
+             * @example Waler schedule workbook
+             */
+            readonly name: string;
+            /**
+             * @description Factor profile of requests that name none; `null`: each has to name one. Default `null`.
+             * @example uk-na
+             */
+            readonly defaultProfile?: string | null;
+            /** @description Revisions that the client is held at when a request names the profile alone. */
+            readonly pins?: readonly string[];
+        };
+        /**
+         * What changes of a client
+         * @description What is left out stays as it is.
+         */
+        readonly ClientChange: {
+            /**
+             * @description What the tool is called in the log. No two clients share it.
+             * @example Waler schedule workbook
+             */
+            readonly name?: string;
+            /**
+             * @description Factor profile of requests that name none; `null`: each has to name one. Default `null`.
+             * @example uk-na
+             */
+            readonly defaultProfile?: string | null;
+            /** @description Revisions that the client is held at when a request names the profile alone. */
+            readonly pins?: readonly string[];
+            /** @description Out of use, no key of the client opens; back in use, those not revoked open again. */
+            readonly disabled?: boolean;
+        };
+        /**
+         * @description What a key may do. `usage` is an administrator's.
+         * @enum {string}
+         */
+        readonly Scope: "checks" | "catalogue" | "usage";
+        /** A key, without its secret */
+        readonly KeyFacts: {
+            /** @description The public part; it names the key in lists and in the log. */
+            readonly selector: string;
+            readonly clientId: string;
+            /** @enum {string} */
+            readonly kind: "secret" | "page" | "cell";
+            readonly label: string;
+            readonly scopes: readonly components["schemas"]["Scope"][];
+            readonly origins: readonly string[];
+            /** @description `null`: all. */
+            readonly profiles: readonly string[] | null;
+            /** @description Calls a minute; `null`: the limit of the service. */
+            readonly rateLimit: number | null;
+            readonly createdAt: string;
+            readonly expiresAt: string | null;
+            readonly revokedAt: string | null;
+            /** @description A day. */
+            readonly lastUsedOn: string | null;
+            /**
+             * @description Whether it opens.
+             * @enum {string}
+             */
+            readonly state: "live" | "expired" | "revoked";
+        };
+        /** A page of the keys of a client */
+        readonly KeyList: {
+            /** @description Newest first. */
+            readonly items: readonly components["schemas"]["KeyFacts"][];
+            readonly nextPageToken: components["schemas"]["NextPageToken"];
+        };
+        /**
+         * @description `secret` for servers and scripts, `page` for pages in a browser.
+         * @enum {string}
+         */
+        readonly KeyKindToIssue: "secret" | "page";
+        /** A key to be issued */
+        readonly KeyRequest: {
+            readonly kind: components["schemas"]["KeyKindToIssue"];
+            /**
+             * @description What the key is for, for those who manage it.
+             * @example Site office workbook
+             */
+            readonly label: string;
+            /** @description What it may do; a page key never `usage`. Default `checks` and `catalogue`. */
+            readonly scopes?: readonly components["schemas"]["Scope"][];
+            /** @description Pages that may use a page key, at least one: scheme, host and port as a browser sends them, compared exactly. A secret key has none. */
+            readonly origins?: readonly string[];
+            /** @description Factor profiles that it may use; `null`: all. Default `null`. */
+            readonly profiles?: readonly string[] | null;
+            /** @description Calls a minute; `null`: the limit of the service. Default `null`. */
+            readonly rateLimit?: number | null;
+            /**
+             * @description When it ends: date and time with its offset; `null`: not by itself. Default `null`.
+             * @example 2027-01-31T18:00:00Z
+             */
+            readonly expiresAt?: string | null;
+        };
+        /** A key with its text */
+        readonly IssuedKey: {
+            readonly key: components["schemas"]["KeyFacts"];
+            /** @description The key itself. It is told this once and stored nowhere. */
+            readonly text: string;
         };
         /** An OpenAPI 3.1 document */
         readonly OpenApiDocument: {
@@ -3149,6 +3537,126 @@ export interface components {
                 readonly "application/problem+json": components["schemas"]["Problem"];
             };
         };
+        /** @description The caller has the answer already. */
+        readonly NotModified: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly ETag: components["headers"]["ETag"];
+                readonly "Cache-Control": components["headers"]["CacheControl"];
+                readonly [name: string]: unknown;
+            };
+            content?: never;
+        };
+        /** @description The email and the password do not belong together, or the person is out of use. */
+        readonly SignInRefused: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly "WWW-Authenticate": components["headers"]["WwwAuthenticate"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/sign-in-refused",
+                 *       "title": "The sign-in is refused",
+                 *       "status": 401,
+                 *       "detail": "The email and the password do not belong together.",
+                 *       "instance": "/v1/session",
+                 *       "code": "sign-in-refused",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description No role of the person allows it, the session's token is missing, or a page of another site asks. */
+        readonly NotPermitted: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/permission-missing",
+                 *       "title": "Your roles do not allow it",
+                 *       "status": 403,
+                 *       "detail": "None of your roles has the permission \"clients:write\".",
+                 *       "instance": "/v1/clients",
+                 *       "code": "permission-missing",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description Nobody is signed in, or the session has ended. */
+        readonly SessionRefused: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly "WWW-Authenticate": components["headers"]["WwwAuthenticate"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/sign-in-required",
+                 *       "title": "Nobody is signed in",
+                 *       "status": 401,
+                 *       "detail": "Nobody is signed in. A key does not do here.",
+                 *       "instance": "/v1/clients",
+                 *       "code": "sign-in-required",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": []
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
+        /** @description The name is taken, or the client is out of use. */
+        readonly Conflict: {
+            headers: {
+                readonly "X-Request-Id": components["headers"]["XRequestId"];
+                readonly RateLimit: components["headers"]["RateLimit"];
+                readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                readonly [name: string]: unknown;
+            };
+            content: {
+                /**
+                 * @example {
+                 *       "type": "/problems/name-taken",
+                 *       "title": "The name is taken",
+                 *       "status": 409,
+                 *       "detail": "There is a client \"Waler schedule workbook\" already.",
+                 *       "instance": "/v1/clients",
+                 *       "code": "name-taken",
+                 *       "requestId": "01K4QZ6T3M8V5W2C7R9B0N1XJD",
+                 *       "retryable": false,
+                 *       "errors": [
+                 *         {
+                 *           "pointer": "/name",
+                 *           "code": "taken",
+                 *           "message": "There is a client \"Waler schedule workbook\" already."
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                readonly "application/problem+json": components["schemas"]["Problem"];
+            };
+        };
     };
     parameters: {
         /** @description The caller's own id of the call; it is kept in the log as a label. */
@@ -3167,10 +3675,40 @@ export interface components {
          * @example uk-na
          */
         readonly ProfileInPath: string;
+        /**
+         * @description Part of a designation in any spelling, such as `457 191`, `ub457` or `HE 200 B`.
+         * @example 457x191
+         */
+        readonly SectionSearch: string;
+        /**
+         * @description Only sections of this family.
+         * @example UB
+         */
+        readonly SectionFamily: string;
+        /** @description How many to a page. */
+        readonly PageSize: number;
+        /** @description `nextPageToken` of the page before. Default the first page. */
+        readonly PageToken: string;
+        /** @description ETag of the answer that the caller has. */
+        readonly IfNoneMatch: string;
+        /**
+         * @description A section's designation in any spelling.
+         * @example UB 457x191x67
+         */
+        readonly DesignationInPath: string;
         /** @description `full` shows the working of every item; `summary` gathers none, and is quicker. Default `summary`. */
         readonly BatchDetail: "full" | "summary";
-        /** @description Only calls of this client, by its id. */
+        /** @description Only calls of this client, by its id, or of those whose name holds this text. */
         readonly UsageClient: string;
+        /** @description Only calls with this key, by its public part. */
+        readonly UsageKey: string;
+        /** @description Only calls of this person, by the id. */
+        readonly UsagePerson: string;
+        /**
+         * @description Only calls under this factor profile, or this revision of it.
+         * @example uk-na@1
+         */
+        readonly UsageProfile: string;
         /** @description Only calls of this check. */
         readonly UsageCheck: components["schemas"]["CheckId"];
         /** @description Only calls answered with this HTTP status. */
@@ -3187,15 +3725,23 @@ export interface components {
          * @example 2026-02-01
          */
         readonly UsageTo: string;
-        /** @description How many to a page. */
-        readonly PageSize: number;
-        /** @description `nextPageToken` of the page before. Default the first page. */
-        readonly PageToken: string;
         /**
          * @description X-Request-Id of the answer.
          * @example 01K4QZ6T3M8V5W2C7R9B0N1XJD
          */
         readonly RequestIdInPath: string;
+        /** @description The session's `csrfToken`. */
+        readonly CsrfToken: string;
+        /**
+         * @description A client's `id`.
+         * @example 5a17c0de-0001-4000-8000-000000000003
+         */
+        readonly ClientIdInPath: string;
+        /**
+         * @description The public part of a key.
+         * @example 4Fq9ZtR2mLx7
+         */
+        readonly SelectorInPath: string;
         /**
          * @description A problem's `code`.
          * @example not-valid
@@ -3234,6 +3780,21 @@ export interface components {
          * @example private, max-age=31536000, immutable
          */
         readonly CacheControl: string;
+        /**
+         * @description Changes when the answer does; goes into If-None-Match.
+         * @example "pK3mN0xv2dQ8sT5hRjZL4w"
+         */
+        readonly ETag: string;
+        /**
+         * @description The cookie of the session; no script can read it.
+         * @example headtree=s%3A…; Path=/; HttpOnly; SameSite=Lax
+         */
+        readonly SetCookie: string;
+        /**
+         * @description Where it is.
+         * @example /v1/clients/5a17c0de-0001-4000-8000-000000000003
+         */
+        readonly Location: string;
     };
     pathItems: never;
 }
@@ -3774,6 +4335,269 @@ export interface operations {
             readonly 503: components["responses"]["Away"];
         };
     };
+    readonly listSections: {
+        readonly parameters: {
+            readonly query?: {
+                /**
+                 * @description Part of a designation in any spelling, such as `457 191`, `ub457` or `HE 200 B`.
+                 * @example 457x191
+                 */
+                readonly search?: components["parameters"]["SectionSearch"];
+                /**
+                 * @description Only sections of this family.
+                 * @example UB
+                 */
+                readonly family?: components["parameters"]["SectionFamily"];
+                /** @description How many to a page. */
+                readonly pageSize?: components["parameters"]["PageSize"];
+                /** @description `nextPageToken` of the page before. Default the first page. */
+                readonly pageToken?: components["parameters"]["PageToken"];
+            };
+            readonly header?: {
+                /** @description ETag of the answer that the caller has. */
+                readonly "If-None-Match"?: components["parameters"]["IfNoneMatch"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page of the sections. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly ETag: components["headers"]["ETag"];
+                    readonly "Cache-Control": components["headers"]["CacheControl"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "items": [
+                     *         {
+                     *           "designation": "UB 457x191x67",
+                     *           "family": "UB",
+                     *           "shape": "I",
+                     *           "fabrication": "rolled",
+                     *           "source": "EN 10365:2017",
+                     *           "mass": {
+                     *             "value": 67.1,
+                     *             "unit": "kg/m"
+                     *           },
+                     *           "dimensions": {
+                     *             "h": {
+                     *               "value": 453.4,
+                     *               "unit": "mm"
+                     *             },
+                     *             "b": {
+                     *               "value": 189.9,
+                     *               "unit": "mm"
+                     *             },
+                     *             "tw": {
+                     *               "value": 8.5,
+                     *               "unit": "mm"
+                     *             },
+                     *             "tf": {
+                     *               "value": 12.7,
+                     *               "unit": "mm"
+                     *             },
+                     *             "r": {
+                     *               "value": 10.2,
+                     *               "unit": "mm"
+                     *             }
+                     *           },
+                     *           "properties": {
+                     *             "A": {
+                     *               "value": 8552.5,
+                     *               "unit": "mm^2"
+                     *             },
+                     *             "Iy": {
+                     *               "value": 293792000,
+                     *               "unit": "mm^4"
+                     *             },
+                     *             "Iz": {
+                     *               "value": 14517000,
+                     *               "unit": "mm^4"
+                     *             },
+                     *             "Wely": {
+                     *               "value": 1295950,
+                     *               "unit": "mm^3"
+                     *             },
+                     *             "Welz": {
+                     *               "value": 152890,
+                     *               "unit": "mm^3"
+                     *             },
+                     *             "Wply": {
+                     *               "value": 1471000,
+                     *               "unit": "mm^3"
+                     *             },
+                     *             "Wplz": {
+                     *               "value": 237350,
+                     *               "unit": "mm^3"
+                     *             },
+                     *             "iy": {
+                     *               "value": 185.3,
+                     *               "unit": "mm"
+                     *             },
+                     *             "iz": {
+                     *               "value": 41.2,
+                     *               "unit": "mm"
+                     *             },
+                     *             "It": {
+                     *               "value": 371300,
+                     *               "unit": "mm^4"
+                     *             },
+                     *             "Iw": {
+                     *               "value": 704800000000,
+                     *               "unit": "mm^6"
+                     *             }
+                     *           }
+                     *         }
+                     *       ],
+                     *       "nextPageToken": null
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["SectionList"];
+                };
+            };
+            readonly 304: components["responses"]["NotModified"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readSection: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description ETag of the answer that the caller has. */
+                readonly "If-None-Match"?: components["parameters"]["IfNoneMatch"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description A section's designation in any spelling.
+                 * @example UB 457x191x67
+                 */
+                readonly designation: components["parameters"]["DesignationInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The section. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly ETag: components["headers"]["ETag"];
+                    readonly "Cache-Control": components["headers"]["CacheControl"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "designation": "UB 457x191x67",
+                     *       "family": "UB",
+                     *       "shape": "I",
+                     *       "fabrication": "rolled",
+                     *       "source": "EN 10365:2017",
+                     *       "mass": {
+                     *         "value": 67.1,
+                     *         "unit": "kg/m"
+                     *       },
+                     *       "dimensions": {
+                     *         "h": {
+                     *           "value": 453.4,
+                     *           "unit": "mm"
+                     *         },
+                     *         "b": {
+                     *           "value": 189.9,
+                     *           "unit": "mm"
+                     *         },
+                     *         "tw": {
+                     *           "value": 8.5,
+                     *           "unit": "mm"
+                     *         },
+                     *         "tf": {
+                     *           "value": 12.7,
+                     *           "unit": "mm"
+                     *         },
+                     *         "r": {
+                     *           "value": 10.2,
+                     *           "unit": "mm"
+                     *         }
+                     *       },
+                     *       "properties": {
+                     *         "A": {
+                     *           "value": 8552.5,
+                     *           "unit": "mm^2"
+                     *         },
+                     *         "Iy": {
+                     *           "value": 293792000,
+                     *           "unit": "mm^4"
+                     *         },
+                     *         "Iz": {
+                     *           "value": 14517000,
+                     *           "unit": "mm^4"
+                     *         },
+                     *         "Wely": {
+                     *           "value": 1295950,
+                     *           "unit": "mm^3"
+                     *         },
+                     *         "Welz": {
+                     *           "value": 152890,
+                     *           "unit": "mm^3"
+                     *         },
+                     *         "Wply": {
+                     *           "value": 1471000,
+                     *           "unit": "mm^3"
+                     *         },
+                     *         "Wplz": {
+                     *           "value": 237350,
+                     *           "unit": "mm^3"
+                     *         },
+                     *         "iy": {
+                     *           "value": 185.3,
+                     *           "unit": "mm"
+                     *         },
+                     *         "iz": {
+                     *           "value": 41.2,
+                     *           "unit": "mm"
+                     *         },
+                     *         "It": {
+                     *           "value": 371300,
+                     *           "unit": "mm^4"
+                     *         },
+                     *         "Iw": {
+                     *           "value": 704800000000,
+                     *           "unit": "mm^6"
+                     *         }
+                     *       }
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["SectionFacts"];
+                };
+            };
+            readonly 304: components["responses"]["NotModified"];
+            readonly 401: components["responses"]["KeyRefused"];
+            readonly 403: components["responses"]["NotAllowed"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
     readonly runBatch: {
         readonly parameters: {
             readonly query?: {
@@ -4305,8 +5129,17 @@ export interface operations {
     readonly listUsage: {
         readonly parameters: {
             readonly query?: {
-                /** @description Only calls of this client, by its id. */
+                /** @description Only calls of this client, by its id, or of those whose name holds this text. */
                 readonly client?: components["parameters"]["UsageClient"];
+                /** @description Only calls with this key, by its public part. */
+                readonly key?: components["parameters"]["UsageKey"];
+                /** @description Only calls of this person, by the id. */
+                readonly person?: components["parameters"]["UsagePerson"];
+                /**
+                 * @description Only calls under this factor profile, or this revision of it.
+                 * @example uk-na@1
+                 */
+                readonly profile?: components["parameters"]["UsageProfile"];
                 /** @description Only calls of this check. */
                 readonly check?: components["parameters"]["UsageCheck"];
                 /** @description Only calls answered with this HTTP status. */
@@ -4389,6 +5222,605 @@ export interface operations {
             };
             readonly 401: components["responses"]["KeyRefused"];
             readonly 403: components["responses"]["NotAllowed"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readSession: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Who is signed in. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "person": {
+                     *         "id": "5a17c0de-0002-4000-8000-000000000001",
+                     *         "email": "admin@saltmarsh.example",
+                     *         "name": "Asha Verrall",
+                     *         "roles": [
+                     *           "admin"
+                     *         ]
+                     *       },
+                     *       "permissions": [
+                     *         "catalogue:read",
+                     *         "checks:run",
+                     *         "profiles:read",
+                     *         "clients:read",
+                     *         "clients:write",
+                     *         "keys:read",
+                     *         "keys:write",
+                     *         "usage:read"
+                     *       ],
+                     *       "csrfToken": "q0Y9r2K7c5m1Vx3nT8bLw4Zs6Jd0HfAeUoPiRtYgNkM"
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["SessionState"];
+                };
+            };
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly signIn: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "email": "admin@saltmarsh.example",
+                 *       "password": "correct horse battery staple"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["SessionRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The person is signed in. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly "Set-Cookie": components["headers"]["SetCookie"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "person": {
+                     *         "id": "5a17c0de-0002-4000-8000-000000000001",
+                     *         "email": "admin@saltmarsh.example",
+                     *         "name": "Asha Verrall",
+                     *         "roles": [
+                     *           "admin"
+                     *         ]
+                     *       },
+                     *       "permissions": [
+                     *         "catalogue:read",
+                     *         "checks:run",
+                     *         "profiles:read",
+                     *         "clients:read",
+                     *         "clients:write",
+                     *         "keys:read",
+                     *         "keys:write",
+                     *         "usage:read"
+                     *       ],
+                     *       "csrfToken": "q0Y9r2K7c5m1Vx3nT8bLw4Zs6Jd0HfAeUoPiRtYgNkM"
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["SessionState"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["SignInRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly signOut: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The session's `csrfToken`. */
+                readonly "X-CSRF-Token": components["parameters"]["CsrfToken"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Nobody is signed in. */
+            readonly 204: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly listClients: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description How many to a page. */
+                readonly pageSize?: components["parameters"]["PageSize"];
+                /** @description `nextPageToken` of the page before. Default the first page. */
+                readonly pageToken?: components["parameters"]["PageToken"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page of the clients. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "items": [
+                     *         {
+                     *           "id": "5a17c0de-0001-4000-8000-000000000003",
+                     *           "name": "Waler schedule workbook",
+                     *           "defaultProfile": "uk-na",
+                     *           "pins": [],
+                     *           "createdAt": "2026-01-31T08:00:00.000Z",
+                     *           "disabledAt": null,
+                     *           "liveKeys": 1
+                     *         }
+                     *       ],
+                     *       "nextPageToken": null
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["ClientList"];
+                };
+            };
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly makeClient: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The session's `csrfToken`. */
+                readonly "X-CSRF-Token": components["parameters"]["CsrfToken"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "name": "Waler schedule workbook",
+                 *       "defaultProfile": "uk-na"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ClientRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The client. */
+            readonly 201: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly Location: components["headers"]["Location"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "id": "5a17c0de-0001-4000-8000-000000000003",
+                     *       "name": "Waler schedule workbook",
+                     *       "defaultProfile": "uk-na",
+                     *       "pins": [],
+                     *       "createdAt": "2026-01-31T08:00:00.000Z",
+                     *       "disabledAt": null,
+                     *       "liveKeys": 1
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["ClientFacts"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 409: components["responses"]["Conflict"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly readClient: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description A client's `id`.
+                 * @example 5a17c0de-0001-4000-8000-000000000003
+                 */
+                readonly id: components["parameters"]["ClientIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The client. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "id": "5a17c0de-0001-4000-8000-000000000003",
+                     *       "name": "Waler schedule workbook",
+                     *       "defaultProfile": "uk-na",
+                     *       "pins": [],
+                     *       "createdAt": "2026-01-31T08:00:00.000Z",
+                     *       "disabledAt": null,
+                     *       "liveKeys": 1
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["ClientFacts"];
+                };
+            };
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly changeClient: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The session's `csrfToken`. */
+                readonly "X-CSRF-Token": components["parameters"]["CsrfToken"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description A client's `id`.
+                 * @example 5a17c0de-0001-4000-8000-000000000003
+                 */
+                readonly id: components["parameters"]["ClientIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "disabled": true
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ClientChange"];
+            };
+        };
+        readonly responses: {
+            /** @description The client. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "id": "5a17c0de-0001-4000-8000-000000000003",
+                     *       "name": "Waler schedule workbook",
+                     *       "defaultProfile": "uk-na",
+                     *       "pins": [],
+                     *       "createdAt": "2026-01-31T08:00:00.000Z",
+                     *       "disabledAt": "2026-02-01T09:00:00.000Z",
+                     *       "liveKeys": 1
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["ClientFacts"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 409: components["responses"]["Conflict"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly listKeys: {
+        readonly parameters: {
+            readonly query?: {
+                /** @description How many to a page. */
+                readonly pageSize?: components["parameters"]["PageSize"];
+                /** @description `nextPageToken` of the page before. Default the first page. */
+                readonly pageToken?: components["parameters"]["PageToken"];
+            };
+            readonly header?: {
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description A client's `id`.
+                 * @example 5a17c0de-0001-4000-8000-000000000003
+                 */
+                readonly id: components["parameters"]["ClientIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description A page of the keys. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "items": [
+                     *         {
+                     *           "selector": "4Fq9ZtR2mLx7",
+                     *           "clientId": "5a17c0de-0001-4000-8000-000000000003",
+                     *           "kind": "page",
+                     *           "label": "Site office page",
+                     *           "scopes": [
+                     *             "checks",
+                     *             "catalogue"
+                     *           ],
+                     *           "origins": [
+                     *             "https://intranet.example"
+                     *           ],
+                     *           "profiles": null,
+                     *           "rateLimit": null,
+                     *           "createdAt": "2026-01-31T08:00:00.000Z",
+                     *           "expiresAt": "2027-01-31T18:00:00.000Z",
+                     *           "revokedAt": null,
+                     *           "lastUsedOn": null,
+                     *           "state": "live"
+                     *         }
+                     *       ],
+                     *       "nextPageToken": null
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["KeyList"];
+                };
+            };
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 422: components["responses"]["QueryNotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly issueKey: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The session's `csrfToken`. */
+                readonly "X-CSRF-Token": components["parameters"]["CsrfToken"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description A client's `id`.
+                 * @example 5a17c0de-0001-4000-8000-000000000003
+                 */
+                readonly id: components["parameters"]["ClientIdInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "kind": "page",
+                 *       "label": "Site office page",
+                 *       "origins": [
+                 *         "https://intranet.example"
+                 *       ],
+                 *       "expiresAt": "2027-01-31T18:00:00Z"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["KeyRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description The key with its text. */
+            readonly 201: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "key": {
+                     *         "selector": "4Fq9ZtR2mLx7",
+                     *         "clientId": "5a17c0de-0001-4000-8000-000000000003",
+                     *         "kind": "page",
+                     *         "label": "Site office page",
+                     *         "scopes": [
+                     *           "checks",
+                     *           "catalogue"
+                     *         ],
+                     *         "origins": [
+                     *           "https://intranet.example"
+                     *         ],
+                     *         "profiles": null,
+                     *         "rateLimit": null,
+                     *         "createdAt": "2026-01-31T08:00:00.000Z",
+                     *         "expiresAt": "2027-01-31T18:00:00.000Z",
+                     *         "revokedAt": null,
+                     *         "lastUsedOn": null,
+                     *         "state": "live"
+                     *       },
+                     *       "text": "htp_4Fq9ZtR2mLx7_THE-SECRET-PART-IS-SHOWN-HERE"
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["IssuedKey"];
+                };
+            };
+            readonly 400: components["responses"]["NotJson"];
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
+            readonly 404: components["responses"]["NotFound"];
+            readonly 409: components["responses"]["Conflict"];
+            readonly 413: components["responses"]["TooLarge"];
+            readonly 415: components["responses"]["NotDeclaredAsJson"];
+            readonly 422: components["responses"]["NotValid"];
+            readonly 429: components["responses"]["TooManyCalls"];
+            readonly 500: components["responses"]["Unexpected"];
+            readonly 503: components["responses"]["Away"];
+        };
+    };
+    readonly revokeKey: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The session's `csrfToken`. */
+                readonly "X-CSRF-Token": components["parameters"]["CsrfToken"];
+                /** @description The caller's own id of the call; it is kept in the log as a label. */
+                readonly "X-Request-Id"?: components["parameters"]["RequestId"];
+            };
+            readonly path: {
+                /**
+                 * @description The public part of a key.
+                 * @example 4Fq9ZtR2mLx7
+                 */
+                readonly selector: components["parameters"]["SelectorInPath"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The key. */
+            readonly 200: {
+                headers: {
+                    readonly "X-Request-Id": components["headers"]["XRequestId"];
+                    readonly RateLimit: components["headers"]["RateLimit"];
+                    readonly "RateLimit-Policy": components["headers"]["RateLimitPolicy"];
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    /**
+                     * @example {
+                     *       "selector": "4Fq9ZtR2mLx7",
+                     *       "clientId": "5a17c0de-0001-4000-8000-000000000003",
+                     *       "kind": "page",
+                     *       "label": "Site office page",
+                     *       "scopes": [
+                     *         "checks",
+                     *         "catalogue"
+                     *       ],
+                     *       "origins": [
+                     *         "https://intranet.example"
+                     *       ],
+                     *       "profiles": null,
+                     *       "rateLimit": null,
+                     *       "createdAt": "2026-01-31T08:00:00.000Z",
+                     *       "expiresAt": "2027-01-31T18:00:00.000Z",
+                     *       "revokedAt": "2026-02-01T09:00:00.000Z",
+                     *       "lastUsedOn": null,
+                     *       "state": "revoked"
+                     *     }
+                     */
+                    readonly "application/json": components["schemas"]["KeyFacts"];
+                };
+            };
+            readonly 401: components["responses"]["SessionRefused"];
+            readonly 403: components["responses"]["NotPermitted"];
             readonly 404: components["responses"]["NotFound"];
             readonly 422: components["responses"]["QueryNotValid"];
             readonly 429: components["responses"]["TooManyCalls"];

@@ -2,6 +2,7 @@ import type { Request, Response } from 'express';
 import { performance } from 'node:perf_hooks';
 import { decodeTime } from 'ulid';
 import type { Key } from '../features/keys/key';
+import type { SignedIn } from '../features/people/person';
 import { nextId } from './ids';
 import type { ProblemCode } from './problem-codes';
 
@@ -38,6 +39,8 @@ export class Call {
   keySelector: string | undefined;
   /** Owner of a key that no longer holds; for the log. */
   formerKey: Key | undefined;
+  /** Who is signed in; never beside a key. */
+  person: SignedIn | undefined;
   facts: Facts = {};
   private readonly started = performance.now();
 

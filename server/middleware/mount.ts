@@ -12,6 +12,9 @@ interface MountDeps {
   readonly rate: RequestHandler;
 }
 
+const takesBody = ({ method, body }: Route): boolean =>
+  (method === 'post' || method === 'patch') && body !== 'none';
+
 const pass: RequestHandler = (_request, _response, next) => next();
 
 /** Names the call by its route: the log never holds a path as the caller wrote it. */
@@ -33,6 +36,7 @@ const handle =
       request,
       call,
       key: call.key,
+      person: call.person,
       params: request.params as Readonly<Record<string, string>>,
       query: readQuery(request, allowed),
       body: request.body,
@@ -48,7 +52,7 @@ export function mount(app: Express, routes: readonly Route[], { send, rate }: Mo
       begin(route),
       route.rate === 'counted' ? rate : pass,
       authorise(route.policy),
-      ...(route.method === 'post' ? jsonBody : []),
+      ...(takesBody(route) ? jsonBody : []),
       handle(route, send),
     );
   }

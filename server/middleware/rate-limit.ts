@@ -6,7 +6,7 @@ import { awayProblem, Problem } from './problem';
 import { RateStore, type RateCounts } from './rate-store';
 
 /** Calls a minute where a key has no number of its own. */
-export const limits = { key: 6_000, pageAddress: 600, address: 120 } as const;
+export const limits = { key: 6_000, pageAddress: 600, person: 1_200, address: 120 } as const;
 export type Limits = Readonly<Record<keyof typeof limits, number>>;
 
 /** IPv6 callers own whole networks of addresses: one network counts as one address. */
@@ -30,7 +30,10 @@ function refusal(name: string, response: Response): Problem {
   );
 }
 
-/** Limits per key; for page keys per address too; per address for whoever has no good key. */
+/**
+ * Limits per key; for page keys per address too; per person who is signed in; per address for
+ * whoever is neither. An answer that nothing has changed costs nothing.
+ */
 export function rateLimit(counts: RateCounts, logger: Logger, limit: Limits): RequestHandler {
   const limiter = ({ name, limit: most, subject }: Limiter): RequestHandler =>
     expressRateLimit({
@@ -46,6 +49,8 @@ export function rateLimit(counts: RateCounts, logger: Logger, limit: Limits): Re
         warn: (error) => logger.warn(messageOf(error)),
       },
       validate: { xForwardedForHeader: false, forwardedHeader: false, ip: false },
+      skipSuccessfulRequests: true,
+      requestWasSuccessful: (_request, { statusCode }) => statusCode === 304,
       handler: (_request, response, next) => next(refusal(name, response)),
     });
   const perKey = limiter({
@@ -58,6 +63,11 @@ export function rateLimit(counts: RateCounts, logger: Logger, limit: Limits): Re
     limit: limit.pageAddress,
     subject: (request) => addressOf(request),
   });
+  const perPerson = limiter({
+    name: 'person',
+    limit: limit.person,
+    subject: (_request, response) => callOf(response).person?.id ?? '',
+  });
   const perAddress = limiter({
     name: 'address',
     limit: limit.address,
@@ -68,7 +78,8 @@ export function rateLimit(counts: RateCounts, logger: Logger, limit: Limits): Re
       if (error === undefined || error instanceof Problem) next(error);
       else next(awayProblem('database-unavailable', error));
     };
-    const { key } = callOf(response);
+    const { key, person } = callOf(response);
+    if (person && !key) return void perPerson(request, response, go);
     if (!key) return void perAddress(request, response, go);
     if (key.kind !== 'page') return void perKey(request, response, go);
     const thenAddress = (error?: unknown): void => {

@@ -2,7 +2,7 @@ import { ask as askService, type Answered } from './support/ask';
 import { startService, until, type TestService } from './support/service';
 
 const site = 'https://tools.example';
-const limits = { key: 1_000, pageAddress: 3, address: 20 };
+const limits = { key: 1_000, pageAddress: 3, person: 1_000, address: 20 };
 let service: TestService & { keys: Record<'three' | 'crowd' | 'page', string> };
 
 /** Counts begin anew with the minute: a test that counts keeps clear of its turn. */

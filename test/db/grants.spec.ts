@@ -57,6 +57,9 @@ describe('rights of the application role', () => {
   it.each([
     ['a hash of a key', `update api_keys set secret_sha256 = ''`],
     ['the scopes of a key', `update api_keys set scopes = '{usage}'`],
+    ['the roles of a person', `update users set roles = '{admin}'`],
+    ['the password of a person', `update users set password_hash = ''`],
+    ['a person', `insert into users (email, name) values ('me@firm.example', 'Me')`],
     ['a roll-up', `insert into usage_hourly values (now(), null, '/', 200, null, 1, 1)`],
     ['how far the roll-up came', `delete from work_marks`],
     ['the marks of migrations', `delete from schema_migrations`],
@@ -81,9 +84,11 @@ describe('rights of the application role', () => {
       'profile_revisions: INSERT, SELECT',
       'rate_counts: DELETE, INSERT, SELECT, UPDATE',
       'schema_migrations: SELECT',
+      'sessions: DELETE, INSERT, SELECT, UPDATE',
       'usage_events: INSERT, SELECT',
       'usage_events_default: SELECT',
       'usage_hourly: SELECT',
+      'users: SELECT',
     ]);
   });
 });

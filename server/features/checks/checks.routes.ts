@@ -1,13 +1,18 @@
 import type { Check } from '../../engine/checks/check';
-import { keyOf } from '../../middleware/key-of';
 import { Problem } from '../../middleware/problem';
 import { list, ok, type Route } from '../../middleware/route';
+import { borrowerOf } from '../profiles/borrower';
 import type { CheckService } from './checks.service';
 import { requestSchema } from './request-schema';
 
 const reading = {
   method: 'get',
-  policy: { kind: 'key', scope: 'catalogue', keyKinds: ['secret', 'page'] },
+  policy: {
+    kind: 'key',
+    scope: 'catalogue',
+    keyKinds: ['secret', 'page'],
+    permission: 'catalogue:read',
+  },
   rate: 'counted',
   logged: true,
 } as const;
@@ -15,7 +20,7 @@ const reading = {
 const checkRoute = (check: Check, service: CheckService): Route => ({
   method: 'post',
   path: `/v1/checks/${check.id}`,
-  policy: { kind: 'key', scope: 'checks', keyKinds: ['secret', 'page'] },
+  policy: { kind: 'key', scope: 'checks', keyKinds: ['secret', 'page'], permission: 'checks:run' },
   rate: 'counted',
   logged: true,
   query: { detail: ['full', 'summary'] },
@@ -23,7 +28,7 @@ const checkRoute = (check: Check, service: CheckService): Route => ({
   handler: async (asked) => {
     const { body, call, query } = asked;
     const detail = query.detail === 'summary' ? 'summary' : 'full';
-    return ok(await service.answer(check, { body, detail, key: keyOf(asked), call }));
+    return ok(await service.answer(check, { body, detail, borrower: borrowerOf(asked), call }));
   },
 });
 

@@ -2,7 +2,7 @@ import type { Check, CheckAnswer, Detail } from '../../engine/checks/check';
 import type { RefusalItem } from '../../engine/refusal';
 import type { Call } from '../../middleware/call';
 import { Problem } from '../../middleware/problem';
-import type { Key } from '../keys/key';
+import type { Borrower } from '../profiles/borrower';
 import type { ProfileService } from '../profiles/profiles.service';
 import type { RunApart } from './check-runner';
 
@@ -24,13 +24,18 @@ export class CheckService {
 
   async answer(
     check: Check,
-    { body, detail, key, call }: { body: unknown; detail: Detail; key: Key; call: Call },
+    {
+      body,
+      detail,
+      borrower,
+      call,
+    }: { body: unknown; detail: Detail; borrower: Borrower; call: Call },
   ): Promise<CheckAnswer> {
     const { profiles, validate, run } = this.deps;
     const errors = validate(check.requestSchema, body);
     if (errors.length > 0)
       throw new Problem('not-valid', 'Some of the body is not what the check takes.', { errors });
-    const profile = await profiles.resolve((body as Request).profile, key);
+    const profile = await profiles.resolve((body as Request).profile, borrower);
     call.note({ profile: profile.slug, profileRevision: profile.revision });
     const answer = await run(check, body, { profile, detail });
     const { status, utilisation, governing } = answer;

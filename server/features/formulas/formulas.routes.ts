@@ -6,7 +6,12 @@ export const formulaRoutes = (): Route[] => [
   {
     method: 'get',
     path: '/v1/formulas/:id',
-    policy: { kind: 'key', scope: 'catalogue', keyKinds: ['secret', 'page'] },
+    policy: {
+      kind: 'key',
+      scope: 'catalogue',
+      keyKinds: ['secret', 'page'],
+      permission: 'catalogue:read',
+    },
     rate: 'counted',
     logged: true,
     handler: ({ params }) => {

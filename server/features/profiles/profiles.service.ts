@@ -1,6 +1,6 @@
 import type { ProfileRevision } from '../../engine/profiles/profile';
 import { Problem } from '../../middleware/problem';
-import type { Key } from '../keys/key';
+import type { Borrower } from './borrower';
 import { revisionAt, standingAt, type ProfileCache, type Profiles } from './profile-cache';
 import type { ProfileRow } from './profile-store';
 
@@ -17,7 +17,7 @@ function parseReference(text: string): Reference | undefined {
   return { slug: match[1] ?? '', revision: match[2] === undefined ? undefined : Number(match[2]) };
 }
 
-const mayUse = ({ profiles }: Key, slug: string): boolean =>
+const mayUse = ({ profiles }: Borrower, slug: string): boolean =>
   profiles === null || profiles.includes(slug);
 
 const inEffect = (rows: readonly ProfileRow[], now: Date): ProfileRow | undefined =>
@@ -34,8 +34,8 @@ export class ProfileService {
    * The revision that a check runs under: the one pinned, else the client's own pin, else the
    * newest approved one in effect.
    */
-  async resolve(name: string | undefined, key: Key): Promise<ProfileRevision> {
-    const asked = name ?? key.defaultProfile;
+  async resolve(name: string | undefined, borrower: Borrower): Promise<ProfileRevision> {
+    const asked = name ?? borrower.defaultProfile;
     if (asked === null)
       throw new Problem('profile-required', 'Name the factor profile that the check runs under.', {
         errors: [
@@ -49,12 +49,12 @@ export class ProfileService {
       });
     const reference = parseReference(asked);
     // A key held to some profiles is told the same of one it may not use and of one there is not.
-    if (reference && !mayUse(key, reference.slug))
+    if (reference && !mayUse(borrower, reference.slug))
       throw new Problem('profile-not-allowed', 'The key is limited to other factor profiles.');
     const rows = reference && (await this.cache.current()).get(reference.slug);
     if (!rows) throw unknown(`There is no factor profile "${asked.slice(0, 100)}".`);
     const now = this.now();
-    const pin = reference.revision ?? ownPin(key, reference.slug);
+    const pin = reference.revision ?? ownPin(borrower, reference.slug);
     const found =
       pin === undefined ? inEffect(rows, now) : rows.find(({ revision }) => revision === pin);
     if (found) return revisionAt(found, now);
@@ -66,9 +66,9 @@ export class ProfileService {
     );
   }
 
-  async list(key: Key): Promise<ProfileSummary[]> {
+  async list(borrower: Borrower): Promise<ProfileSummary[]> {
     const profiles = await this.cache.current();
-    const allowed = [...profiles].filter(([slug]) => mayUse(key, slug));
+    const allowed = [...profiles].filter(([slug]) => mayUse(borrower, slug));
     return allowed
       .map(([, rows]) => summary(rows, this.now()))
       .filter((each) => each !== undefined)
@@ -76,9 +76,9 @@ export class ProfileService {
   }
 
   /** One revision with all its values; for a slug alone the one in effect, else the newest. */
-  async read(name: string, key: Key): Promise<ProfileDetail> {
+  async read(name: string, borrower: Borrower): Promise<ProfileDetail> {
     const reference = parseReference(name);
-    const found = reference && mayUse(key, reference.slug) && (await this.find(reference));
+    const found = reference && mayUse(borrower, reference.slug) && (await this.find(reference));
     if (!found) throw new Problem('not-found', 'There is no such factor profile or revision.');
     return detail(found, this.now());
   }
@@ -103,7 +103,7 @@ const unknown = (detail: string): Problem =>
     ],
   });
 
-const ownPin = ({ pins }: Key, slug: string): number | undefined =>
+const ownPin = ({ pins }: Borrower, slug: string): number | undefined =>
   Object.hasOwn(pins, slug) ? pins[slug] : undefined;
 
 function facts(row: ProfileRow, now: Date) {

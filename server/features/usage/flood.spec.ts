@@ -10,6 +10,7 @@ const row = (second: number, more: Partial<UsageRow> = {}): UsageRow => ({
   client_id: null,
   key_id: null,
   key_selector: 'selector0000',
+  person_id: null,
   method: 'GET',
   route: '/v1/checks',
   check_id: null,

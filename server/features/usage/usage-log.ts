@@ -19,7 +19,7 @@ export class UsageLog {
 
   async write(call: Call, ending: Ending): Promise<void> {
     const row = usageRow(call, ending);
-    if (!call.key && ending.status >= 400 && this.gate.takes(row)) return;
+    if (!call.key && !call.person && ending.status >= 400 && this.gate.takes(row)) return;
     await this.rows.add(row);
   }
 

@@ -9,6 +9,7 @@ export interface UsageRow {
   readonly client_id: string | null;
   readonly key_id: string | null;
   readonly key_selector: string | null;
+  readonly person_id: string | null;
   readonly method: string;
   readonly route: string;
   readonly check_id: string | null;
@@ -53,6 +54,7 @@ export function usageRow(call: Call, ending: Ending): UsageRow {
     client_id: owner?.clientId ?? null,
     key_id: owner?.id ?? null,
     key_selector: call.keySelector ?? null,
+    person_id: call.person?.id ?? null,
     method: ending.method,
     route: call.route,
     check_id: facts.checkId ?? null,

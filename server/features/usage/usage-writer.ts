@@ -10,6 +10,7 @@ const columns = {
   client_id: 'uuid',
   key_id: 'uuid',
   key_selector: 'text',
+  person_id: 'uuid',
   method: 'text',
   route: 'text',
   check_id: 'text',

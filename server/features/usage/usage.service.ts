@@ -5,17 +5,24 @@ import type { RefusalItem } from '../../engine/refusal';
 import { Problem } from '../../middleware/problem';
 import type { Query } from '../../middleware/route';
 import { pageToken, readPageToken } from './page-token';
+import { clientsNamed, namesIn, type Names } from './usage-names';
 
 const day = 86_400_000;
 const defaultSize = 100;
 const maxSize = 500;
 const uuid = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
+const plainName = /^[^\p{Cc}]{1,100}$/u;
+const selector = /^[0-9A-Za-z]{12}$/;
+const reference = /^([a-z0-9]+(?:-[a-z0-9]+)*)(?:@([1-9]\d{0,5}))?$/;
 const instant = /^\d{4}-\d\d-\d\d(T\d\d:\d\d(:\d\d(\.\d{1,3})?)?(Z|[+-]\d\d:\d\d))?$/;
 
 /** Names of the parameters of the list; each narrows it. */
 export const usageQuery = {
   client: 'text',
+  key: 'text',
+  person: 'text',
   check: 'text',
+  profile: 'text',
   status: 'text',
   answer: ['pass', 'fail', 'incomplete', 'provisional'],
   from: 'text',
@@ -25,6 +32,8 @@ export const usageQuery = {
 } as const;
 
 interface Filters {
+  /** Part of the name of the clients meant. */
+  readonly clientName: string | undefined;
   readonly where: WhereOptions<UsageEvent>;
   readonly size: number;
 }
@@ -46,9 +55,19 @@ function readFilters(query: Query): Filters {
     instant.test(text) && !Number.isNaN(Date.parse(text)) ? new Date(text) : undefined;
   const moment = 'Must be a date, or a date and time with its offset: 2026-01-31T08:00:00Z.';
 
-  const client = take('client', 'Must be the id of a client.', (text) =>
+  const client = take('client', 'Must be the id of a client, or part of its name.', (text) =>
+    plainName.test(text) ? text : undefined,
+  );
+  const key = take('key', 'Must be the public part of a key: 12 letters and digits.', (text) =>
+    selector.test(text) ? text : undefined,
+  );
+  const person = take('person', 'Must be the id of a person.', (text) =>
     uuid.test(text) ? text : undefined,
   );
+  const profile = take('profile', 'Must be a factor profile, or a revision: uk-na@2.', (text) => {
+    const [, slug, revision] = reference.exec(text) ?? [];
+    return slug === undefined ? undefined : { slug, revision };
+  });
   const check = take('check', 'Must be the id of a check.', (text) =>
     /^[a-z-]{1,40}$/.test(text) ? text : undefined,
   );
@@ -67,9 +86,14 @@ function readFilters(query: Query): Filters {
     ...(after !== undefined && { [Op.lte]: new Date(decodeTime(after)) }),
   };
   return {
+    clientName: client === undefined || uuid.test(client) ? undefined : client,
     size: size ?? defaultSize,
     where: {
-      ...(client !== undefined && { clientId: client }),
+      ...(client !== undefined && uuid.test(client) && { clientId: client }),
+      ...(key !== undefined && { keySelector: key }),
+      ...(person !== undefined && { personId: person }),
+      ...(profile && { profile: profile.slug }),
+      ...(profile?.revision !== undefined && { profileRevision: Number(profile.revision) }),
       ...(check !== undefined && { checkId: check }),
       ...(status !== undefined && { httpStatus: status }),
       ...(query.answer !== undefined && { answer: query.answer }),
@@ -79,14 +103,17 @@ function readFilters(query: Query): Filters {
   };
 }
 
-function toCall(row: UsageEvent) {
+function toCall(row: UsageEvent, { clients, people }: Names) {
   return {
     id: row.id,
     at: row.at,
     phase: row.phase,
     clientId: row.clientId,
+    clientName: clients.get(row.clientId ?? '') ?? null,
     keyId: row.keyId,
     keySelector: row.keySelector,
+    personId: row.personId,
+    personName: people.get(row.personId ?? '') ?? null,
     method: row.method,
     route: row.route,
     checkId: row.checkId,
@@ -112,9 +139,12 @@ export type LoggedCall = ReturnType<typeof toCall>;
 export async function listUsage(
   query: Query,
 ): Promise<{ items: LoggedCall[]; nextPageToken: string | null }> {
-  const { where, size } = readFilters(query);
+  const { where: told, size, clientName } = readFilters(query);
+  const named = clientName === undefined ? undefined : await clientsNamed(clientName);
+  const where = named ? { [Op.and]: [told, { clientId: { [Op.in]: named } }] } : told;
   const rows = await UsageEvent.findAll({ where, order: [['id', 'DESC']], limit: size + 1 });
-  const items = rows.slice(0, size).map(toCall);
+  const names = await namesIn(rows);
+  const items = rows.slice(0, size).map((row) => toCall(row, names));
   const last = items.at(-1);
   return { items, nextPageToken: rows.length > size && last ? pageToken(last.id) : null };
 }
@@ -133,5 +163,5 @@ export async function findCall(id: string): Promise<LoggedCall> {
         });
   const [row] = rows;
   if (!row) throw new Problem('not-found', 'There is no call of this id.');
-  return toCall(row);
+  return toCall(row, await namesIn([row]));
 }

@@ -3,7 +3,7 @@ import request from 'supertest';
 import type { ProblemBody } from '../../../server/middleware/problem';
 
 export interface Asking {
-  readonly method?: 'get' | 'post' | 'options';
+  readonly method?: 'get' | 'post' | 'patch' | 'delete' | 'options';
   readonly path: string;
   /** Text of a key, sent as it should be. */
   readonly key?: string | undefined;

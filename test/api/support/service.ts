@@ -10,6 +10,7 @@ import { readinessOf } from '../../../server/features/health/readiness';
 import { mintKey, type KeyKind } from '../../../server/features/keys/key-format';
 import { DatabaseKeyStore, type KeyStore } from '../../../server/features/keys/key-store';
 import { DatabaseProfileStore } from '../../../server/features/profiles/profile-store';
+import { matchHere } from '../../../server/features/people/password';
 import { UsageLog } from '../../../server/features/usage/usage-log';
 import { runHere } from '../../../server/features/checks/check-runner';
 import { DatabaseChangeFeed } from '../../../server/middleware/change-feed';
@@ -128,12 +129,15 @@ export async function startService<Name extends string>(
     validate: validateFake,
     runApart: runHere,
     pool,
+    sequelize,
     keyStore,
     profileStore: new DatabaseProfileStore(),
     feed,
     usage,
     readiness: readinessOf(sequelize, feed),
     logger: pino({ level: 'info' }, sink),
+    matchPassword: matchHere,
+    session: { secret: 'a secret of the tests, long enough', secure: false },
     ...overrides,
   };
   const routes = routeTable(deps);
