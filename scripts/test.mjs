@@ -46,6 +46,7 @@ async function test(only) {
     program('lint', 'eslint', ['.']),
     program('format', 'prettier', ['--check', '.', '--log-level', 'warn']),
     program('types', 'tsc', ['--noEmit', '-p', 'tsconfig.json']),
+    program('types of browser specs', 'tsc', ['--noEmit', '-p', 'test/browser/tsconfig.json']),
     program('types of scripts', 'tsc', ['--noEmit', '-p', 'scripts/tsconfig.json']),
     { name: 'contract', run: checkContract },
   ];
