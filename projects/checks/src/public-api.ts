@@ -1,6 +1,23 @@
 /** What the library gives to the elements and the console; a change here is on purpose. */
-export * from './api/api-client';
-export * from './api/api-error';
+export {
+  ApiClient,
+  HEADTREE_CSRF_TOKEN,
+  HEADTREE_FETCH,
+  isSecretKey,
+  type ApiAccess,
+  type Credentials,
+  type Fetcher,
+} from './api/api-client';
+export { ApiError, type ApiErrorFacts, type ApiErrorKind } from './api/api-error';
 export type * from './contract';
-export { adoptSheetStyles, sheetStyles } from './look/sheet-styles';
+export { EnvelopeDiagram } from './envelope-diagram/envelope-diagram';
+export { adoptSheetStyles, provideSheetStyles, sheetStyles } from './look/sheet-styles';
+export { fontFamilies } from './look/tokens.styles';
+export { MemberDrawing } from './member-drawing/member-drawing';
+export { drawingModel, type DrawingModel } from './member-drawing/drawing-model';
+export { ReactionsTable } from './reactions/reactions-table';
+export { StatusMark, type MarkKind } from './status-mark/status-mark';
+export { TitleBlock } from './title-block/title-block';
+export { barTone, UtilisationBar, type BarTone } from './utilisation-bar/utilisation-bar';
 export { WalerCheck } from './waler-check/waler-check';
+export { WorkingSheet } from './working/working-sheet';

@@ -83,12 +83,18 @@ export class CheckRunner {
     this.again.next();
   }
 
-  /** Forgets what was asked: the form can no longer be read, or is empty. */
-  clear(): void {
+  /** Asks no more: the form cannot be read as it stands. The last answer stays, as a stale one. */
+  hold(): void {
     this.current?.done();
     this.current = null;
     this.asks.next(null);
-    this.held.set({ phase: 'idle', answer: null, error: null });
+    this.to({ phase: 'idle', error: null });
+  }
+
+  /** Forgets everything that was asked and answered. */
+  clear(): void {
+    this.hold();
+    this.to({ answer: null });
   }
 
   /** Ends for good. */
@@ -109,7 +115,7 @@ export class CheckRunner {
         ask.done(answer);
       }),
       catchError((error: unknown) => {
-        this.held.set({ phase: 'refused', answer: null, error: known(error) });
+        this.to({ phase: 'refused', error: known(error) });
         ask.done();
         return EMPTY;
       }),

@@ -173,8 +173,8 @@ function readLimit(draft: WalerDraft, reader: FieldReader): WalerRequest['deflec
   if (text === writeLimit(kept.deflectionLimit)) return kept.deflectionLimit;
   const others = typeof kept.deflectionLimit === 'object' ? kept.deflectionLimit : undefined;
   if (text === '') {
-    const { instant: _, ...rest } = others ?? {};
-    return Object.keys(rest).length > 0 ? rest : undefined;
+    const rest = Object.entries(others ?? {}).filter(([name]) => name !== 'instant');
+    return rest.length > 0 ? Object.fromEntries(rest) : undefined;
   }
   const ratio = /^(?:(?:span|l|1)\s*\/\s*)?(\d{1,5}(?:\.\d{1,3})?)$/i.exec(text);
   if (!ratio) {

@@ -48,7 +48,7 @@ function unchanged(row: LoadRow): boolean {
   if (!row.kept) return false;
   const request = 'kind' in row.kept ? { loads: [row.kept] } : { thrust: [row.kept] };
   const [shown] = writeDraft(request).rows;
-  const texts = ({ id: _, kept: __, ...rest }: LoadRow) => JSON.stringify(rest);
+  const texts = (one: LoadRow) => JSON.stringify({ ...one, id: 0, kept: null });
   return shown !== undefined && texts(shown) === texts(row);
 }
 

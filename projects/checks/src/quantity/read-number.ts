@@ -67,7 +67,7 @@ function isAmbiguous(body: string): boolean {
  */
 export function writeNumber(value: number, decimals = 0): string {
   const plain = String(value);
-  if (/e/.test(plain)) return plain;
+  if (plain.includes('e')) return plain;
   if (isAmbiguous(plain.replace('-', ''))) return `${plain}0`;
   const given = plain.split('.')[1]?.length ?? 0;
   return given < decimals ? value.toFixed(decimals) : plain;

@@ -1,0 +1,92 @@
+import { NgTemplateOutlet } from '@angular/common';
+import {
+  afterNextRender,
+  ChangeDetectionStrategy,
+  Component,
+  ElementRef,
+  inject,
+  Injector,
+  input,
+  model,
+  ViewEncapsulation,
+} from '@angular/core';
+import { ChoiceField } from '../fields/choice-field';
+import { TextField } from '../fields/text-field';
+import { emptyRow, rowPointer, type LoadRow } from '../form/draft';
+import type { FieldFault } from '../form/read-draft';
+import { shapeUnit } from '../form/read-rows';
+import { categoryOptions, natures, shapes } from './load-words';
+
+/** The loads, one a row; Enter goes down, and on the last row writes a new one. */
+@Component({
+  selector: 'htc-load-table',
+  templateUrl: './load-table.html',
+  imports: [ChoiceField, NgTemplateOutlet, TextField],
+  host: { class: 'ht-loads', role: 'group', 'aria-label': 'Loads' },
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  encapsulation: ViewEncapsulation.None,
+})
+export class LoadTable {
+  /** The loads as they are typed. */
+  readonly rows = model.required<readonly LoadRow[]>();
+  /** What is wrong, by JSON pointer. */
+  readonly faults = input.required<ReadonlyMap<string, FieldFault>>();
+  readonly readonly = input(false);
+
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
+  private readonly injector = inject(Injector);
+  protected readonly natures = natures;
+  protected readonly shapes = shapes;
+  protected readonly shapeUnit = shapeUnit;
+  protected readonly categoryOptions = categoryOptions;
+
+  /** Writes an empty row and goes to it. */
+  add(): void {
+    const rows = [...this.rows(), emptyRow()];
+    this.rows.set(rows);
+    this.focus(rows.length - 1, 'input');
+  }
+
+  protected remove(row: LoadRow): void {
+    const index = this.rows().indexOf(row);
+    this.rows.set(this.rows().filter((one) => one !== row));
+    if (this.rows().length > 0) this.focus(Math.max(0, index - 1), '.ht-load-remove');
+    else this.focus(-1, '.ht-acts button');
+  }
+
+  protected change(row: LoadRow, change: Partial<LoadRow>): void {
+    this.rows.set(this.rows().map((one) => (one === row ? { ...row, ...change } : one)));
+  }
+
+  protected fault(row: LoadRow, field: string): FieldFault | undefined {
+    const pointer = rowPointer(this.rows(), row);
+    return this.faults().get(field === '' ? pointer : `${pointer}/${field}`);
+  }
+
+  protected pointer(row: LoadRow): string {
+    return rowPointer(this.rows(), row);
+  }
+
+  /** Enter goes to the same field one row down, Shift with it one up. */
+  protected press(event: Event, index: number): void {
+    const { target } = event;
+    if (!(event instanceof KeyboardEvent) || !(target instanceof HTMLInputElement)) return;
+    event.preventDefault();
+    const to = index + (event.shiftKey ? -1 : 1);
+    if (to < 0) return;
+    if (to >= this.rows().length) {
+      if (!this.readonly()) this.add();
+      return;
+    }
+    const cell = target.closest('[data-cell]')?.getAttribute('data-cell');
+    this.focus(to, `[data-cell="${cell ?? 'name'}"] input`);
+  }
+
+  private focus(index: number, selector: string): void {
+    const go = () => {
+      const row = index < 0 ? this.host : this.host.querySelectorAll('.ht-load')[index];
+      row?.querySelector<HTMLElement>(selector)?.focus();
+    };
+    afterNextRender(go, { injector: this.injector });
+  }
+}

@@ -1,0 +1,69 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  input,
+  ViewEncapsulation,
+} from '@angular/core';
+import type { Formula, MathElement, Step } from '../contract';
+import { Scrolls } from '../look/scrolls';
+import { readableQuantity } from '../quantity/format';
+import { MathPiece } from './math-line';
+import { numberElement, numbersIn, takesNumbers } from './numbers-in';
+import { symbolElement } from './symbols';
+
+const EQUALS: MathElement = { tag: 'mo', text: '=' };
+
+/** One line of the working: the formula, the formula with its numbers, the value, the clause. */
+@Component({
+  selector: 'htc-working-line',
+  templateUrl: './working-line.html',
+  imports: [MathPiece, Scrolls],
+  host: { class: 'ht-line' },
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  encapsulation: ViewEncapsulation.None,
+})
+export class WorkingLine {
+  readonly step = input.required<Step>();
+  /** The formula behind the line; while it is not there, its text with numbers stands in. */
+  readonly formula = input<Formula>();
+
+  /** The pieces of the line, each beginning at its equals sign. */
+  protected readonly pieces = computed((): readonly (readonly MathElement[])[] => {
+    const step = this.step();
+    const value = this.value(step);
+    const formula = this.formula();
+    if (!formula) return [[symbolElement(step.symbol ?? ''), ...value]];
+    const [symbol, , expression] = (formula.elements as unknown as MathElement).children ?? [];
+    if (!symbol || !expression) return [[symbolElement(formula.symbol), ...value]];
+    const numbers = takesNumbers(expression) ? [[EQUALS, numbersIn(expression, step.inputs)]] : [];
+    return [[symbol, EQUALS, expression], ...numbers, value];
+  });
+  /** What stands under the line in words: why a choice was made, or the text of the formula. */
+  protected readonly words = computed(() => {
+    const { kind, substituted, value } = this.step();
+    if (kind === 'choice') return substituted === String(value) ? '' : substituted;
+    return kind === 'formula' && !this.formula() ? substituted : '';
+  });
+  /** Every number that was put in, exact. */
+  protected readonly exact = computed(() => {
+    const step = this.step();
+    const inputs = Object.entries(step.inputs).map(
+      ([name, { value, unit }]) => `${name} = ${value} ${unit}`,
+    );
+    return [...inputs, `${step.symbol ?? ''} = ${step.value} ${step.unit}`]
+      .join('\n')
+      .replace(/ 1$/gm, '');
+  });
+  protected readonly said = computed(() => {
+    const { symbol, value, unit } = this.step();
+    const shown = typeof value === 'number' ? readableQuantity({ value, unit }) : value;
+    return `${symbol ?? ''} = ${shown}`;
+  });
+
+  private value({ value, unit }: Step): MathElement[] {
+    const shown =
+      typeof value === 'number' ? numberElement({ value, unit }) : { tag: 'mtext', text: value };
+    return [EQUALS, shown];
+  }
+}
