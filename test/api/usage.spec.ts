@@ -98,7 +98,7 @@ describe('404', () => {
 
 describe('422', () => {
   it.each([
-    'client=me',
+    'client=%07',
     'check=%00',
     'status=abc',
     'answer=maybe',
