@@ -41,6 +41,9 @@ async function hashOfSources() {
 /** @param {unknown} value */
 const text = (value) => `${JSON.stringify(value, null, 1)}\n`;
 
+/** @param {Json} document @returns {Json} */
+const copyOf = (document) => JSON.parse(JSON.stringify(document));
+
 /** @returns {Promise<{ document: Json, problems: string[] }>} */
 async function bundleSources() {
   const { bundle, loadConfig, lint } = await import('@redocly/openapi-core');
@@ -63,7 +66,7 @@ async function bundleSources() {
  * @param {Json} document @returns {Json}
  */
 export function servedOnly(document) {
-  const served = structuredClone(document);
+  const served = copyOf(document);
   for (const [path, item] of Object.entries(served.paths)) {
     for (const method of methods) {
       if (item[method]?.['x-served'] === false) delete item[method];
@@ -110,7 +113,7 @@ function reachable(document) {
 /** @param {Json} document */
 async function typesOf(document) {
   const { default: generate, astToString } = await import('openapi-typescript');
-  const tree = await generate(/** @type {any} */ (structuredClone(document)), {
+  const tree = await generate(/** @type {any} */ (copyOf(document)), {
     immutable: true,
     defaultNonNullable: false,
     emptyObjectsUnknown: true,

@@ -3474,7 +3474,7 @@ export interface components {
                 readonly "application/problem+json": components["schemas"]["Problem"];
             };
         };
-        /** @description Not valid, or outside what the check covers. Each fault has its JSON pointer; a `fix` where one is known. At most 20, the most specific first. Codes of `errors` are wrong-type, missing-field, unknown-field, not-one-of, one-of-both, not-a-quantity, wrong-unit, unknown-unit, negative, must-be-positive, too-large, too-small, too-many, too-few, empty, too-long, too-short, repeated, wrong-form, control-character, not-text, reserved-word, not-finite. */
+        /** @description Not valid, or outside what the check covers. Each fault has its JSON pointer; a `fix` where one is known. At most 20, the most specific first. Codes of `errors` are wrong-type, missing-field, unknown-field, not-one-of, one-of-both, not-a-quantity, wrong-unit, unknown-unit, negative, must-be-positive, too-large, too-small, too-many, too-many-fields, too-few, empty, too-long, too-short, repeated, wrong-form, control-character, not-text, reserved-word, not-finite. */
         readonly NotValid: {
             headers: {
                 readonly "X-Request-Id": components["headers"]["XRequestId"];

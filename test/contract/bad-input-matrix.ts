@@ -184,11 +184,13 @@ function word({ enum: words = [] }: ContractSchema, bad: Report): void {
 function text(schema: ContractSchema, bad: Report): void {
   const [valid = 'words'] = (schema.examples ?? []) as readonly string[];
   bad('empty', '', 'empty');
-  bad('blank', '      ');
   bad('a control character', `${valid}\u0007`, 'control-character');
   bad('a line break', `${valid}\n${valid}`.slice(0, schema.maxLength));
   bad('half of a character', `${valid}\ud800`, 'not-text');
-  bad('a turn of direction', `${valid}\u202e`, 'control-character');
+  if (schema.format !== 'password') {
+    bad('blank', '      ');
+    bad('a turn of direction', `${valid}\u202e`, 'control-character');
+  }
   bad('too long', 'a'.repeat((schema.maxLength ?? 0) + 1));
   if (schema.not?.enum) bad('a reserved word', '__proto__', 'reserved-word');
 }

@@ -3,6 +3,10 @@ import { type ContractSchema, nameOf, type QuantityRule, resolved } from './docu
 /** A schema as Ajv takes it: no OpenAPI words, each choice decided before its branches are tried. */
 export type AjvSchema = Record<string, unknown> & {
   oneOf?: unknown;
+  items?: unknown;
+  uniqueItems?: unknown;
+  if?: unknown;
+  then?: unknown;
   not?: unknown;
   exactlyOne?: unknown;
   atMostOne?: unknown;
@@ -48,11 +52,25 @@ export function toAjv(schema: ContractSchema): AjvSchema {
       Object.assign(out, choice(schema.oneOf));
     }
   }
+  if (schema.maxItems !== undefined) boundList(out, schema.maxItems);
   if (schema.not?.required) {
     delete out.not;
     out.atMostOne = schema.not.required;
   }
   return out;
+}
+
+/** The items of a list that is too long are not looked at: a megabyte of faults would take minutes. */
+function boundList(out: AjvSchema, maxItems: number): void {
+  const { items, uniqueItems } = out;
+  delete out.items;
+  delete out.uniqueItems;
+  out.if = { type: 'array', maxItems };
+  out.then = {
+    type: 'array',
+    ...(items !== undefined && { items }),
+    ...(uniqueItems !== undefined && { uniqueItems }),
+  };
 }
 
 function converted(key: string, value: unknown): unknown {

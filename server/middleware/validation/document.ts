@@ -35,6 +35,7 @@ export interface ContractSchema {
   readonly maxLength?: number;
   readonly uniqueItems?: boolean;
   readonly pattern?: string;
+  readonly format?: string;
   readonly 'x-quantity'?: QuantityRule;
   /** Why a field that a caller may expect is not one of this object's. */
   readonly 'x-hints'?: Readonly<Record<string, string>>;

@@ -8,9 +8,11 @@ import { either, fieldName, kindOf, quantityWords, shown, typeWords, unfit } fro
 
 /** A longer list of words is not read out. */
 const MOST_WORDS = 12;
+const LONGEST_NAME = 100;
 
-const child = (pointer: string, name: string) =>
-  `${pointer}/${name.replaceAll('~', '~0').replaceAll('/', '~1')}`;
+/** Pointer to a field; a name without end is cut, so that no answer is as long as the request. */
+export const child = (pointer: string, name: string): string =>
+  `${pointer}/${name.slice(0, LONGEST_NAME).replaceAll('~', '~0').replaceAll('/', '~1')}`;
 
 const quoted = (words: readonly unknown[]) => either(words.map((word) => JSON.stringify(word)));
 
@@ -90,7 +92,8 @@ function badQuantity(
       return item(pointer, fault.code, `${name} is ${given}${unit}; at most ${rule.max}${unit}.`);
     }
     case 'not-a-quantity': {
-      const bare = typeof data === 'string' && /^\s*[+-]?[\d.]+\s*$/.test(data);
+      const bare =
+        typeof data === 'string' && data.length <= 40 && /^\s*[+-]?[\d.]+\s*$/.test(data);
       const fix = bare
         ? `Give it as a number, ${data.trim()}, or with its unit, "${data.trim()}${unit}".`
         : undefined;
@@ -133,7 +136,9 @@ function badChoice(pointer: string, data: unknown, why: NoBranch): RefusalItem[]
   }
   const { wanted, known } = why;
   const parent = { properties: Object.fromEntries(wanted.map((name) => [name, {}])) };
-  const strange = Object.keys(body).filter((key) => !known.includes(key));
+  const strange = Object.keys(body)
+    .slice(0, 100)
+    .filter((key) => !known.includes(key));
   const misspelt = strange.filter((key) => nearest(key, wanted) !== undefined);
   if (misspelt.length > 0) return misspelt.map((key) => unknownField(pointer, key, parent));
   const at = child(pointer, wanted[0] ?? '');

@@ -11,9 +11,13 @@ export interface QuantityFault {
   readonly value?: number;
 }
 
+/** As QuantityInput of the contract has it. */
+const LONGEST_TEXT = 40;
+
 /** The fault of a value as a quantity, or nothing. */
 export function quantityFault(rule: QuantityRule, data: unknown): QuantityFault | undefined {
   if (typeof data !== 'number' && typeof data !== 'string') return { code: 'wrong-type' };
+  if (typeof data === 'string' && data.length > LONGEST_TEXT) return { code: 'not-a-quantity' };
   const parsed = parseQuantity(data, rule.unit);
   if (!parsed.ok) return { code: parsed.code, message: parsed.message };
   const { value } = parsed;

@@ -2,11 +2,17 @@ import { Ajv2020, type ValidateFunction } from 'ajv/dist/2020';
 import type { RefusalItem } from '../../engine/refusal';
 import { toAjv } from './branches';
 import { contract, schemaNamed } from './document';
-import { itemsOf } from './items';
+import { child, itemsOf } from './items';
 import { addKeywords } from './keywords';
 import { fieldName } from './words';
 
 const MOST_ITEMS = 20;
+/** Faults beyond these are not worded: a body made of nothing else would take seconds. */
+const MOST_FAULTS = 200;
+
+/** No object of the contract has nearly as many. */
+const MOST_KEYS = 200;
+const TOO_MANY_FIELDS = 'too-many-fields';
 
 /** Keys that reach an object's prototype when a program copies them carelessly. */
 const RESERVED_KEYS = new Set(['__proto__', 'constructor', 'prototype']);
@@ -19,7 +25,7 @@ const ajv = new Ajv2020({
   allErrors: true,
   verbose: true,
   validateSchema: false,
-  formats: { 'uri-reference': true },
+  formats: { 'uri-reference': true, 'date-time': true, password: true, uuid: true },
 });
 addKeywords(ajv);
 ajv.addSchema({
@@ -75,29 +81,47 @@ function ranked(items: readonly RefusalItem[]): RefusalItem[] {
 
 function faults(schemaName: string, body: unknown): readonly RefusalItem[] {
   const validate = validator(schemaName);
-  return validate(body) ? [] : (validate.errors ?? []).flatMap(itemsOf);
+  return validate(body) ? [] : (validate.errors ?? []).slice(0, MOST_FAULTS).flatMap(itemsOf);
 }
 
-/** Keys that no body may have, wherever they stand. */
-function reservedKeys(body: unknown): RefusalItem[] {
+const isObject = (value: unknown): value is object => typeof value === 'object' && value !== null;
+
+const isCrowded = (keys: readonly string[]) => keys.length > MOST_KEYS;
+
+/** Whether a key stands anywhere that no schema has to think of; cheap, since hardly one does. */
+function hasOddKeys(body: unknown): boolean {
+  const open = [body].filter(isObject);
+  for (let next = open.pop(); next; next = open.pop()) {
+    if (!Array.isArray(next)) {
+      const keys = Object.keys(next);
+      if (isCrowded(keys) || keys.some((key) => RESERVED_KEYS.has(key))) return true;
+    }
+    for (const value of Object.values(next)) if (isObject(value)) open.push(value);
+  }
+  return false;
+}
+
+/** Reserved keys and objects with keys without end, wherever they stand. */
+function oddKeys(body: unknown): RefusalItem[] {
+  if (!hasOddKeys(body)) return [];
   const found: RefusalItem[] = [];
   const open: [string, unknown][] = [['', body]];
-  for (let next = open.pop(); next; next = open.pop()) {
+  for (let next = open.pop(); next && found.length < MOST_ITEMS; next = open.pop()) {
     const [pointer, value] = next;
-    if (value === null || typeof value !== 'object') continue;
-    for (const key of Object.keys(value)) {
-      const at = `${pointer}/${key.replaceAll('~', '~0').replaceAll('/', '~1')}`;
-      if (RESERVED_KEYS.has(key) && !Array.isArray(value)) {
-        found.push({
-          pointer: at,
-          code: 'unknown-field',
-          message: `There is no field ${fieldName(at)}, nor can there be.`,
-        });
-      } else {
-        open.push([at, (value as Record<string, unknown>)[key]]);
+    if (!isObject(value)) continue;
+    if (!Array.isArray(value) && isCrowded(Object.keys(value))) {
+      const message = `${fieldName(pointer)} has more than ${MOST_KEYS} fields.`;
+      found.push({ pointer, code: TOO_MANY_FIELDS, message });
+      continue;
+    }
+    for (const [key, part] of Object.entries(value)) {
+      const at = child(pointer, key);
+      if (Array.isArray(value) || !RESERVED_KEYS.has(key)) open.push([at, part]);
+      else {
+        const message = `There is no field ${fieldName(at)}, nor can there be.`;
+        found.push({ pointer: at, code: 'unknown-field', message });
       }
     }
-    if (found.length >= MOST_ITEMS) break;
   }
   return found;
 }
@@ -108,8 +132,9 @@ function reservedKeys(body: unknown): RefusalItem[] {
  * @param schemaName name of the request in the contract, such as `WalerRequest`
  */
 export function validateRequest(schemaName: string, body: unknown): RefusalItem[] {
-  const reserved = reservedKeys(body);
-  return ranked([...reserved, ...faults(schemaName, body)]);
+  const odd = oddKeys(body);
+  if (odd.some(({ code }) => code === TOO_MANY_FIELDS)) return ranked(odd);
+  return ranked([...odd, ...faults(schemaName, body)]);
 }
 
 /** What is wrong with an answer against the contract; for tests and for the service's own watch. */
