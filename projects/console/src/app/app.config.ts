@@ -38,7 +38,12 @@ export const appConfig: ApplicationConfig = {
     { provide: MATERIAL_ANIMATIONS, useValue: { animationsDisabled: true } },
     {
       provide: MAT_FORM_FIELD_DEFAULT_OPTIONS,
-      useValue: { appearance: 'fill', floatLabel: 'always', subscriptSizing: 'dynamic' },
+      useValue: {
+        appearance: 'fill',
+        floatLabel: 'always',
+        hideRequiredMarker: true,
+        subscriptSizing: 'dynamic',
+      },
     },
     {
       provide: MAT_SELECT_CONFIG,

@@ -33,6 +33,12 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
     .actions:empty {
       display: none;
     }
+    @media (max-width: 760px) {
+      p {
+        order: 2;
+        width: 100%;
+      }
+    }
   `,
 })
 export class PageHead {

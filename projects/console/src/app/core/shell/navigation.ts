@@ -15,7 +15,7 @@ import { SchemeSwitch } from './scheme-switch';
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './navigation.html',
   styleUrl: './navigation.scss',
-  host: { '(keydown.escape)': 'open.set(false)' },
+  host: { role: 'banner', '(keydown.escape)': 'open.set(false)' },
 })
 export class Navigation {
   private readonly session = inject(Session);

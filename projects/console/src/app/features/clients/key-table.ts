@@ -26,6 +26,7 @@ import { daysLeft, type Key, scopesInWords, shownKey } from './client';
       overflow-wrap: anywhere;
     }
     .soon {
+      display: block;
       color: var(--warn);
     }
   `,

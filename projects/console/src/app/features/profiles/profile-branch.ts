@@ -16,7 +16,7 @@ interface DepartureLine {
   template: `
     <section class="part" [attr.aria-labelledby]="'branch-' + branch().name">
       <h2 [id]="'branch-' + branch().name">{{ branch().name }}</h2>
-      <div appScroll [attr.aria-label]="'Values of ' + branch().name">
+      <div appScroll [attr.aria-label]="'Table of ' + branch().name">
         <table class="sheet">
           <thead>
             <tr>
@@ -66,16 +66,16 @@ interface DepartureLine {
       table-layout: fixed;
     }
     th:nth-child(1) {
-      width: 23%;
+      width: 17%;
     }
     th:nth-child(2) {
-      width: 13%;
+      width: 10%;
     }
     th:nth-child(3) {
-      width: 21%;
+      width: 22%;
     }
     th:nth-child(4) {
-      width: 22%;
+      width: 31%;
     }
     td,
     tbody th {

@@ -15,7 +15,7 @@ import { Loading } from '../../shared/loading';
 import { PageHead } from '../../shared/page-head';
 import { ProblemNote } from '../../shared/problem-note';
 import { ScrollTable } from '../../shared/scroll-table';
-import { count, counted } from '../../shared/words';
+import { count, counted, inWords } from '../../shared/words';
 import { ProfileBranch } from './profile-branch';
 import { branchesOf, isUnconfirmed } from './provenance';
 import { standingWords } from './standing-words';
@@ -63,7 +63,10 @@ export class ProfilePage {
         recalled.length === 0
           ? 'none is from memory'
           : `${counted(recalled.length, 'is', 'are')} from memory`,
-      unconfirmed: unconfirmed === 0 ? null : counted(unconfirmed, 'of them', 'of them'),
+      unconfirmed:
+        unconfirmed === 0
+          ? '.'
+          : `, ${inWords(unconfirmed)} of them with no published example behind it: an answer that uses one is provisional.`,
       departures: counted(this.departures().length, 'departure'),
     };
   });

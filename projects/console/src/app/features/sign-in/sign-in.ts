@@ -9,11 +9,13 @@ import { Session } from '../../core/session/session';
 import { isInside } from '../../core/session/sign-in-for';
 import { Mark } from '../../core/shell/mark';
 import { SchemeSwitch } from '../../core/shell/scheme-switch';
+import { Drawing } from './drawing';
 import { refusalWords } from './refusal-words';
 
 @Component({
   selector: 'app-sign-in',
   imports: [
+    Drawing,
     ReactiveFormsModule,
     MatButton,
     MatError,

@@ -5,6 +5,8 @@ export interface UsageFigures {
   readonly calls: number;
   readonly refused: number;
   readonly clients: number;
+  /** Those who were signed in and asked without a key. */
+  readonly people: number;
   /** In microseconds; null without a call. */
   readonly within99: number | null;
   readonly commonest: Refusal | null;
@@ -15,6 +17,7 @@ export interface Refusal {
   readonly code: string;
   readonly calls: number;
   readonly clientId: string | null;
+  readonly clientName: string | null;
 }
 
 export interface Series {
@@ -49,12 +52,16 @@ export function within(calls: readonly Call[], share = 0.99): number | null {
   return times[Math.ceil(share * times.length) - 1] ?? null;
 }
 
+const distinct = (ids: readonly (string | null | undefined)[]): number =>
+  new Set(ids.filter((id) => typeof id === 'string')).size;
+
 export function figuresOf(calls: readonly Call[]): UsageFigures {
   const refused = calls.filter(isRefused);
   return {
     calls: sum(calls),
     refused: sum(refused),
-    clients: new Set(calls.map(({ clientId }) => clientId).filter((id) => id !== null)).size,
+    clients: distinct(calls.map(({ clientId }) => clientId)),
+    people: distinct(calls.map(({ personId }) => personId)),
     within99: within(calls),
     commonest: commonest(refused),
     series: seriesOf(calls),
@@ -63,10 +70,10 @@ export function figuresOf(calls: readonly Call[]): UsageFigures {
 
 function commonest(refused: readonly Call[]): Refusal | null {
   const totals = new Map<string, Refusal>();
-  for (const { code, clientId, repeats } of refused) {
+  for (const { code, clientId, clientName = null, repeats } of refused) {
     if (code === null) continue;
     const id = `${code} ${clientId}`;
-    totals.set(id, { code, clientId, calls: (totals.get(id)?.calls ?? 0) + repeats });
+    totals.set(id, { code, clientId, clientName, calls: (totals.get(id)?.calls ?? 0) + repeats });
   }
   return [...totals.values()].sort((a, b) => b.calls - a.calls)[0] ?? null;
 }

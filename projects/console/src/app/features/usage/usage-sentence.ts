@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { Choices } from '../../core/choices/choices';
-import { capital, count, counted, percent } from '../../shared/words';
+import { capital, count, counted, listed, percent } from '../../shared/words';
 import type { UsageFigures } from './usage-figures';
 
 /** What matters about the calls, said in one or two sentences. */
@@ -19,18 +19,17 @@ import type { UsageFigures } from './usage-figures';
         @if (figures().refused === 0) {
           None was refused.
         } @else {
-          <b>{{ refused() }}</b> {{ figures().refused === 1 ? 'was' : 'were' }} refused
+          <b>{{ refused() }}</b> {{ share() }}
           @if (figures().commonest; as commonest) {
-            <ng-container>, {{ share() }} </ng-container>
-            <a [href]="'/problems/' + commonest.code">{{ commonest.code }}</a>
             @if (commonest.clientId; as id) {
-              from
+              <a [href]="'/problems/' + commonest.code">{{ commonest.code }}</a> from
               <a routerLink="/usage" queryParamsHandling="merge" [queryParams]="{ client: id }">{{
-                choices.clientName(id)
-              }}</a>
+                commonest.clientName ?? choices.clientName(id)
+              }}</a>.
+            } @else {
+              <a [href]="'/problems/' + commonest.code">{{ commonest.code }}</a>.
             }
           }
-          <ng-container>.</ng-container>
         }
       }
     </p>
@@ -53,17 +52,23 @@ export class UsageSentence {
     percent(this.figures().refused, this.figures().calls),
   );
   protected readonly opening = computed(() => {
-    const { clients } = this.figures();
-    const who = capital(counted(clients, 'client'));
-    if (!this.complete())
-      return { before: 'Of the last ', after: `, made by ${counted(clients, 'client')},` };
+    const { clients, people } = this.figures();
+    const who = [
+      ...(clients > 0 ? [counted(clients, 'client')] : []),
+      ...(people > 0 ? [counted(people, 'person', 'people')] : []),
+    ];
     const when = this.period() === 'all there is' ? '' : ` in the ${this.period()}`;
-    if (clients === 0) return { before: 'There were ', after: `${when}, without a known key.` };
-    return { before: `${who} made `, after: `${when}.` };
+    if (!this.complete())
+      return { before: 'Of the last ', after: who.length > 0 ? `, made by ${listed(who)},` : ',' };
+    if (who.length === 0) return { before: 'There were ', after: `${when}, without a known key.` };
+    return { before: `${capital(listed(who))} made `, after: `${when}.` };
   });
+  /** What stands between the share that was refused and the commonest code. */
   protected readonly share = computed(() => {
     const { commonest, refused } = this.figures();
-    if (!commonest || commonest.calls === refused) return refused === 1 ? 'with' : 'all of them';
-    return commonest.calls * 2 > refused ? 'most of them' : 'most often';
+    const were = refused === 1 ? 'was refused' : 'were refused';
+    if (!commonest) return `${were}.`;
+    if (commonest.calls === refused) return refused === 1 ? `${were}:` : `${were}, all of them`;
+    return commonest.calls * 2 > refused ? `${were}, most of them` : `${were}, most often`;
   });
 }
