@@ -4,6 +4,7 @@
  */
 import { prepare } from './prepare';
 import { readConfig } from '../server/config';
+import type { DemoPerson } from './seeders/people';
 
 async function run(): Promise<void> {
   const { databaseUrl, databaseOwnerUrl } = readConfig();
@@ -11,10 +12,16 @@ async function run(): Promise<void> {
   const prepared = await prepare({
     ownerUrl: databaseOwnerUrl,
     applicationRole: decodeURIComponent(new URL(databaseUrl).username),
-    ...(process.argv.includes('--demo') && { demo: { key: process.env.HEADTREE_DEMO_KEY } }),
+    ...(process.argv.includes('--demo') && {
+      demo: { key: process.env.HEADTREE_DEMO_KEY, people: knownPeople() },
+    }),
   });
   process.stdout.write(`${JSON.stringify(prepared)}\n`);
 }
+
+/** What the start command remembers of them. */
+const knownPeople = (): DemoPerson[] =>
+  JSON.parse(process.env.HEADTREE_DEMO_PEOPLE ?? '[]') as DemoPerson[];
 
 run().catch((error: unknown) => {
   // Only the message: a driver's error object can hold the password.

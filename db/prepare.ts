@@ -3,13 +3,14 @@ import { withLock } from './lock';
 import { migrate } from './migrate';
 import { makePartitions } from './partitions';
 import { publishProfiles } from './publish';
+import { seedPeople, type DemoPerson } from './seeders/people';
 import { seedScenario } from './seeders/scenario';
 
 export interface PrepareOptions {
   readonly ownerUrl: string;
   readonly applicationRole: string;
-  /** Adds the invented scenario and its key, which is minted unless this one still opens. */
-  readonly demo?: { readonly key: string | undefined };
+  /** Adds the invented scenario; its key and passwords are made anew unless these still open. */
+  readonly demo?: { readonly key: string | undefined; readonly people: readonly DemoPerson[] };
 }
 
 export interface Prepared {
@@ -18,6 +19,8 @@ export interface Prepared {
   readonly published: readonly string[];
   /** The scenario's secret key: the only time it is told. */
   readonly demoKey?: string;
+  /** Its people with their passwords: told here alone. */
+  readonly demoPeople?: readonly DemoPerson[];
 }
 
 /** Makes a database fit to serve; doing it again changes only what is missing. */
@@ -29,7 +32,10 @@ export async function prepare(options: PrepareOptions): Promise<Prepared> {
       migrations: await migrate(owner, { applicationRole }),
       partitions: await withLock(ownerUrl, 'upkeep', () => makePartitions(owner)),
       published: await publishProfiles(owner),
-      ...(demo && { demoKey: await seedScenario(owner, demo.key) }),
+      ...(demo && {
+        demoKey: await seedScenario(owner, demo.key),
+        demoPeople: await seedPeople(owner, demo.people),
+      }),
     }));
   } finally {
     await owner.close();

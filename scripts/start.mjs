@@ -14,6 +14,7 @@ import { claimHome } from './lib/run-file.mjs';
 import { stopRunning } from './lib/run.mjs';
 import { outliveReader, print, say, Stop } from './lib/say.mjs';
 import { startService, waitUntilReady } from './lib/service.mjs';
+import { sessionSecret } from './lib/session-secret.mjs';
 import { welcome } from './lib/welcome.mjs';
 
 const ending = makeEnding();
@@ -35,8 +36,8 @@ async function launch() {
   const [database] = await allSettled(openDatabase(place), build());
   ending.check();
   const { urls, settings, cluster } = database;
-  const { demoKey } = await prepare(urls, settings && { key: settings.demoKey });
-  if (settings && demoKey !== undefined) writeSettings(home, { ...settings, demoKey });
+  const { demoKey, demoPeople = [] } = await prepare(urls, settings);
+  if (settings && demoKey !== undefined) writeSettings(home, { ...settings, demoKey, demoPeople });
   ending.check();
   // Callers of the API are served all the same: the pages answer that they are not built.
   await buildWeb().catch((error) => say(textOf(error)));
@@ -48,7 +49,11 @@ async function launch() {
     HEADTREE_HOME: home,
   });
   // The owner's connection is for the worker alone: what answers callers cannot change the schema.
-  const apiEnv = { ...env, HEADTREE_DATABASE_OWNER_URL: undefined };
+  const apiEnv = {
+    ...env,
+    HEADTREE_DATABASE_OWNER_URL: undefined,
+    HEADTREE_SESSION_SECRET: process.env.HEADTREE_SESSION_SECRET || sessionSecret(home),
+  };
   const logOf = (/** @type {string} */ name) => join(home, `logs/${name}.log`);
   const start = (/** @type {string} */ name, /** @type {string} */ script, each = env) => {
     const log = logOf(name);
@@ -60,7 +65,7 @@ async function launch() {
   claim.remember(services.map(({ mark }) => mark.pid));
   await waitUntilReady(url, services, ending);
   say('ready');
-  welcome({ url, demoKey, home });
+  welcome({ url, demoKey, demoPeople, home });
   return cluster ? [...services, cluster] : services;
 }
 

@@ -26,7 +26,10 @@ export const isRoot = process.getuid?.() === 0;
  * @property {number} [databasePort]
  * @property {string} [databaseFolder] where the cluster is, when not in the home itself
  * @property {string} [demoKey]
+ * @property {DemoPerson[]} [demoPeople]
  */
+
+/** @typedef {{ email: string, role: string, password: string, passwordHash: string }} DemoPerson */
 
 /**
  * Makes the private folder. PostgreSQL's user must be able to pass through it when root runs this.

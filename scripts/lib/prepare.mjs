@@ -5,19 +5,25 @@ import { root } from './home.mjs';
 import { run } from './run.mjs';
 import { say, Stop } from './say.mjs';
 
-/** @typedef {{ migrations: string[], partitions: string[], published: string[], demoKey?: string }} Prepared */
+/** @typedef {{ migrations: string[], partitions: string[], published: string[], demoKey?: string, demoPeople?: import('./home.mjs').DemoPerson[] }} Prepared */
 
 /**
  * Migrates the database and fills in what the service needs.
  * @param {import('./database.mjs').Urls} urls
- * @param {{ key: string | undefined } | undefined} demo adds the invented scenario
+ * @param {Pick<import('./home.mjs').Settings, 'demoKey' | 'demoPeople'> | undefined} demo adds the invented scenario
  * @returns {Promise<Prepared>}
  */
 export async function prepare(urls, demo) {
   const ran = await run(
     process.execPath,
     ['--enable-source-maps', join(output, 'prepare.js'), ...(demo ? ['--demo'] : [])],
-    { cwd: root, env: serviceEnvironment(urls, { HEADTREE_DEMO_KEY: demo?.key }) },
+    {
+      cwd: root,
+      env: serviceEnvironment(urls, {
+        HEADTREE_DEMO_KEY: demo?.demoKey,
+        HEADTREE_DEMO_PEOPLE: JSON.stringify(demo?.demoPeople ?? []),
+      }),
+    },
   );
   if (ran.code !== 0) {
     const reason = lastLine(ran.stderr);

@@ -23,10 +23,14 @@ const FIRST_CHECK = {
 
 /**
  * What there is now and a first call that works as pasted.
- * @param {{ url: string, demoKey: string | undefined, home: string }} place
+ * @param {{ url: string, demoKey: string | undefined, demoPeople: import('./home.mjs').DemoPerson[], home: string }} place
  */
-export function welcome({ url, demoKey, home }) {
+export function welcome({ url, demoKey, demoPeople, home }) {
   print('', `  Headtree  ${url}`, `  Docs      ${url}/docs`);
+  for (const [index, { role, email, password }] of demoPeople.entries()) {
+    const words = index === 0 ? 'Sign in as' : '';
+    print(`  ${words.padEnd(10)} ${role}: ${email} password ${password}`);
+  }
   if (demoKey !== undefined) {
     print(
       `  Key       ${demoKey}`,

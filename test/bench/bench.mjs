@@ -96,8 +96,10 @@ try {
   ending.add(() => rmSync(home, { recursive: true, force: true }));
   await build();
   const { urls } = await startDatabase({ home, database: 'bench', ending, throwAway: true });
-  const { demoKey } = await prepare(urls, { key: undefined });
+  const { demoKey } = await prepare(urls, {});
   const owner = new pg.Client({ connectionString: urls.owner });
+  // Ended below; at a failure the cluster is stopped under it.
+  owner.on('error', () => undefined);
   await owner.connect();
   await owner.query('UPDATE api_keys SET rate_limit = 2000000000');
 

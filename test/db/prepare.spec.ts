@@ -1,11 +1,21 @@
 import type { Sequelize } from 'sequelize';
 import { connect } from '../../db/connect';
 import { pendingMigrations } from '../../db/migrate';
-import { ApiKey, Client, FactorProfile, ProfileRevisionRow } from '../../db/models';
+import {
+  ApiKey,
+  AuditEvent,
+  Client,
+  FactorProfile,
+  ProfileRevisionRow,
+  User,
+} from '../../db/models';
 import { prepare } from '../../db/prepare';
+import type { DemoPerson } from '../../db/seeders/people';
 import { addApprovedRevision, contentHash } from '../../db/revise';
 import { publishedProfiles } from '../../server/engine/profiles/published';
 import { keyPattern, parseKey } from '../../server/features/keys/key-format';
+import { matchesPassword } from '../../server/features/people/password';
+import { roles } from '../../server/features/people/policy';
 import { createDatabase, type TestDatabase } from '../support/database';
 
 describe('a prepared database', () => {
@@ -29,7 +39,7 @@ describe('a prepared database', () => {
   });
 
   async function demo(key?: string): Promise<string> {
-    const { demoKey } = await prepare({ ...options, demo: { key } });
+    const { demoKey } = await prepare({ ...options, demo: { key, people: [] } });
     await owner.close();
     owner = connect(database.ownerUrl, { max: 1 });
     return demoKey ?? '';
@@ -105,5 +115,31 @@ describe('a prepared database', () => {
     expect(second).not.toBe(first);
     const rows = await ApiKey.findAll({ where: { revokedAt: null } });
     expect(rows.map(({ selector }) => selector)).toEqual([parseKey(second)?.selector]);
+  });
+
+  it('has one person of the scenario for each role, whose password is made here and kept', async () => {
+    const seed = async (people: readonly DemoPerson[]): Promise<readonly DemoPerson[]> => {
+      const { demoPeople = [] } = await prepare({ ...options, demo: { key: undefined, people } });
+      await owner.close();
+      owner = connect(database.ownerUrl, { max: 1 });
+      return demoPeople;
+    };
+    const first = await seed([]);
+    expect(first.map(({ role }) => role)).toEqual(roles);
+    expect(new Set(first.map(({ password }) => password)).size).toBe(roles.length);
+    const rows = await User.findAll();
+    for (const { email, role, password } of first) {
+      const row = rows.find((each) => each.email === email);
+      expect(row?.roles).toEqual([role]);
+      expect(matchesPassword(password, row?.passwordHash)).toBe(true);
+    }
+    expect(await seed(first)).toEqual(first);
+    const [admin, ...others] = await seed(first.slice(1));
+    expect(others).toEqual(first.slice(1));
+    expect(admin?.password).not.toBe(first[0]?.password);
+    const row = await User.findOne({ where: { email: admin?.email ?? '' } });
+    expect(matchesPassword(admin?.password ?? '', row?.passwordHash)).toBe(true);
+    const said = JSON.stringify(await AuditEvent.findAll());
+    for (const each of [...first, admin]) expect(said).not.toContain(each?.password);
   });
 });
