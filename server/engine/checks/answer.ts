@@ -59,9 +59,25 @@ export function assemble(findings: Findings): CheckAnswer {
   return {
     ...answer,
     steps: [...findings.common.steps, ...findings.steps],
-    combinations: findings.combinations(),
+    combinations: listed(findings),
     diagrams: findings.diagrams(),
   };
+}
+
+/** More combinations than anyone reads: then only those that the answer names are listed. */
+const MOST_LISTED = 500;
+
+function listed({ combinations, verifications, reactions }: Findings): CombinationLine[] {
+  const all = combinations();
+  if (all.length <= MOST_LISTED) return all;
+  const named = new Set<string | null | undefined>(
+    reactions.flatMap(({ design }) => [
+      design.persistent?.combination,
+      design.accidental?.combination,
+    ]),
+  );
+  for (const { combination } of verifications) named.add(combination);
+  return all.filter(({ id }) => named.has(id));
 }
 
 /**

@@ -1,5 +1,5 @@
 import type { BeamState } from '../../analysis/beam-state';
-import { envelope, type EnvelopePoint } from '../../analysis/envelope';
+import { deflectionEnvelope, forceEnvelope, type EnvelopePoint } from '../../analysis/envelope';
 import { toUnit, type UnitName } from '../../units/units';
 import type { Diagrams } from '../contract';
 import type { SolvedCase } from './solve';
@@ -10,7 +10,7 @@ export function diagramsOf(solved: readonly SolvedCase[], share: number): Diagra
     solved
       .filter(({ combination }) => (combination.situation === 'serviceability') === service)
       .flatMap(({ state }) => (state ? [state] : []));
-  const strength = envelope(states(false));
+  const strength = forceEnvelope(states(false));
   const points = (list: readonly EnvelopePoint[], unit: UnitName, factor: number) =>
     list.map(({ span, x, min, max }) => ({
       span,
@@ -21,6 +21,6 @@ export function diagramsOf(solved: readonly SolvedCase[], share: number): Diagra
   return {
     moment: points(strength.moment, 'kN m', share),
     shear: points(strength.shear, 'kN', share),
-    deflection: points(envelope(states(true)).deflection, 'mm', 1),
+    deflection: points(deflectionEnvelope(states(true)), 'mm', 1),
   };
 }

@@ -4,7 +4,7 @@ import type { BeamState } from '../../analysis/beam-state';
 import { loadsByPanel } from '../../analysis/clip-load';
 import { solveCompressionOnly } from '../../analysis/compression-only';
 import { ContinuousBeam } from '../../analysis/continuous-beam';
-import { loadPatterns, type LoadPattern } from '../../analysis/load-patterns';
+import { everyPattern, loadPatterns, type LoadPattern } from '../../analysis/load-patterns';
 import { UnitCases } from '../../analysis/unit-cases';
 import { refuse } from '../refuse';
 import type { LoadCaseSet } from './load-sets';
@@ -40,11 +40,27 @@ interface CaseSlot {
   readonly loads: readonly BeamLoad[];
 }
 
-/** Solving and verifying more numbers than this would hold the caller up: about ten seconds' worth. */
-const MOST_WORK = 40_000_000;
+/** All combinations of a request, solved. */
+export interface SolvedCases {
+  readonly cases: readonly SolvedCase[];
+  /**
+   * Whether the arrangements of variable loads hold the greatest effect of every arrangement there
+   * is. Beyond that many panels they may not, where supports lift or give.
+   */
+  readonly arrangementsComplete: boolean;
+}
+
+/** Solving and verifying more numbers than this would hold the caller up for many seconds. */
+const MOST_WORK = 1_000_000;
+
+/** Up to as many panels every arrangement is solved where the usual ones may not be enough. */
+const MOST_PANELS = 10;
 
 /**
- * Solves every combination of every set, each with every arrangement of its variable loads.
+ * Solves every combination of every set, each with the arrangements of its variable loads.
+ *
+ * On rigid supports that all hold, 2n + 2 arrangements give the full envelope. Where a support
+ * lifts or gives under one of them they may fall short, and every arrangement is solved.
  *
  * @throws {Refusal} `too-many-combinations`
  */
@@ -52,34 +68,61 @@ export function solveCases(
   geometry: BeamGeometry,
   sets: readonly LoadCaseSet[],
   supports: SupportKind,
-): SolvedCase[] {
-  const solved: SolvedCase[] = [];
+): SolvedCases {
   // One beam for all sets, so that their states have the same breakpoints and one envelope.
   const beam = new ContinuousBeam(
     geometry,
     sets.flatMap(({ actions }) => actions.flatMap(loadsOf)),
   );
-  const { frame } = beam;
+  const cases: SolvedCase[] = [];
+  let arrangementsComplete = true;
   for (const set of sets) {
     const source = caseSource(beam, set);
-    const patterns = loadPatterns(frame.panels.length);
-    const work = set.combinations.length * patterns.length * frame.pieces * 40;
-    if (work > MOST_WORK) {
-      refuse(
-        'too-many-combinations',
-        set.id === null ? '/loads' : '/loadSets',
-        `${set.combinations.length} combinations with ${patterns.length} arrangements each over ${frame.panels.length} spans are too many; name fewer sources of load or divide the member.`,
-      );
-    }
     for (const combination of set.combinations) {
-      for (const pattern of patternsOf(combination, source, patterns)) {
-        solved.push(
-          solveCase(`C${solved.length + 1}`, set.id, combination, pattern, source, supports),
-        );
-      }
+      const solve = (pattern: LoadPattern | null): SolvedCase =>
+        solveCase(set.id, combination, pattern, source, supports);
+      const { solved, complete } = solveArrangements(combination, source, solve);
+      arrangementsComplete &&= complete;
+      cases.push(...solved);
+      refuseTooMuch(cases.length * beam.frame.pieces, set);
     }
   }
-  return solved;
+  return {
+    cases: cases.map((one, index) => ({ ...one, id: `C${index + 1}` })),
+    arrangementsComplete,
+  };
+}
+
+function refuseTooMuch(work: number, set: LoadCaseSet): void {
+  if (work <= MOST_WORK) return;
+  refuse(
+    'too-many-combinations',
+    set.id === null ? '/loads' : '/loadSets',
+    'The sources of load have too many combinations and arrangements over so many spans; name fewer sources or divide the member.',
+  );
+}
+
+function solveArrangements(
+  combination: Combination,
+  source: CaseSource,
+  solve: (pattern: LoadPattern | null) => SolvedCase,
+): { readonly solved: SolvedCase[]; readonly complete: boolean } {
+  if (!isArranged(combination, source)) return { solved: [solve(null)], complete: true };
+  const { frame } = source.units.beam;
+  const panels = frame.panels.length;
+  const usual = loadPatterns(panels).map(solve);
+  const gives = frame.geometry.supportStiffness.some((stiffness) => stiffness !== null);
+  const lifts = usual.some(({ state, lifted }) => state === null || lifted.length > 0);
+  if (!gives && !lifts) return { solved: usual, complete: true };
+  if (panels > MOST_PANELS) return { solved: usual, complete: false };
+  return { solved: everyPattern(panels).map(solve), complete: true };
+}
+
+/** Whether a variable load of the combination comes span by span. */
+function isArranged({ factors }: Combination, { slots }: CaseSource): boolean {
+  return slots.some(
+    ({ panel, action }) => panel !== null && (factors[action.action.name] ?? 0) !== 0,
+  );
 }
 
 function loadsOf({ bySpan, whole }: ActionLoads): readonly BeamLoad[] {
@@ -105,22 +148,7 @@ function caseSource(beam: ContinuousBeam, set: LoadCaseSet): CaseSource {
   };
 }
 
-/** All arrangements where a variable load of the combination comes span by span, else none. */
-function patternsOf(
-  { factors, expression }: Combination,
-  { slots }: CaseSource,
-  patterns: readonly LoadPattern[],
-): readonly (LoadPattern | null)[] {
-  const arranged = slots.some(
-    ({ panel, action }) => panel !== null && (factors[action.action.name] ?? 0) !== 0,
-  );
-  if (!arranged) return [null];
-  // Among combinations the empty arrangement is the combination without its variable actions.
-  return expression === 'none' ? patterns : patterns.filter(({ name }) => name !== 'none');
-}
-
 function solveCase(
-  id: string,
   loadSet: string | null,
   combination: Combination,
   pattern: LoadPattern | null,
@@ -132,7 +160,7 @@ function solveCase(
     supports === 'compression-only'
       ? solveCompressionOnly(source.units, factors)
       : source.units.combine(factors);
-  const base = { id, loadSet, combination, pattern, source };
+  const base = { id: '', loadSet, combination, pattern, source };
   return solution.kind === 'mechanism'
     ? { ...base, state: null, lifted: [] }
     : { ...base, state: solution.state, lifted: solution.lifted.map((index) => index + 1) };

@@ -7,6 +7,7 @@ export function advisoriesOf(
   request: WalerRequest,
   section: SteelISection,
   cases: readonly SolvedCase[],
+  arrangementsComplete: boolean,
 ): AdvisoryAnswer[] {
   const list: AdvisoryAnswer[] = [];
   if (section.gamma_M0 < 1.1) {
@@ -39,6 +40,15 @@ export function advisoriesOf(
       severity: 'caution',
       message:
         'Variable loads are taken on all spans or on none, as asked. Span by span they may do more.',
+      clause: 'EN 1990 6.4.3.1(4)',
+    });
+  }
+  if (!arrangementsComplete) {
+    list.push({
+      code: 'arrangements-not-all',
+      severity: 'caution',
+      message:
+        'Props lift or give under variable loads over more spans than every arrangement is solved for: all, none, every second span and the neighbours of each prop were. Other arrangements may do more.',
       clause: 'EN 1990 6.4.3.1(4)',
     });
   }

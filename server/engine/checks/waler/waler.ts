@@ -47,7 +47,11 @@ function run(request: WalerRequest, { profile: revision, detail }: CheckContext)
     ...layout,
     flexuralRigidity: (section.E * section.properties.I_y) / section.share,
   };
-  const cases = solveCases(geometry, sets, request.supports ?? 'compression-only');
+  const { cases, arrangementsComplete } = solveCases(
+    geometry,
+    sets,
+    request.supports ?? 'compression-only',
+  );
   const deflection = waived.some(({ verification }) => verification === 'deflection')
     ? null
     : deflectionOf(request, cases, withSteps);
@@ -72,7 +76,7 @@ function run(request: WalerRequest, { profile: revision, detail }: CheckContext)
     missing: missingOf(request, waived, deflection !== null),
     waived,
     notCovered: NOT_COVERED,
-    advisories: advisoriesOf(request, section, cases),
+    advisories: advisoriesOf(request, section, cases, arrangementsComplete),
     standards: ['EN 1990:2002+A1:2005', 'EN 1993-1-1:2005+A1:2014'],
     reactions: frame ? reactionsOf(frame, cases) : [],
     combinations: () => cases.map(combinationLine),
