@@ -46,7 +46,7 @@ export class Gatherer<Row, Result> {
       isPoison: () => false,
       maxBatch: 500,
       maxWaiting: 5_000,
-      maxAge: 2_000,
+      maxAge: 5_000,
       clock: () => performance.now(),
       ...options,
     };
