@@ -15,6 +15,9 @@ export function readLayout(request: GeometryInput): SupportLayout {
     start: readQuantity(request.overhangs?.start ?? 0, 'm'),
     end: readQuantity(request.overhangs?.end ?? 0, 'm'),
   };
+  spans.forEach((span, index) => longEnough(span, `/spans/${index}`));
+  if (overhangs.start > 0) longEnough(overhangs.start, '/overhangs/start');
+  if (overhangs.end > 0) longEnough(overhangs.end, '/overhangs/end');
   const supports = spans.length + 1;
   const stiffness = request.supportStiffness ?? Array.from({ length: supports }, () => null);
   if (stiffness.length !== supports) {
@@ -29,6 +32,18 @@ export function readLayout(request: GeometryInput): SupportLayout {
     overhangs,
     supportStiffness: stiffness.map((one) => (one === null ? null : readQuantity(one, 'kN/mm'))),
   };
+}
+
+/** mm: shorter is a slip of the unit, and beyond what the solver can tell apart from nothing. */
+const SHORTEST = 10;
+
+function longEnough(length: number, pointer: string): void {
+  if (length >= SHORTEST) return;
+  refuse(
+    'too-short',
+    pointer,
+    `${length} mm is no span; the shortest that is taken is ${SHORTEST} mm.`,
+  );
 }
 
 /** Ends of the member in mm from the first support. */

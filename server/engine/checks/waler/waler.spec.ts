@@ -297,6 +297,7 @@ describe('loads that do not fit the member', () => {
       'reserved-name',
       '/loads/0/name',
     ],
+    ['a span of next to nothing', { spans: [1e-320, 3] }, 'too-short', '/spans/0'],
     ['none at all', { loads: [] }, 'empty', '/loads'],
     [
       'wrong number of stiffnesses',
