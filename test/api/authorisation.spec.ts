@@ -1,4 +1,12 @@
 import { ask, type Answered } from './support/ask';
+import { addPerson, signIn, type Visitor } from './support/people';
+import {
+  permissions,
+  policy,
+  roles,
+  type Permission,
+  type Role,
+} from '../../server/features/people/policy';
 import { assertRoutes, type Route } from '../../server/middleware/route';
 import { mintKey } from '../../server/features/keys/key-format';
 import { createApp } from '../../server/app';
@@ -156,6 +164,91 @@ describe('each route', () => {
         taken.push(await call(route, bearer(service.keys.page), site));
       for (const { status } of taken) expect([200, 404, 422]).toContain(status);
     }
+  });
+});
+
+/** Every route that people use, with the permission it asks for. */
+const forPeople = (): [route: Route, permission: Permission][] =>
+  service.routes.flatMap((route): [Route, Permission][] => {
+    const { policy } = route;
+    const permission = policy.kind === 'public' ? undefined : policy.permission;
+    return permission === undefined ? [] : [[route, permission]];
+  });
+
+const changes = (route: Route): boolean => route.method !== 'get';
+
+describe('each route that people use', () => {
+  const visitors = new Map<Role, Visitor>();
+  beforeAll(async () => {
+    for (const role of roles) {
+      const email = `${role}@firm.example`;
+      await addPerson(service, email, [role]);
+      visitors.set(role, await signIn(service, email));
+    }
+  });
+
+  const visit = (visitor: Visitor, route: Route, headers = {}): Promise<Answered> =>
+    visitor.ask({
+      method: route.method,
+      path: pathOf(route),
+      headers,
+      ...(changes(route) && { body: {} }),
+    });
+
+  it('has a permission that somebody has', () => {
+    expect(forPeople().length).toBeGreaterThan(12);
+    for (const [, permission] of forPeople()) expect(policy[permission].length).toBeGreaterThan(0);
+    const asked = new Set(forPeople().map(([, permission]) => permission));
+    expect([...asked].sort()).toEqual([...permissions].sort());
+  });
+
+  it.each([...roles])('takes and refuses the role %s by the table', async (role) => {
+    const visitor = visitors.get(role);
+    if (!visitor) throw new Error('Nobody has the role.');
+    for (const [route, permission] of forPeople()) {
+      const at = `${route.method} ${route.path}`;
+      const { status, body } = await visit(visitor, route);
+      const may = (policy[permission] as readonly Role[]).includes(role);
+      if (may) expect([at, [200, 404, 422].includes(status)]).toEqual([at, true]);
+      else expect([at, status, body.code]).toEqual([at, 403, 'permission-missing']);
+    }
+  });
+
+  it('takes nobody from another page, and no change without the token', async () => {
+    const visitor = visitors.get('admin');
+    if (!visitor) throw new Error('There is no admin.');
+    for (const [route] of forPeople()) {
+      const at = `${route.method} ${route.path}`;
+      for (const headers of [{ Origin: site }, { Origin: 'null' }]) {
+        const { status, body } = await visit(visitor, route, headers);
+        expect([at, status, body.code]).toEqual([at, 403, 'origin-not-allowed']);
+      }
+      const { status, body } = await visit(visitor, route, { 'X-CSRF-Token': 'x' });
+      if (changes(route)) expect([at, status, body.code]).toEqual([at, 403, 'csrf-token-missing']);
+      else expect(status).not.toBe(403);
+    }
+  });
+
+  it('takes no key where it is for people alone', async () => {
+    for (const [route] of forPeople()) {
+      if (route.policy.kind !== 'session') continue;
+      for (const key of [undefined, bearer(service.keys.secret), bearer(service.keys.usage)]) {
+        const { status, body, headers } = await call(route, key);
+        expect([status, body.code]).toEqual([401, 'sign-in-required']);
+        expect(headers['www-authenticate']).toBe('Cookie realm="headtree"');
+      }
+    }
+  });
+
+  it('takes nobody whose roles were taken away, from the next request on', async () => {
+    await addPerson(service, 'was-admin@firm.example', ['admin', 'engineer']);
+    const visitor = await signIn(service, 'was-admin@firm.example');
+    expect((await visitor.ask({ path: '/v1/clients' })).status).toBe(200);
+    await service.sql(
+      `update users set roles = '{engineer}' where email = 'was-admin@firm.example'`,
+    );
+    expect((await visitor.ask({ path: '/v1/clients' })).status).toBe(403);
+    expect((await visitor.ask({ path: '/v1/checks' })).status).toBe(200);
   });
 });
 

@@ -8,7 +8,8 @@ interface Spelling {
 
 /** `457 x 191 UB` and `UB 457x191` are one: letters and numbers, each in their order. */
 function spelling(text: string): Spelling {
-  const key = designationKey(text);
+  // Somebody is still typing.
+  const key = designationKey(text.replace(/(\d)\s*[x×*]\s*$/i, '$1'));
   const space = key.indexOf(' ');
   return { letters: key.slice(0, space), numbers: key.slice(space + 1) };
 }

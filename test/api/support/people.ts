@@ -36,7 +36,7 @@ export const trySignIn = (
 
 /** `name=value` of the cookie that an answer sets. */
 export const cookieOf = ({ headers }: Answered): string =>
-  String(headers['set-cookie'] ?? '').split(';', 1)[0] ?? '';
+  [headers['set-cookie'] ?? ''].flat().join().split(';', 1)[0] ?? '';
 
 /** Somebody who is signed in, as a page of ours asks. */
 export interface Visitor {
