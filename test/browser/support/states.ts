@@ -1,0 +1,81 @@
+import type { Page, Route } from 'playwright-core';
+import type { OpenOptions } from './browser';
+import { answerOf, field } from './element';
+import { failing, incomplete, passing } from './waler';
+
+/** A state of the element: how it is reached and how one knows that it is there. */
+export interface State {
+  readonly options: OpenOptions;
+  /** After the page is open. */
+  readonly reach: (page: Page) => Promise<unknown>;
+}
+
+const checks = '**/v1/checks/waler*';
+
+/** The real answer with its status changed, as if the factors were not settled. */
+async function unsettled(route: Route): Promise<void> {
+  const response = await route.fetch();
+  const answer = (await response.json()) as { profile: object };
+  await route.fulfill({
+    response,
+    json: {
+      ...answer,
+      status: 'provisional',
+      profile: { ...answer.profile, status: 'draft' },
+    },
+  });
+}
+
+const says = (text: string | RegExp) => (page: Page) => page.getByText(text).first().waitFor();
+
+/** Every state that a person can meet. */
+export const states: Readonly<Record<string, State>> = {
+  empty: { options: {}, reach: (page) => field(page, 'Spans').waitFor() },
+  pass: { options: { value: passing, attributes: 'label="north face, level 2"' }, reach: answerOf },
+  fail: { options: { value: failing }, reach: answerOf },
+  incomplete: { options: { value: incomplete }, reach: answerOf },
+  provisional: {
+    options: { value: passing, prepare: (page) => page.route(checks, unsettled) },
+    reach: answerOf,
+  },
+  'fault beside a field': {
+    options: { value: passing },
+    reach: async (page) => {
+      await answerOf(page);
+      await field(page, 'Spans').fill('3 + three');
+      await page.locator('[aria-invalid="true"]').first().waitFor();
+    },
+  },
+  refused: {
+    options: { value: { ...passing, section: 'UB 999x999x999' } },
+    reach: says(/999x999x999/),
+  },
+  'key refused': { options: { value: passing, key: 'htp_none' }, reach: says(/key/i) },
+  'secret key': {
+    options: { value: passing, key: `htk_none` },
+    reach: says('This is a secret key'),
+  },
+  checking: {
+    options: {
+      value: passing,
+      prepare: (page) => page.route(checks, () => new Promise(() => undefined)),
+    },
+    reach: (page) => page.waitForTimeout(800),
+  },
+  offline: {
+    options: { value: passing, prepare: (page) => page.route(checks, (route) => route.abort()) },
+    reach: says('The service does not answer'),
+  },
+  readonly: { options: { value: passing, attributes: 'readonly' }, reach: answerOf },
+  'everything open': {
+    options: { value: { ...failing, restraint: 'at-supports' } },
+    reach: async (page) => {
+      await answerOf(page);
+      for (const summary of await page
+        .locator('headtree-waler details:not([open]) > summary')
+        .all())
+        await summary.click();
+      await page.waitForTimeout(300);
+    },
+  },
+};
