@@ -34,6 +34,12 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
       display: none;
     }
     @media (max-width: 760px) {
+      :host {
+        justify-content: space-between;
+      }
+      .actions {
+        margin-left: 0;
+      }
       p {
         order: 2;
         width: 100%;

@@ -33,9 +33,11 @@ export class Choices {
 
   /** What cannot be read stays as it was: a choice less is no reason to refuse the page. */
   read(): void {
-    if (this.session.may('clients:read')) this.fill('/v1/clients', this.clients);
-    if (this.session.may('profiles:read')) this.fill('/v1/profiles', this.profiles);
-    this.fill('/v1/checks', this.checks);
+    if (this.session.may('clients:read'))
+      this.fill('/v1/clients', (items) => this.clients.set(items));
+    if (this.session.may('profiles:read'))
+      this.fill('/v1/profiles', (items) => this.profiles.set(items));
+    this.fill('/v1/checks', (items) => this.checks.set(items));
   }
 
   clientName(id: string | null): string {
@@ -43,9 +45,9 @@ export class Choices {
     return this.clientNames().get(id) ?? `${id.slice(0, 8)}…`;
   }
 
-  private fill<T>(path: string, into: { set(items: readonly T[]): void }): void {
-    this.api.get<Page<T>>(path).then(
-      ({ items }) => into.set(items),
+  private fill(path: string, take: (items: readonly never[]) => void): void {
+    this.api.get<Page<never>>(path).then(
+      ({ items }) => take(items),
       () => undefined,
     );
   }

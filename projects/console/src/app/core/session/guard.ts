@@ -11,7 +11,7 @@ export const mayVisit =
     const session = inject(Session);
     const router = inject(Router);
     const instead = (path: string) =>
-      new RedirectCommand(router.parseUrl(path), { skipLocationChange: true });
+      new RedirectCommand(router.parseUrl(path), { browserUrl: url });
     try {
       const { person } = await session.ready();
       if (person === null) return signInFor(router, url);

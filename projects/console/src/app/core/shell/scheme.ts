@@ -14,8 +14,8 @@ const stored = (): Scheme => {
 
 const apply = (scheme: Scheme): void => {
   const { dataset } = document.documentElement;
-  if (scheme === 'system') delete dataset['scheme'];
-  else dataset['scheme'] = scheme;
+  if (scheme === 'system') delete dataset.scheme;
+  else dataset.scheme = scheme;
 };
 
 /** Before the first paint, so that a dark page does not flash white. */

@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
-import { FormControl, FormGroup, ReactiveFormsModule, Validators } from '@angular/forms';
+import { FormControl, FormGroup, ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import {
   MAT_DIALOG_DATA,
@@ -16,6 +16,7 @@ import { type Problem, problemOf } from '../../core/api/problem';
 import { Choices } from '../../core/choices/choices';
 import { ProblemNote } from '../../shared/problem-note';
 import { refusedBy } from '../../shared/refused';
+import { wording } from '../../shared/validators';
 import type { Client } from './client';
 import { ClientsApi } from './clients-api';
 
@@ -53,7 +54,7 @@ export class ClientDialog {
   protected readonly form = new FormGroup({
     name: new FormControl(this.client?.name ?? '', {
       nonNullable: true,
-      validators: [Validators.required, Validators.pattern(/\S/), Validators.maxLength(100)],
+      validators: wording(100),
     }),
     defaultProfile: new FormControl(this.client?.defaultProfile ?? null),
   });

@@ -8,11 +8,10 @@ import {
   signal,
 } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { MatDialog } from '@angular/material/dialog';
 import { RouterLink } from '@angular/router';
-import { firstValueFrom } from 'rxjs';
 import { Connection } from '../../core/api/connection';
 import { Session } from '../../core/session/session';
+import { Ask } from '../../shared/ask';
 import { DayPipe, dayOf } from '../../shared/dates';
 import { Loading } from '../../shared/loading';
 import { PageHead } from '../../shared/page-head';
@@ -40,7 +39,7 @@ const soon = 14;
 export class ClientPage {
   private readonly api = inject(ClientsApi);
   private readonly connection = inject(Connection);
-  private readonly dialog = inject(MatDialog);
+  private readonly ask = inject(Ask);
   private readonly session = inject(Session);
 
   readonly id = input.required<string>();
@@ -77,22 +76,15 @@ export class ClientPage {
   });
 
   protected async change(client: Client): Promise<void> {
-    const dialog = this.dialog.open<ClientDialog, Client, Client>(ClientDialog, {
-      data: client,
-      width: '460px',
-    });
-    const changed = await firstValueFrom(dialog.afterClosed());
+    const changed = await this.ask.for<Client>(ClientDialog, client, { width: '460px' });
     if (!changed) return;
     this.client.set(changed);
     this.said.set('Saved.');
   }
 
   protected async disable(client: Client): Promise<void> {
-    const dialog = this.dialog.open<DisableDialog, Client, boolean>(DisableDialog, {
-      data: client,
-      width: '440px',
-    });
-    if (await firstValueFrom(dialog.afterClosed())) await this.setDisabled(true);
+    const sure = await this.ask.for<boolean>(DisableDialog, client, { width: '440px' });
+    if (sure) await this.setDisabled(true);
   }
 
   protected async setDisabled(disabled: boolean): Promise<void> {
@@ -106,30 +98,17 @@ export class ClientPage {
   }
 
   protected async issue(client: Client): Promise<void> {
-    const asked = this.dialog.open<IssueDialog, Client, IssuedKey>(IssueDialog, {
-      data: client,
-      width: '520px',
-    });
-    const issued = await firstValueFrom(asked.afterClosed());
+    const issued = await this.ask.for<IssuedKey>(IssueDialog, client, { width: '520px' });
     if (!issued) return;
-    const data: KeyDialogData = { issued, profile: client.defaultProfile ?? 'uk-na' };
-    const shown = this.dialog.open<KeyDialog, KeyDialogData>(KeyDialog, {
-      data,
-      width: '620px',
-      // Neither a slip on Escape nor a click beside it loses the key.
-      disableClose: true,
-    });
     this.readAgain();
-    await firstValueFrom(shown.afterClosed());
-    this.said.set(`The key “${issued.key.label}” is issued.`);
+    const { label } = issued.key;
+    const data: KeyDialogData = { issued, profile: client.defaultProfile ?? 'uk-na' };
+    await this.ask.for(KeyDialog, data, { width: '620px', held: true });
+    this.said.set(`The key “${label}” is issued.`);
   }
 
   protected async revoke(key: Key): Promise<void> {
-    const dialog = this.dialog.open<RevokeDialog, Key, Key>(RevokeDialog, {
-      data: key,
-      width: '460px',
-    });
-    const revoked = await firstValueFrom(dialog.afterClosed());
+    const revoked = await this.ask.for<Key>(RevokeDialog, key, { width: '460px' });
     if (!revoked) return;
     this.readAgain();
     this.said.set(`The key “${revoked.label}” was revoked on ${dayOf(new Date())}.`);

@@ -1,10 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, inject, resource } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { MatDialog } from '@angular/material/dialog';
 import { Router, RouterLink } from '@angular/router';
 import { Api } from '../../core/api/api';
 import { Connection } from '../../core/api/connection';
 import { Session } from '../../core/session/session';
+import { Ask } from '../../shared/ask';
 import { momentOf } from '../../shared/dates';
 import { Loading } from '../../shared/loading';
 import { PageHead } from '../../shared/page-head';
@@ -25,12 +25,17 @@ const month = 720 * 3_600_000;
   imports: [Loading, MatButton, PageHead, ProblemNote, RouterLink, ScrollTable],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './clients-page.html',
+  styles: `
+    .scope {
+      margin-top: 8px;
+    }
+  `,
 })
 export class ClientsPage {
   private readonly api = inject(Api);
   private readonly clientsApi = inject(ClientsApi);
   private readonly connection = inject(Connection);
-  private readonly dialog = inject(MatDialog);
+  private readonly ask = inject(Ask);
   private readonly router = inject(Router);
   private readonly session = inject(Session);
 
@@ -87,12 +92,8 @@ export class ClientsPage {
     return this.log.hasValue() ? count(this.recent().get(id)?.calls ?? 0) : '–';
   }
 
-  protected make(): void {
-    this.dialog
-      .open<ClientDialog, null, Client>(ClientDialog, { data: null, width: '460px' })
-      .afterClosed()
-      .subscribe((made) => {
-        if (made) void this.router.navigate(['/clients', made.id]);
-      });
+  protected async make(): Promise<void> {
+    const made = await this.ask.for<Client>(ClientDialog, null, { width: '460px' });
+    if (made) await this.router.navigate(['/clients', made.id]);
   }
 }

@@ -1,7 +1,7 @@
 import { KeyValuePipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, inject, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
-import { FormControl, FormGroup, ReactiveFormsModule, Validators } from '@angular/forms';
+import { FormControl, FormGroup, ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatCheckbox } from '@angular/material/checkbox';
 import {
@@ -19,6 +19,7 @@ import { MatOption, MatSelect } from '@angular/material/select';
 import { type Problem, problemOf } from '../../core/api/problem';
 import { ProblemNote } from '../../shared/problem-note';
 import { refusedBy } from '../../shared/refused';
+import { wording } from '../../shared/validators';
 import type { Client, IssuedKey } from './client';
 import { ClientsApi } from './clients-api';
 import { expiries, requestFrom, usageIsFor } from './issue-form';
@@ -62,7 +63,7 @@ export class IssueDialog {
     kind: new FormControl<'secret' | 'page'>('secret', { nonNullable: true }),
     label: new FormControl('', {
       nonNullable: true,
-      validators: [Validators.required, Validators.pattern(/\S/), Validators.maxLength(100)],
+      validators: wording(100),
     }),
     origins: new FormControl(
       { value: '', disabled: true },

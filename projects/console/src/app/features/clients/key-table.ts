@@ -15,9 +15,11 @@ import { daysLeft, type Key, scopesInWords, shownKey } from './client';
     .over th {
       color: var(--quiet);
     }
-    .may {
-      min-width: 15em;
-      max-width: 24em;
+    @media (min-width: 621px) {
+      .may {
+        min-width: 15em;
+        max-width: 24em;
+      }
     }
     .origin {
       display: block;

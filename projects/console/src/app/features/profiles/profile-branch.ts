@@ -17,33 +17,35 @@ interface DepartureLine {
     <section class="part" [attr.aria-labelledby]="'branch-' + branch().name">
       <h2 [id]="'branch-' + branch().name">{{ branch().name }}</h2>
       <div appScroll [attr.aria-label]="'Table of ' + branch().name">
-        <table class="sheet">
-          <thead>
-            <tr>
-              <th scope="col">Value</th>
-              <th scope="col" class="n">Is</th>
-              <th scope="col">Clause</th>
-              <th scope="col">Source</th>
-              <th scope="col">Known</th>
+        <table role="table" class="sheet stack">
+          <thead role="rowgroup">
+            <tr role="row">
+              <th role="columnheader" scope="col">Value</th>
+              <th role="columnheader" scope="col" class="n">Is</th>
+              <th role="columnheader" scope="col">Clause</th>
+              <th role="columnheader" scope="col">Source</th>
+              <th role="columnheader" scope="col">Known</th>
             </tr>
           </thead>
-          <tbody>
+          <tbody role="rowgroup">
             @for (value of branch().values; track value.path) {
-              <tr>
-                <th scope="row" class="mono">{{ value.name }}</th>
-                <td class="n">
-                  @if (departed().get(value.path); as id) {
-                    <span class="departed">{{ id }}</span>
-                  }
-                  {{ value.value }}{{ value.unit === '1' ? '' : ' ' + value.unit }}
+              <tr role="row">
+                <th role="rowheader" scope="row" class="mono">{{ value.name }}</th>
+                <td role="cell" data-label="Is" class="n">
+                  <span>
+                    @if (departed().get(value.path); as id) {
+                      <span class="departed">{{ id }}</span>
+                    }
+                    {{ value.value }}{{ value.unit === '1' ? '' : ' ' + value.unit }}
+                  </span>
                 </td>
-                <td class="clause">{{ value.clause }}</td>
-                <td class="source">{{ readIn(value) }}</td>
-                <td class="known">
+                <td role="cell" data-label="Clause" class="clause">{{ value.clause }}</td>
+                <td role="cell" data-label="Source" class="source">{{ readIn(value) }}</td>
+                <td role="cell" data-label="Known" class="known">
                   @if (isUnconfirmed(value)) {
                     <app-answer-tag standing="provisional" [words]="knownBy(value)" />
                   } @else {
-                    {{ knownBy(value) }}
+                    <span>{{ knownBy(value) }}</span>
                   }
                   @if (value.note) {
                     <span class="remark">{{ value.note }}</span>
@@ -61,21 +63,23 @@ interface DepartureLine {
       font-family: var(--mono);
       font-size: 14px;
     }
-    table {
-      min-width: 860px;
-      table-layout: fixed;
-    }
-    th:nth-child(1) {
-      width: 17%;
-    }
-    th:nth-child(2) {
-      width: 10%;
-    }
-    th:nth-child(3) {
-      width: 22%;
-    }
-    th:nth-child(4) {
-      width: 31%;
+    @media (min-width: 621px) {
+      table {
+        min-width: 860px;
+        table-layout: fixed;
+      }
+      th:nth-child(1) {
+        width: 17%;
+      }
+      th:nth-child(2) {
+        width: 10%;
+      }
+      th:nth-child(3) {
+        width: 22%;
+      }
+      th:nth-child(4) {
+        width: 31%;
+      }
     }
     td,
     tbody th {

@@ -27,7 +27,7 @@ const isObject = (value: unknown): value is Readonly<Record<string, unknown>> =>
   typeof value === 'object' && value !== null && !Array.isArray(value);
 
 const isValue = (node: unknown): node is ProfileValue =>
-  isObject(node) && 'value' in node && !isObject(node['value']) && typeof node['kind'] === 'string';
+  isObject(node) && 'value' in node && !isObject(node.value) && typeof node.kind === 'string';
 
 function valuesUnder(node: unknown, parts: readonly string[]): PlacedValue[] {
   if (isValue(node))

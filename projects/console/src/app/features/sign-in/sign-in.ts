@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
-import { FormControl, FormGroup, ReactiveFormsModule, Validators } from '@angular/forms';
+import { FormControl, FormGroup, ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatError, MatFormField, MatLabel } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
@@ -9,6 +9,7 @@ import { Session } from '../../core/session/session';
 import { isInside } from '../../core/session/sign-in-for';
 import { Mark } from '../../core/shell/mark';
 import { SchemeSwitch } from '../../core/shell/scheme-switch';
+import { required } from '../../shared/validators';
 import { Drawing } from './drawing';
 import { refusalWords } from './refusal-words';
 
@@ -45,8 +46,8 @@ export class SignIn {
     return problem && refusalWords(problem);
   });
   protected readonly form = new FormGroup({
-    email: new FormControl('', { nonNullable: true, validators: [Validators.required] }),
-    password: new FormControl('', { nonNullable: true, validators: [Validators.required] }),
+    email: new FormControl('', { nonNullable: true, validators: [required] }),
+    password: new FormControl('', { nonNullable: true, validators: [required] }),
   });
 
   protected async signIn(): Promise<void> {
