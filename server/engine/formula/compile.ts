@@ -5,7 +5,7 @@ import {
   isParenthesisNode,
   isSymbolNode,
   type MathNode,
-} from 'mathjs';
+} from 'mathjs/number';
 import { allowedConstants, literalQuantity } from './parse';
 
 const operators: Readonly<Record<string, string>> = {

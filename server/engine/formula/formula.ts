@@ -1,4 +1,4 @@
-import type { MathNode } from 'mathjs';
+import type { MathNode } from 'mathjs/number';
 import type { UnitName } from '../units/units';
 import { compileNode } from './compile';
 import { parseExpression } from './parse';

@@ -5,7 +5,7 @@ import {
   isParenthesisNode,
   isSymbolNode,
   type MathNode,
-} from 'mathjs';
+} from 'mathjs/number';
 import type { Formula } from './formula';
 import { allowedConstants, literalQuantity } from './parse';
 import { symbolElement } from './symbol';

@@ -6,7 +6,7 @@ import {
   isSymbolNode,
   parse,
   type MathNode,
-} from 'mathjs';
+} from 'mathjs/number';
 import { unitScale, type UnitName } from '../units/units';
 
 /** Functions a formula may use: the same name and meaning in mathjs and in the compiled line. */
