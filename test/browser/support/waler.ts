@@ -11,6 +11,7 @@ export const passing = {
   restraint: 'full',
   bearing: { length: 0.2, endDistance: 0.1 },
   deflectionLimit: 'span/200',
+  waive: [{ verification: 'transverse-force', reason: 'stiffeners at every prop' }],
 };
 
 export const failing = {

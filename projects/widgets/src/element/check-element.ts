@@ -82,10 +82,10 @@ export function makeCheckElement(
       return (this.#strategy.getInputValue('value') as object | null | undefined) ?? null;
     }
     set value(value: object | null) {
-      this.#answer = null;
       this.#said.textContent = '';
+      if (value === this.value) return;
       this.#strategy.setInputValue('value', value ?? null);
-      this.#internals.setFormValue(value && JSON.stringify(value));
+      this.#forget();
     }
 
     /** The last answer; null until there is one for what the fields now hold. */
@@ -104,7 +104,8 @@ export function makeCheckElement(
 
     /** Puts the fields back to the value that was last set from outside. */
     reset(): void {
-      this.#strategy.instance().reset();
+      this.#strategy.reset();
+      this.#forget();
     }
 
     /** Where a page sends the focus on purpose: to the first field. */
@@ -177,11 +178,17 @@ export function makeCheckElement(
       this.value = value;
     }
 
-    #onInput(value: object): void {
+    /** The fields hold something else: the answer is none to it. */
+    #forget(): void {
       this.#answer = null;
       this.#internals.states.clear();
+      const { value } = this;
+      this.#internals.setFormValue(value && JSON.stringify(value));
+    }
+
+    #onInput(value: object): void {
       this.#said.textContent = '';
-      this.#internals.setFormValue(JSON.stringify(value));
+      this.#forget();
       this.#tell('headtree-input', { value });
     }
 

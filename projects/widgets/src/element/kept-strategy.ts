@@ -41,7 +41,12 @@ export interface CheckListener {
 export class KeptStrategy implements NgElementStrategy, Lingering {
   /** The element sends its events itself, so that they bubble. */
   readonly events: Observable<NgElementStrategyEvent> = EMPTY;
+  /** As they were set from outside. */
   private readonly inputs = new Map<string, unknown>();
+  /** The value as the user has changed it since. */
+  private typed: object | undefined;
+  /** The value that the check was given last. */
+  private shown: unknown;
   private made: ComponentRef<CheckComponent> | undefined;
   private listener: CheckListener | undefined;
 
@@ -75,13 +80,31 @@ export class KeptStrategy implements NgElementStrategy, Lingering {
     this.made = undefined;
   }
 
+  /** Puts the fields back to the value that was last set from outside. */
+  reset(): void {
+    this.typed = undefined;
+    if (this.made) this.show(this.made, this.inputs.get('value') ?? null);
+  }
+
   getInputValue(name: string): unknown {
-    return this.inputs.get(name);
+    return name === 'value' ? (this.typed ?? this.inputs.get(name)) : this.inputs.get(name);
   }
 
   setInputValue(name: string, value: unknown): void {
     this.inputs.set(name, value);
-    this.made?.setInput(name, value);
+    if (name !== 'value') return this.made?.setInput(name, value);
+    this.typed = undefined;
+    if (this.made) this.show(this.made, value);
+  }
+
+  private show(made: ComponentRef<CheckComponent>, value: unknown): void {
+    // The same again is no change to the check, whatever was typed over it.
+    if (this.shown === value) {
+      made.instance.reset();
+      return;
+    }
+    this.shown = value;
+    made.setInput('value', value);
   }
 
   private make(): ComponentRef<CheckComponent> {
@@ -92,10 +115,12 @@ export class KeptStrategy implements NgElementStrategy, Lingering {
       environmentInjector: application.injector,
       hostElement: listener.place,
     });
-    for (const [name, value] of this.inputs) made.setInput(name, value);
+    for (const [name, value] of this.inputs) if (name !== 'value') made.setInput(name, value);
+    this.shown = this.getInputValue('value') ?? null;
+    made.setInput('value', this.shown);
     const { valueChange, result, failed } = made.instance;
     valueChange.subscribe((value) => {
-      this.inputs.set('value', value);
+      this.typed = value;
       listener.onInput(value);
     });
     result.subscribe((answer) => listener.onResult(answer));
