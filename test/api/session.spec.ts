@@ -62,6 +62,9 @@ describe('200', () => {
       /^headtree=s%3A[\w%.-]+; Path=\/; Expires=[^;]+; HttpOnly; SameSite=Lax$/,
     );
     expect(answer.headers['cache-control']).toBe('no-store');
+    expect(await service.usage('id = $1', [answer.headers['x-request-id']])).toMatchObject([
+      { person_id: lead, route: '/v1/session', http_status: 200 },
+    ]);
     const again = await whoAmI(cookieOf(answer));
     expect(again.body).toEqual(answer.body);
     // The idle time begins anew with each request.

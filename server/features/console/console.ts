@@ -47,11 +47,14 @@ class IndexPage {
       }
       return this.text;
     } catch (error) {
-      if (error instanceof Error && 'code' in error && error.code === 'ENOENT') return undefined;
+      if (isMissing(error)) return undefined;
       throw error;
     }
   }
 }
+
+const isMissing = (error: unknown): boolean =>
+  typeof error === 'object' && error !== null && 'code' in error && error.code === 'ENOENT';
 
 const notBuilt = page(
   'The console is not built',

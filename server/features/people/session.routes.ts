@@ -12,9 +12,7 @@ import type { Authenticate } from './sign-in';
 
 const fresh = { 'Cache-Control': 'no-store' };
 
-type State = Omit<SignedIn, 'permissions'>;
-
-function stateOf(person: State | undefined): Answer {
+function stateOf(person: SignedIn | undefined): Answer {
   if (!person)
     return {
       status: 200,
@@ -43,7 +41,10 @@ export const sessionRoutes = (authenticate: Authenticate, cookie: SessionCookie)
       const person = await authenticate(request, addressOf(request));
       const csrfToken = randomBytes(32).toString('base64url');
       await cookie.open(request, person.id, csrfToken);
-      return stateOf({ ...person, csrfToken });
+      // From here on the call is theirs, in the log too.
+      const permissions = new Set(permissionsOf(person.roles));
+      call.person = { ...person, permissions, csrfToken };
+      return stateOf(call.person);
     },
   },
   {
