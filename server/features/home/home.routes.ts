@@ -2,7 +2,7 @@ import type { Check } from '../../engine/checks/check';
 import type { Route } from '../../middleware/route';
 import { escaped, page } from '../page';
 
-/** What stands at the door: the name, the way in, the cautions. */
+/** What stands at the door while the console is not built: the name, the way in, the cautions. */
 export const homeRoutes = (checks: readonly Check[]): Route[] => {
   const lines = checks.map(({ id, title }) => `<li>${escaped(title)} <code>${id}</code></li>`);
   const answer = page(
@@ -10,6 +10,8 @@ export const homeRoutes = (checks: readonly Check[]): Route[] => {
     `<h1>Headtree</h1>
 <p>A member check service for temporary works: one governed answer for spreadsheets, scripts and
 intranet pages.</p>
+<p class="quiet">The console is not built: <code>npm start</code> builds it and says why when it
+cannot. The API serves all the same.</p>
 <h2>Checks</h2>
 <ul>
 ${lines.join('\n')}

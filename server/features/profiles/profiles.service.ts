@@ -42,7 +42,7 @@ export class ProfileService {
           {
             pointer: '/profile',
             code: 'required',
-            message: 'The client of this key has no default.',
+            message: 'There is no default to take in its place.',
             fix: 'Add "profile"; GET /v1/profiles lists what there is.',
           },
         ],
