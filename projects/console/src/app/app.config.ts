@@ -52,6 +52,7 @@ export const appConfig: ApplicationConfig = {
     {
       provide: MAT_DIALOG_DEFAULT_OPTIONS,
       useValue: {
+        ariaModal: true,
         hasBackdrop: true,
         autoFocus: 'first-heading',
         restoreFocus: true,

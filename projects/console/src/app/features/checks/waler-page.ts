@@ -3,6 +3,7 @@ import { Location } from '@angular/common';
 import { adoptSheetStyles, WalerCheck } from '@headtree/checks';
 import { CopyButton } from '../../shared/copy-button';
 import { PageHead } from '../../shared/page-head';
+import { exampleRequest } from './example';
 import { fromFragment, toFragment, type WalerRequest } from './request-in-address';
 
 const path = '/checks/waler';
@@ -20,12 +21,17 @@ export class WalerPage {
   private readonly location = inject(Location);
 
   private readonly carried = this.document.location.hash.slice(1);
-  protected readonly request = fromFragment(this.carried);
-  protected readonly unreadable = this.carried.startsWith('r=') && this.request === null;
-  protected readonly link = signal(this.request ? this.document.location.href : null);
+  protected readonly request = signal(fromFragment(this.carried));
+  protected readonly unreadable = this.carried.startsWith('r=') && this.request() === null;
+  protected readonly link = signal(this.request() ? this.document.location.href : null);
 
   constructor() {
     adoptSheetStyles(this.document);
+  }
+
+  protected fillIn(): void {
+    this.request.set(exampleRequest);
+    this.keep(exampleRequest);
   }
 
   protected keep(request: WalerRequest): void {

@@ -56,7 +56,7 @@ export class ClientDialog {
       nonNullable: true,
       validators: wording(100),
     }),
-    defaultProfile: new FormControl(this.client?.defaultProfile ?? null),
+    defaultProfile: new FormControl(this.client?.defaultProfile ?? '', { nonNullable: true }),
   });
 
   constructor() {
@@ -67,7 +67,7 @@ export class ClientDialog {
     this.form.markAllAsTouched();
     if (this.form.invalid || this.busy()) return;
     const { name, defaultProfile } = this.form.getRawValue();
-    const said = { name: name.trim(), defaultProfile };
+    const said = { name: name.trim(), defaultProfile: defaultProfile || null };
     this.busy.set(true);
     this.problem.set(null);
     try {

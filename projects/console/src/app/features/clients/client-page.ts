@@ -91,7 +91,7 @@ export class ClientPage {
     this.failure.set(null);
     try {
       this.client.set(await this.api.change(this.id(), { disabled }));
-      this.said.set(disabled ? 'The client is disabled.' : 'The client is enabled again.');
+      this.said.set(disabled ? 'Its keys are refused from now on.' : 'Its keys work again.');
     } catch (error) {
       this.failure.set(error);
     }
