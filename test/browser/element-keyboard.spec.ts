@@ -19,14 +19,9 @@ const focused = (): Promise<string> =>
   page.evaluate(() => {
     let at = document.activeElement;
     while (at?.shadowRoot?.activeElement) at = at.shadowRoot.activeElement;
-    const labels =
-      at instanceof HTMLInputElement || at instanceof HTMLSelectElement ? at.labels : null;
-    return (
-      at?.getAttribute('aria-label') ??
-      labels?.[0]?.textContent?.trim() ??
-      at?.textContent?.trim() ??
-      ''
-    ).replace(/\s+/g, ' ');
+    const isField = at instanceof HTMLInputElement || at instanceof HTMLSelectElement;
+    const words = at?.getAttribute('aria-label') ?? (isField ? at.labels?.[0] : at)?.textContent;
+    return (words ?? '').trim().replace(/\s+/g, ' ');
   });
 
 /** Tabs on until the focus is where it is wanted. */

@@ -76,13 +76,13 @@ describe('an element that is taken out and put back', () => {
     await answerOf(page);
     await changeSpans(page, '2.5 + 3 + 2.5');
     await page.clock.install();
-    const node = await waler(page).elementHandle();
-    await page.evaluate((element) => element?.remove(), node);
+    const node = await page.waitForSelector('headtree-waler');
+    await node.evaluate((element) => element.remove());
     await page.clock.runFor(40_000);
     expect(
-      await node?.evaluate((element) => element.shadowRoot?.querySelector('input') ?? null),
+      await node.evaluate((element) => element.shadowRoot?.querySelector('input') ?? null),
     ).toBeNull();
-    await page.evaluate((element) => element && document.body.append(element), node);
+    await node.evaluate((element) => document.body.append(element));
     await page.clock.resume();
     expect(await answerOf(page)).toBe('pass');
     expect(await spansOf(page)).toEqual([2.5, 3, 2.5]);

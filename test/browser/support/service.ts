@@ -6,7 +6,7 @@ import { Client } from 'pg';
 import { mintKey, type KeyKind } from '../../../server/features/keys/key-format';
 import { createDatabase } from '../../support/database';
 
-const root = join(__dirname, '../../..');
+const root = process.cwd();
 
 /** The built service as a process, on a database of its own. */
 export interface RunningService {

@@ -71,10 +71,10 @@ export const states: Readonly<Record<string, State>> = {
     options: { value: { ...failing, restraint: 'at-supports' } },
     reach: async (page) => {
       await answerOf(page);
-      for (const summary of await page
-        .locator('headtree-waler details:not([open]) > summary')
-        .all())
-        await summary.click();
+      await page.locator('headtree-waler').evaluate((node) => {
+        for (const details of node.shadowRoot?.querySelectorAll('details') ?? [])
+          details.open = true;
+      });
       await page.waitForTimeout(300);
     },
   },
