@@ -55,11 +55,15 @@ export interface MathElement {
   readonly attributes?: Readonly<Record<string, string>>;
 }
 
-/** One section of the catalogue, as the list gives it. */
+/** A length or a mass of the catalogue. */
+interface SectionFact {
+  readonly value: number;
+}
+
+/** What a search of the catalogue shows of a section. */
 export interface SectionLine {
   readonly designation: string;
   readonly family?: string;
-  readonly mass?: number | { readonly value: number };
-  readonly h?: number | { readonly value: number };
-  readonly b?: number | { readonly value: number };
+  readonly mass?: SectionFact | null;
+  readonly dimensions?: { readonly h?: SectionFact; readonly b?: SectionFact };
 }

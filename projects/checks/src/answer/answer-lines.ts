@@ -44,7 +44,7 @@ export function governingText(answer: CheckAnswer, spans: number) {
   const combination = answer.combinations?.find(({ id }) => id === found.combination) ?? null;
   return {
     title: `${found.title || capital(verificationName(found.id))} governs`,
-    place: placeText(found.at, spans),
+    where: placeText(found.at, spans) + (found.combination ? ', combination ' : ''),
     combinationId: found.combination,
     combination,
   };

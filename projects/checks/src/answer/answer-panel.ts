@@ -14,7 +14,7 @@ import { barTone, UtilisationBar } from '../utilisation-bar/utilisation-bar';
 import { answerLines, governingText } from './answer-lines';
 import {
   capital,
-  combinationSum,
+  combinationTerms,
   count,
   patternText,
   provisionalReasons,
@@ -53,7 +53,7 @@ export class AnswerPanel {
   protected readonly statusWord = statusWord;
   protected readonly utilisationText = utilisationText;
   protected readonly verificationName = (id: string) => capital(verificationName(id));
-  protected readonly combinationSum = combinationSum;
+  protected readonly combinationTerms = combinationTerms;
   protected readonly patternText = patternText;
   protected readonly count = count;
 
@@ -73,6 +73,11 @@ export class AnswerPanel {
     if (phase === 'busy') return 'Checking…';
     if (phase === 'offline') return error?.kind === 'too-many' ? 'Waiting' : 'Service away';
     return phase === 'refused' || this.unread() > 0 ? 'Not checked' : 'Not checked yet';
+  });
+  /** Whether the list beneath says what the message would say. */
+  protected readonly repeated = computed(() => {
+    const { error } = this.state();
+    return this.faults().some(({ message }) => message === error?.message);
   });
   protected readonly failing = computed(
     () => this.answer()?.verifications.filter(({ status }) => status === 'fail') ?? [],

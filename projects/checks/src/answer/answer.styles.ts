@@ -4,6 +4,7 @@ export const answerStyles = `
 .ht-status-pass { color: var(--ht-pass); }
 .ht-status-fail { color: var(--ht-fail); }
 .ht-status-incomplete, .ht-status-provisional, .ht-status-away { color: var(--ht-warn); }
+.ht-term { display: inline-block; margin-inline-end: 0.5em; }
 .ht-answer b { font-weight: 600; }
 .ht-util { display: grid; grid-template-columns: auto 1fr; gap: 14px; align-items: center; }
 .ht-util strong { font: 600 34px/1 var(--ht-mono); letter-spacing: -0.03em; font-variant-numeric: tabular-nums; }

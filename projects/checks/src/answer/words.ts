@@ -65,11 +65,9 @@ export function patternText(pattern: string | null): string {
     : `beside prop ${prop} and every other span`;
 }
 
-/** A combination as a sum: "1.35 earth + 1.50 surcharge". */
-export function combinationSum({ factors }: CombinationLine): string {
-  return Object.entries(factors)
-    .map(([name, factor]) => `${fixed(factor, 2)} ${name}`)
-    .join(' + ');
+/** The terms of a combination: "1.35 earth", "1.50 surcharge". */
+export function combinationTerms({ factors }: CombinationLine): string[] {
+  return Object.entries(factors).map(([name, factor]) => `${fixed(factor, 2)} ${name}`);
 }
 
 /** How many, with its word: "1 value", "2 values". */

@@ -74,7 +74,7 @@ export class ApiClient {
 
   /** Sections of the catalogue whose designation fits a text in any spelling. */
   async sections(search: string, signal?: AbortSignal): Promise<readonly SectionLine[]> {
-    const query = new URLSearchParams({ search }).toString();
+    const query = new URLSearchParams({ search, pageSize: '20' }).toString();
     const { items } = await this.call<Page<SectionLine>>(`/v1/sections?${query}`, signal);
     return items;
   }

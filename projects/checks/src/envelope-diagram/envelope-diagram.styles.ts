@@ -1,5 +1,5 @@
 export const diagramStyles = `
-.ht-figure { display: grid; gap: 4px; min-width: 0; }
+.ht-figure { display: grid; grid-template-columns: minmax(0, 1fr); gap: 4px; min-width: 0; }
 .ht-figure svg { display: block; overflow: visible; }
 .ht-figure text { font: 12px var(--ht-mono); font-variant-numeric: tabular-nums; fill: var(--ht-ink); text-anchor: middle; paint-order: stroke; stroke: var(--ht-sheet); stroke-width: 3px; stroke-linejoin: round; }
 .ht-figure .ht-axis { stroke: var(--ht-ink); stroke-width: 1.2; }

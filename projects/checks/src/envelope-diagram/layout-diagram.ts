@@ -1,5 +1,5 @@
 import type { DiagramPoint } from '../contract';
-import { readable } from '../quantity/format';
+import { fixed } from '../quantity/format';
 import { textWidth, type Scale } from '../member-drawing/scale';
 
 /** A value written at its place. */
@@ -93,12 +93,13 @@ function labelsOf(
     { x: scale.x(min.x), value: min.min },
   ]);
   const size = Math.max(...candidates.map(({ value }) => Math.abs(value)), 0);
+  const decimals = decimalsOf(size);
   const worth = candidates
     .filter(({ value }) => Math.abs(value) > size * 0.03)
     .sort((a, b) => Math.abs(b.value) - Math.abs(a.value));
   const placed: (ExtremeLabel & { from: number; to: number })[] = [];
   for (const { x, value } of worth) {
-    const text = readable(value);
+    const text = fixed(value, decimals);
     const wide = textWidth(text);
     const from = Math.max(0, Math.min(x - wide / 2, width - wide));
     const below = down === value > 0;
@@ -109,4 +110,11 @@ function labelsOf(
     if (!clash) placed.push({ x: from + wide / 2, y: at, text, from, to: from + wide });
   }
   return placed.map(({ x, y: at, text }) => ({ x, y: at, text }));
+}
+
+/** As many decimals as the greatest value needs to be read to three or four figures. */
+export function decimalsOf(size: number): number {
+  if (size >= 1000) return 0;
+  if (size >= 10) return 1;
+  return size >= 1 ? 2 : 3;
 }

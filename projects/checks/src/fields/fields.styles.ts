@@ -12,10 +12,10 @@ export const fieldStyles = `
 .ht-box .ht-words { font-family: var(--ht-sans); }
 .ht-box select { appearance: none; padding-inline-end: 16px; cursor: pointer; text-overflow: ellipsis; }
 .ht-box:has(select)::after {
-  content: ""; position: absolute; inset-inline-end: 2px; top: 13px; border: 4px solid transparent; border-top-color: var(--ht-quiet); pointer-events: none;
+  content: ""; position: absolute; inset-inline-end: 2px; top: 13px; border: 4px solid transparent; border-top-color: var(--ht-quiet); pointer-events: none; forced-color-adjust: none;
 }
 .ht-box option { background: var(--ht-sheet); color: var(--ht-ink); }
-.ht-box :is(input, select):focus-visible { outline: none; }
+.ht-sheet .ht-box :is(input, select):focus-visible { outline: none; }
 .ht-box:has(:focus-visible) { outline: 2px solid var(--ht-timber); outline-offset: 3px; }
 .ht-box :is(input, select):disabled { opacity: 1; -webkit-text-fill-color: currentColor; cursor: default; }
 .ht-unit { color: var(--ht-quiet); font: 12px var(--ht-mono); white-space: nowrap; }
@@ -28,12 +28,12 @@ export const fieldStyles = `
 .ht-tick { display: flex; gap: 8px; align-items: center; font-size: 14px; min-height: 28px; }
 .ht-tick input { accent-color: var(--ht-timber); width: 16px; height: 16px; margin: 0; flex: none; }
 .ht-row { display: grid; grid-template-columns: 2fr 1fr 1.7fr 1.1fr; gap: 18px 20px; align-items: start; }
-.ht-form { display: grid; gap: 18px; min-width: 0; }
+.ht-form { display: grid; grid-template-columns: minmax(0, 1fr); gap: 18px; min-width: 0; }
 .ht-more-fields { display: grid; gap: 18px; padding-top: 12px; }
 .ht-waiver { display: grid; grid-template-columns: 1.2fr 2fr auto; gap: 6px 20px; align-items: start; }
 .ht-waiver + .ht-waiver { margin-top: 8px; }
 @container ht-sheet (width < 620px) {
-  .ht-row { grid-template-columns: 1fr 1fr; gap: 14px 16px; }
+  .ht-row { grid-template-columns: repeat(2, minmax(0, 1fr)); gap: 14px 16px; grid-auto-flow: dense; }
   .ht-row > .ht-wide { grid-column: 1 / -1; }
   .ht-waiver { grid-template-columns: 1fr; }
 }

@@ -92,8 +92,8 @@ export function placeFaults(
 function nearest(pointer: string, shown: ReadonlySet<string>): string | undefined {
   for (let at = pointer; at !== ''; at = at.slice(0, at.lastIndexOf('/'))) {
     if (shown.has(at)) return at;
-    const whole = SHOWN_BY[at];
-    if (whole) return whole;
+    const part = SHOWN_BY[at] ?? `${at}/0`;
+    if (shown.has(part)) return part;
   }
   return undefined;
 }

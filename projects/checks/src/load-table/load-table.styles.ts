@@ -1,7 +1,8 @@
 export const loadTableStyles = `
-.ht-loads { display: grid; gap: 0; min-width: 0; }
+.ht-loads { display: grid; grid-template-columns: minmax(0, 1fr); gap: 0; min-width: 0; }
 .ht-load, .ht-loads-head { display: grid; grid-template-columns: minmax(90px, 1.15fr) minmax(98px, 1.1fr) minmax(92px, 1fr) minmax(110px, 1.3fr) minmax(120px, 1.3fr) 30px; gap: 4px 14px; align-items: start; }
 .ht-loads-head { font-size: 12px; color: var(--ht-quiet); padding-bottom: 4px; border-bottom: 1px solid var(--ht-rule); }
+.ht-loads-head > :nth-child(4) { text-align: end; }
 .ht-load { padding: 5px 0; border-bottom: 1px solid var(--ht-hair); }
 .ht-load .ht-box { border-color: transparent; padding: 1px 0 2px; gap: 5px; }
 .ht-load .ht-box:hover, .ht-load .ht-box:focus-within { border-color: var(--ht-galvanised); }
@@ -9,7 +10,8 @@ export const loadTableStyles = `
 .ht-load .ht-bad .ht-box { border-color: var(--ht-fail); }
 .ht-load .ht-box :is(input, select) { font-size: 14px; }
 .ht-load-pair { display: grid; grid-template-columns: 1fr auto 1fr; gap: 6px; align-items: baseline; }
-.ht-load-pair > span, .ht-load-say { color: var(--ht-quiet); font-size: 12px; line-height: 28px; }
+.ht-load-at { display: grid; grid-template-columns: auto 1fr; gap: 8px; align-items: baseline; }
+.ht-load-at > span, .ht-load-pair > span, .ht-load-say { color: var(--ht-quiet); font-size: 12px; line-height: 28px; }
 .ht-load-value input { text-align: end; }
 .ht-load-cap { display: none; }
 .ht-load-remove { font: 400 18px/1 var(--ht-sans); color: var(--ht-quiet); background: none; border: 0; width: 30px; height: 30px; cursor: pointer; border-radius: 3px; }

@@ -8,8 +8,8 @@ export const base = `
   background: var(--ht-sheet); color: var(--ht-ink); border: 1px solid var(--ht-rule);
   font: 400 14px/1.5 var(--ht-sans); text-align: start; min-width: 0;
 }
-.ht-sheet :is(h2, h3, p, ul, ol, dl, dd, figure) { margin: 0; padding: 0; }
-.ht-sheet :is(ul, ol) { list-style: none; }
+:where(.ht-sheet) :where(h2, h3, p, ul, ol, dl, dd, figure) { margin: 0; padding: 0; }
+:where(.ht-sheet) :where(ul, ol) { list-style: none; }
 .ht-mono, .ht-n { font-family: var(--ht-mono); font-variant-numeric: tabular-nums; }
 .ht-n { text-align: right; white-space: nowrap; }
 .ht-quiet { color: var(--ht-quiet); }
@@ -43,7 +43,7 @@ export const base = `
   border: solid currentColor; border-width: 0 1.6px 1.6px 0; transform: rotate(-45deg); transition: transform 120ms;
 }
 .ht-more[open] > summary::before { transform: rotate(45deg); }
-.ht-scroll { overflow-x: auto; max-width: 100%; scrollbar-width: thin; }
+.ht-scroll { position: relative; overflow-x: auto; max-width: 100%; scrollbar-width: thin; }
 .ht-table { border-collapse: collapse; font-size: 13px; width: 100%; }
 .ht-table caption { text-align: start; }
 .ht-table th {
@@ -53,6 +53,7 @@ export const base = `
 .ht-table td, .ht-table tbody th { padding: 6px 14px 6px 0; border-bottom: 1px solid var(--ht-hair); vertical-align: baseline; }
 .ht-table tbody th { color: var(--ht-ink); font-size: 13px; }
 .ht-table th.ht-n, .ht-table td.ht-n { text-align: right; }
+.ht-table thead th { font-family: var(--ht-sans); }
 .ht-table :is(th, td):last-child { padding-right: 0; }
 @media (prefers-reduced-motion: reduce) {
   .ht-sheet *, .ht-sheet *::before, .ht-sheet *::after { transition: none !important; animation: none !important; }

@@ -23,7 +23,7 @@ export const tokens = `
 @media (forced-colors: active) {
   :root, :host {
     --ht-paper: Canvas; --ht-sheet: Canvas; --ht-wash: Canvas;
-    --ht-ink: CanvasText; --ht-quiet: CanvasText; --ht-rule: CanvasText; --ht-hair: GrayText;
+    --ht-ink: CanvasText; --ht-quiet: CanvasText; --ht-rule: CanvasText; --ht-hair: CanvasText;
     --ht-timber: LinkText; --ht-galvanised: CanvasText;
     --ht-pass: CanvasText; --ht-warn: CanvasText; --ht-fail: CanvasText;
   }

@@ -107,15 +107,17 @@ function dimensionsOf({ spans, start, end }: DrawingModel, scale: Scale, y: numb
     const from = bounds[index] ?? 0;
     return { size: at - from, from: scale.x(from), to: scale.x(at) };
   });
-  const texts = [' m', ''].map((unit) =>
-    parts.map((part) => ({ ...part, text: sizeText(part.size) + unit })),
-  );
-  const fits = (list: { text: string; from: number; to: number }[]) =>
-    list.every(({ text, from, to }) => textWidth(text) + 4 <= to - from);
-  const chosen = texts.find(fits);
+  const inner = parts.slice(start > 0 ? 1 : 0, start > 0 ? spans.length + 1 : spans.length);
+  const fits = (unit: string) => (part: { size: number; from: number; to: number }) =>
+    textWidth(sizeText(part.size) + unit) + 4 <= part.to - part.from;
+  const unit = [' m', ''].find((name) => inner.every(fits(name)));
   const middle = (from: number, to: number) => Math.round((from + to) * 5) / 10;
-  if (chosen) {
-    return { y, line, texts: chosen.map(({ from, to, text }) => ({ x: middle(from, to), text })) };
+  if (unit !== undefined) {
+    const texts = parts
+      .map((part) => ({ ...part, name: fits(unit)(part) ? unit : '' }))
+      .filter((part) => fits(part.name)(part))
+      .map(({ from, to, size, name }) => ({ x: middle(from, to), text: sizeText(size) + name }));
+    return { y, line, texts };
   }
   const alike = spans.every((span) => Math.abs(span - (spans[0] ?? 0)) < 1e-9);
   const sum = `${readable(length)} m`;

@@ -29,11 +29,10 @@ export function placeLoads(loads: readonly DrawnLoad[], scale: Scale, width: num
   const spread = loads.filter(({ from, to }) => to > from);
   const points = loads.filter(({ from, to }) => from === to);
   const lanes: Lane[] = [];
-  const floor = (list: readonly DrawnLoad[], lowest: number) => {
-    for (const load of list) enter(load, lanes, lowest, scale, width);
-  };
-  floor(spread, 0);
-  floor(points, lanes.length);
+  const shafts = points.map(({ from }) => scale.x(from));
+  for (const load of spread) enter(load, lanes, 0, scale, width, shafts);
+  const above = lanes.length;
+  for (const load of points) enter(load, lanes, above, scale, width, []);
   const shown = lanes.slice(0, MOST_LANES);
   const hidden = lanes.slice(MOST_LANES).reduce((sum, lane) => sum + lane.loads.length, 0);
   const member = top + shown.length * LANE;
@@ -44,12 +43,18 @@ export function placeLoads(loads: readonly DrawnLoad[], scale: Scale, width: num
   return { placed, hidden, memberTop: member };
 }
 
-function enter(load: DrawnLoad, lanes: Lane[], lowest: number, scale: Scale, width: number): void {
+function enter(
+  load: DrawnLoad,
+  lanes: Lane[],
+  lowest: number,
+  scale: Scale,
+  width: number,
+  shafts: readonly number[],
+): void {
   const label = fitted(load.label, width);
   const wide = textWidth(label);
   const at = scale.x(load.from);
-  const beside = load.from === load.to ? at + 7 : at + 1;
-  const labelX = Math.max(2, Math.min(beside, width - wide - 2));
+  const labelX = labelPlace(load, at, wide, width, shafts);
   const taken: [number, number] = [
     Math.min(at, labelX) - 10,
     Math.max(scale.x(load.to), labelX + wide) + 10,
@@ -61,6 +66,26 @@ function enter(load: DrawnLoad, lanes: Lane[], lowest: number, scale: Scale, wid
     lane.taken.push(taken);
     return;
   }
+}
+
+/** Where the label begins: at the load's start, or beside a shaft that would run through it. */
+function labelPlace(
+  load: DrawnLoad,
+  at: number,
+  wide: number,
+  width: number,
+  shafts: readonly number[],
+): number {
+  const within = (x: number) => Math.max(2, Math.min(x, width - wide - 2));
+  if (load.from === load.to) return within(at + 7);
+  const free = (x: number) => shafts.every((shaft) => shaft < x - 4 || shaft > x + wide + 4);
+  const places = [at + 1, ...shafts.flatMap((shaft) => [shaft + 8, shaft - wide - 8])];
+  const found = places
+    .filter((x) => x >= at)
+    .sort((a, b) => a - b)
+    .map(within)
+    .find(free);
+  return found ?? within(at + 1);
 }
 
 function fitted(label: string, width: number): string {

@@ -1,7 +1,7 @@
 export const drawingStyles = `
 .ht-drawing { display: block; min-width: 0; }
 .ht-drawing svg { display: block; overflow: visible; }
-.ht-drawing text { font: 12px var(--ht-mono); font-variant-numeric: tabular-nums; fill: var(--ht-ink); }
+.ht-drawing text { font: 12px var(--ht-mono); font-variant-numeric: tabular-nums; fill: var(--ht-ink); paint-order: stroke; stroke: var(--ht-sheet); stroke-width: 4px; stroke-linejoin: round; }
 .ht-drawing .ht-dim { fill: var(--ht-quiet); text-anchor: middle; }
 .ht-drawing .ht-mid { text-anchor: middle; }
 .ht-drawing .ht-load-line { fill: none; stroke: var(--ht-timber); stroke-width: 1; }

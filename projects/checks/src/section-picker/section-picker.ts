@@ -4,6 +4,7 @@ import {
   computed,
   ElementRef,
   input,
+  linkedSignal,
   model,
   signal,
   viewChild,
@@ -41,6 +42,8 @@ export class SectionPicker {
   readonly fault = input<FieldFault>();
 
   protected readonly id = uniqueId();
+  /** The text while it is typed, before it counts. */
+  protected readonly typed = linkedSignal(() => this.text());
   private readonly list = viewChild<ElementRef<HTMLElement>>('list');
   private readonly searched = new Subject<string>();
   protected readonly lines = signal<readonly SectionLine[]>([]);
@@ -69,21 +72,32 @@ export class SectionPicker {
 
   protected type(event: Event): void {
     const text = (event.target as HTMLInputElement).value;
-    this.text.set(text);
+    this.typed.set(text);
     this.searched.next(text);
+  }
+
+  /** What is typed counts once it is left, or once the catalogue holds it or cannot tell. */
+  protected commit(): void {
+    if (this.typed() !== this.text()) this.text.set(this.typed());
+  }
+
+  protected leave(): void {
+    this.commit();
+    this.close();
   }
 
   protected press(event: KeyboardEvent): void {
     const count = this.lines().length;
     if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
-      if (!this.open()) this.searched.next(this.text());
+      if (!this.open()) this.searched.next(this.typed());
       else if (count > 0)
         this.move((this.active() + (event.key === 'ArrowDown' ? 1 : -1) + count) % count);
-    } else if (event.key === 'Enter' && this.open()) {
+    } else if (event.key === 'Enter') {
       event.preventDefault();
-      const line = this.lines()[this.active()];
+      const line = this.open() ? this.lines()[this.active()] : undefined;
       if (line) this.pick(line);
+      else this.leave();
     } else if (event.key === 'Escape' && this.open()) {
       event.preventDefault();
       event.stopPropagation();
@@ -92,8 +106,8 @@ export class SectionPicker {
   }
 
   protected pick(line: SectionLine): void {
-    this.text.set(line.designation);
-    this.close();
+    this.typed.set(line.designation);
+    this.leave();
   }
 
   protected close(): void {
@@ -104,18 +118,19 @@ export class SectionPicker {
   }
 
   /** "67.1 kg/m, 453.4 × 189.9": what is known of a section besides its name. */
-  protected facts({ mass, h, b }: SectionLine): string {
-    const number = (fact: SectionLine['mass']) => (typeof fact === 'object' ? fact.value : fact);
-    const [m, depth, width] = [mass, h, b].map(number);
-    const sizes = [depth, width].filter((size) => size !== undefined).map((size) => readable(size));
-    return [m === undefined ? '' : `${readable(m)} kg/m`, sizes.join(' × ')]
-      .filter(Boolean)
-      .join(', ');
+  protected facts({ mass, dimensions }: SectionLine): string {
+    const sizes = [dimensions?.h, dimensions?.b]
+      .filter((size) => size !== undefined)
+      .map(({ value }) => readable(value));
+    const weight = mass ? `${readable(mass.value)} kg/m` : '';
+    return [weight, sizes.join(' × ')].filter(Boolean).join(', ');
   }
 
   private show(found: readonly SectionLine[] | null): void {
     const lines = (found ?? []).slice(0, MOST);
-    const settled = lines.length === 1 && lines[0]?.designation === this.text();
+    const settled = lines.length === 1 && lines[0]?.designation === this.typed();
+    const told = lines.length > 1 && !lines.some((line) => alike(line.designation, this.typed()));
+    if (!told) this.commit();
     this.lines.set(lines);
     this.open.set(lines.length > 0 && !settled);
     this.nothing.set(found !== null && lines.length === 0);
@@ -126,4 +141,10 @@ export class SectionPicker {
     this.active.set(to);
     this.list()?.nativeElement.children[to]?.scrollIntoView({ block: 'nearest' });
   }
+}
+
+/** Whether both are one designation, but for spaces and case. */
+function alike(a: string, b: string): boolean {
+  const plain = (text: string) => text.replace(/\s/g, '').toLowerCase();
+  return plain(a) === plain(b);
 }

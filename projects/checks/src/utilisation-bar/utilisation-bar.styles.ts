@@ -6,5 +6,5 @@ export const barStyles = `
 .ht-bar::after { content: ""; position: absolute; left: 80%; top: -4px; bottom: -4px; width: 1.5px; background: var(--ht-ink); }
 .ht-bar-broken::before { content: ""; position: absolute; z-index: 1; left: calc(91% - 3px); top: -3px; bottom: -3px; width: 5px; background: var(--ht-break, var(--ht-wash)); transform: skewX(-18deg); }
 .ht-bar-small { height: 5px; }
-@media (forced-colors: active) { .ht-bar { outline: 1px solid CanvasText; } }
+@media (forced-colors: active) { .ht-bar { background: Canvas; outline: 1px solid CanvasText; } }
 `;

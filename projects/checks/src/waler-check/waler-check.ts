@@ -30,7 +30,7 @@ import type { WalerDraft } from '../form/draft';
 import { placeFaults } from '../form/place-faults';
 import { readDraft } from '../form/read-draft';
 import { writeDraft } from '../form/write-draft';
-import { drawingModel } from '../member-drawing/drawing-model';
+import { drawingModel, type DrawingModel } from '../member-drawing/drawing-model';
 import { MemberDrawing } from '../member-drawing/member-drawing';
 import { ReactionsTable } from '../reactions/reactions-table';
 import { TitleBlock } from '../title-block/title-block';
@@ -120,12 +120,17 @@ export class WalerCheck {
   /** The last answer, while something like it can still be shown. */
   protected readonly answer = computed(() => this.state().answer);
   protected readonly fresh = computed(() => this.state().phase === 'answered');
-  protected readonly drawn = computed(() => {
-    const combinations = this.fresh() ? (this.answer()?.combinations ?? []) : [];
-    return drawingModel(this.draft(), [...new Set(combinations.flatMap(({ lifted }) => lifted))]);
+  /** The member as it is typed; while its spans cannot be read, as it was. */
+  protected readonly drawn = linkedSignal<DrawingModel | null, DrawingModel | null>({
+    source: () => {
+      const combinations = this.fresh() ? (this.answer()?.combinations ?? []) : [];
+      return drawingModel(this.draft(), [...new Set(combinations.flatMap(({ lifted }) => lifted))]);
+    },
+    computation: (model, before) =>
+      model ?? (this.draft().spans.trim() === '' ? null : (before?.value ?? null)),
   });
   /** The member of the answer, which the diagrams stand in line with. */
-  protected readonly answered = linkedSignal<boolean, ReturnType<typeof drawingModel>>({
+  protected readonly answered = linkedSignal<boolean, DrawingModel | null>({
     source: this.fresh,
     computation: (fresh, before) => (fresh ? untracked(this.drawn) : (before?.value ?? null)),
   });

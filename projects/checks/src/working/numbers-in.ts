@@ -1,5 +1,5 @@
 import type { MathElement } from '../contract';
-import { readable, THIN } from '../quantity/format';
+import { readable } from '../quantity/format';
 import { unitText } from '../quantity/units';
 
 /** A number with its unit. */
@@ -19,7 +19,7 @@ export function numberElement({ value, unit }: Put): MathElement {
     attributes: { title: `${value} ${unit}`.replace(/ 1$/, '') },
   };
   const name = unitText(unit);
-  return name === '' ? number : row(number, { tag: 'mtext', text: `${THIN}${name}` });
+  return name === '' ? number : row(number, { tag: 'mtext', text: `\u00a0${name}` });
 }
 
 /** Whether any symbol in it can take a number. */

@@ -92,6 +92,14 @@ export class WorkingSheet {
     this.open.set(next);
   }
 
+  protected readonly allOpen = computed(() => this.groups().every(({ id }) => this.open().has(id)));
+
+  /** Opens the working of every verification, or closes all. */
+  protected toggleAll(): void {
+    const ids = this.allOpen() ? [] : this.groups().map(({ id }) => id);
+    this.open.set(new Set(ids));
+  }
+
   protected isOpen(event: Event): boolean {
     return (event.target as HTMLDetailsElement).open;
   }

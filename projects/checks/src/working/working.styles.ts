@@ -1,5 +1,6 @@
 export const workingStyles = `
-.ht-working { display: grid; gap: 2px; }
+.ht-working { display: grid; grid-template-columns: minmax(0, 1fr); gap: 2px; }
+.ht-working-head { display: flex; justify-content: space-between; align-items: baseline; padding-bottom: 6px; }
 .ht-group { border-top: 1px solid var(--ht-hair); scroll-margin-top: 12px; }
 .ht-group:first-of-type { border-top: 0; }
 .ht-group > summary { padding: 7px 0; color: var(--ht-ink); width: auto; }
