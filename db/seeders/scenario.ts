@@ -65,7 +65,7 @@ async function mintDemoKey(): Promise<string> {
     selector,
     secretSha256: sha256,
     label: DEMO_LABEL,
-    scopes: ['checks', 'catalogue', 'usage'],
+    scopes: ['checks', 'catalogue', 'admin'],
   });
   await AuditEvent.create({ actor: ADMIN, action: 'key.issued', subject: selector });
   return text;

@@ -569,7 +569,7 @@ export interface paths {
         };
         /**
          * Read the log
-         * @description Calls of all keys, newest first. Needs the scope `usage`, an administrator's.
+         * @description Calls of all keys, newest first. Needs the scope `admin`.
          */
         readonly get: operations["listUsage"];
         readonly put?: never;
@@ -589,7 +589,7 @@ export interface paths {
         };
         /**
          * Read one call
-         * @description The call whose answer carried this X-Request-Id. Needs the scope `usage`, an administrator's.
+         * @description The call whose answer carried this X-Request-Id. Needs the scope `admin`.
          */
         readonly get: operations["readUsage"];
         readonly put?: never;
@@ -3126,10 +3126,10 @@ export interface components {
             readonly disabled?: boolean;
         };
         /**
-         * @description What a key may do. `usage` is an administrator's.
+         * @description What a key may do. `admin` reads the usage log.
          * @enum {string}
          */
-        readonly Scope: "checks" | "catalogue" | "usage";
+        readonly Scope: "checks" | "catalogue" | "admin";
         /** A key, without its secret */
         readonly KeyFacts: {
             /** @description The public part; it names the key in lists and in the log. */
@@ -3174,7 +3174,7 @@ export interface components {
              * @example Site office workbook
              */
             readonly label: string;
-            /** @description What it may do; a page key never `usage`. Default `checks` and `catalogue`. */
+            /** @description What it may do; a page key never `admin`. Default `checks` and `catalogue`. */
             readonly scopes?: readonly components["schemas"]["Scope"][];
             /** @description Pages that may use a page key, at least one: scheme, host and port as a browser sends them, compared exactly. A secret key has none. */
             readonly origins?: readonly string[];

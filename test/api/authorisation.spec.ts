@@ -26,7 +26,7 @@ const keys = {
   expired: { expiresAt: new Date(Date.now() - 60_000) },
   checks: { scopes: ['checks'] },
   catalogue: { scopes: ['catalogue'] },
-  usage: { scopes: ['usage'] },
+  admin: { scopes: ['admin'] },
 } as const;
 type Name = keyof typeof keys;
 
@@ -146,7 +146,7 @@ describe('each route', () => {
 
   it('refuses a key that lacks its scope, and takes one that has it', async () => {
     for (const route of table()) {
-      for (const scope of allScopes as ('checks' | 'catalogue' | 'usage')[]) {
+      for (const scope of allScopes as ('checks' | 'catalogue' | 'admin')[]) {
         const { status, body } = await call(route, bearer(service.keys[scope]));
         const own = route.policy.kind === 'key' && route.policy.scope === scope;
         if (own) expect([200, 404, 422]).toContain(status);
@@ -232,7 +232,7 @@ describe('each route that people use', () => {
   it('takes no key where it is for people alone', async () => {
     for (const [route] of forPeople()) {
       if (route.policy.kind !== 'session') continue;
-      for (const key of [undefined, bearer(service.keys.secret), bearer(service.keys.usage)]) {
+      for (const key of [undefined, bearer(service.keys.secret), bearer(service.keys.admin)]) {
         const { status, body, headers } = await call(route, key);
         expect([status, body.code]).toEqual([401, 'sign-in-required']);
         expect(headers['www-authenticate']).toBe('Cookie realm="headtree"');

@@ -224,7 +224,7 @@ describe('a key', () => {
     [{ kind: 'secret' }, '/label'],
     [{ ...secret, origins: ['https://intranet.example'] }, '/origins'],
     [{ ...secret, scopes: [] }, '/scopes'],
-    [{ ...secret, scopes: ['admin'] }, '/scopes/0'],
+    [{ ...secret, scopes: ['owner'] }, '/scopes/0'],
     [{ ...secret, profiles: [] }, '/profiles'],
     [{ ...secret, profiles: ['no-such'] }, '/profiles/0'],
     [{ ...secret, rateLimit: 0 }, '/rateLimit'],
@@ -232,7 +232,7 @@ describe('a key', () => {
     [{ ...secret, expiresAt: '2099-13-01T00:00:00Z' }, '/expiresAt'],
     [{ ...secret, expiresAt: '2099-01-01' }, '/expiresAt'],
     [{ ...secret, text: 'htk_mine' }, '/text'],
-    [{ ...page, scopes: ['checks', 'usage'] }, '/scopes/1'],
+    [{ ...page, scopes: ['checks', 'admin'] }, '/scopes/1'],
     [{ ...page, origins: [] }, '/origins'],
     [{ kind: 'page', label: 'a page' }, '/origins'],
     ...[

@@ -13,7 +13,7 @@ interface Page {
 
 let service: TestService & { keys: Record<'tool' | 'admin', string> };
 beforeAll(async () => {
-  service = await startService({ tool: { scopes: ['checks'] }, admin: { scopes: ['usage'] } });
+  service = await startService({ tool: { scopes: ['checks'] }, admin: { scopes: ['admin'] } });
   for (const load of [0.5, 2, 0.25, -1, 3])
     await ask(service.server, {
       method: 'post',

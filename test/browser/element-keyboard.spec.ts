@@ -19,8 +19,8 @@ const focused = (): Promise<string> =>
   page.evaluate(() => {
     let at = document.activeElement;
     while (at?.shadowRoot?.activeElement) at = at.shadowRoot.activeElement;
-    const isField = at instanceof HTMLInputElement || at instanceof HTMLSelectElement;
-    const words = at?.getAttribute('aria-label') ?? (isField ? at.labels?.[0] : at)?.textContent;
+    const field = at instanceof HTMLInputElement || at instanceof HTMLSelectElement ? at : null;
+    const words = at?.getAttribute('aria-label') ?? (field?.labels?.[0] ?? at)?.textContent;
     return (words ?? '').trim().replace(/\s+/g, ' ');
   });
 

@@ -104,7 +104,7 @@ describe('a prepared database', () => {
     expect(await demo(key)).toBe(key);
     const [row, ...others] = await ApiKey.findAll();
     expect(others).toEqual([]);
-    expect(row?.scopes).toEqual(['checks', 'catalogue', 'usage']);
+    expect(row?.scopes).toEqual(['checks', 'catalogue', 'admin']);
     expect(row?.secretSha256).toEqual(parseKey(key)?.sha256);
     expect(JSON.stringify(row)).not.toContain(key.slice(-40));
   });

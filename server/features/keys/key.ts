@@ -1,7 +1,7 @@
 import type { KeyKind } from './key-format';
 
 /** What a key may do. `usage` is an administrator's. */
-export const scopes = ['checks', 'catalogue', 'usage'] as const;
+export const scopes = ['checks', 'catalogue', 'admin'] as const;
 export type Scope = (typeof scopes)[number];
 
 /** A key with what its client lends it, as it stands in memory. */

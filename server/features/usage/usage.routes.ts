@@ -3,7 +3,7 @@ import { findCall, listUsage, usageQuery } from './usage.service';
 
 const shared = {
   method: 'get',
-  policy: { kind: 'key', scope: 'usage', keyKinds: ['secret'], permission: 'usage:read' },
+  policy: { kind: 'key', scope: 'admin', keyKinds: ['secret'], permission: 'usage:read' },
   rate: 'counted',
   logged: true,
 } as const;

@@ -54,7 +54,7 @@ export interface TestService {
   stop(): Promise<void>;
 }
 
-export const allScopes = ['checks', 'catalogue', 'usage'];
+export const allScopes = ['checks', 'catalogue', 'admin'];
 
 /** Adds a client with one key; gives its text. */
 export async function addKey(owner: Pool, options: KeyOptions = {}): Promise<string> {

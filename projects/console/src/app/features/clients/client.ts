@@ -9,7 +9,7 @@ export interface Client {
 }
 
 export type KeyKind = 'secret' | 'page' | 'cell';
-export type Scope = 'checks' | 'catalogue' | 'usage';
+export type Scope = 'checks' | 'catalogue' | 'admin';
 
 /** A key as it may be shown: its public part only. */
 export interface Key {

@@ -29,7 +29,7 @@ export function requestFrom(form: IssueForm, now: Date): KeyRequest {
   const wanted: readonly [Scope, boolean][] = [
     ['checks', form.checks],
     ['catalogue', form.catalogue],
-    ['usage', form.usage && usageIsFor(form.kind)],
+    ['admin', form.usage && usageIsFor(form.kind)],
   ];
   return {
     kind: form.kind,
