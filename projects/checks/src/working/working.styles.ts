@@ -10,7 +10,7 @@ export const workingStyles = `
 .ht-line { display: grid; grid-template-columns: minmax(0, 1fr) 220px; gap: 0 24px; align-items: baseline; padding: 7px 0; border-bottom: 1px solid var(--ht-hair); }
 .ht-line:last-child { border-bottom: 0; }
 .ht-line-title { grid-column: 1; font-size: 12px; color: var(--ht-quiet); }
-.ht-line-math { grid-column: 1; padding: 2px 0; }
+.ht-line-math { grid-column: 1; padding: 4px 0; overflow-y: hidden; }
 .ht-line-pieces { display: flex; flex-wrap: wrap; align-items: center; gap: 4px 6px; width: 100%; }
 .ht-line-words { grid-column: 1; font-size: 13px; overflow-wrap: anywhere; }
 .ht-line-words.ht-mono { font-size: 12px; color: var(--ht-quiet); }
