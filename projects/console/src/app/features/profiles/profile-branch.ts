@@ -63,9 +63,13 @@ interface DepartureLine {
       font-family: var(--mono);
       font-size: 14px;
     }
-    @media (min-width: 621px) {
+    @media screen and (min-width: 621px) {
       table {
         min-width: 860px;
+      }
+    }
+    @media print, (min-width: 621px) {
+      table {
         table-layout: fixed;
       }
       th:nth-child(1) {

@@ -66,7 +66,7 @@ export class ProfilePage {
       unconfirmed:
         unconfirmed === 0
           ? '.'
-          : `, ${inWords(unconfirmed)} of them with no published example behind it: an answer that uses one is provisional.`,
+          : `, ${inWords(unconfirmed)} of them confirmed by no published example: an answer that uses one is provisional.`,
       departures: counted(this.departures().length, 'departure'),
     };
   });

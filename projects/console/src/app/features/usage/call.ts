@@ -1,5 +1,6 @@
 import type { components } from '@headtree/contract';
 import type { Standing } from '../../shared/answer-tag';
+import { count } from '../../shared/words';
 import type { Page } from '../../core/api/page';
 
 interface Names {
@@ -44,4 +45,10 @@ export const callerOf = ({ clientName, clientId, personName, personId }: Call): 
 export const shortId = (id: string): string => `${id.slice(0, 6)}…${id.slice(-2)}`;
 
 export const milliseconds = (microseconds: number): string =>
-  (microseconds / 1000).toFixed(microseconds < 100_000 ? 1 : 0);
+  microseconds < 100_000
+    ? (microseconds / 1000).toFixed(1)
+    : count(Math.round(microseconds / 1000));
+
+/** What this console itself read or wrote for somebody: no tool's call, and no check. */
+export const isConsoles = ({ personId, checkId }: Call): boolean =>
+  typeof personId === 'string' && checkId === null;

@@ -18,6 +18,7 @@ describe('filters of the log and the address', () => {
       profile: 'uk-na@2',
       answer: '422',
       range: 'week',
+      console: 'shown',
     } as const;
     expect(from(addressOf(filters) as Record<string, string>)).toEqual(filters);
     expect(isNarrowed(filters)).toBe(true);

@@ -10,6 +10,8 @@ export interface UsageFilters {
   /** Status of a check, or an HTTP status. */
   readonly answer: string;
   readonly range: Range;
+  /** `shown`: with what this console itself asked. */
+  readonly console: '' | 'shown';
 }
 
 const hour = 3_600_000;
@@ -30,6 +32,7 @@ export const unfiltered: UsageFilters = {
   profile: '',
   answer: '',
   range: 'month',
+  console: '',
 };
 
 const names = ['client', 'key', 'check', 'profile'] as const;
@@ -47,6 +50,7 @@ export function filtersFrom(params: Pick<ParamMap, 'get'>): UsageFilters {
     ...Object.fromEntries(names.map((name) => [name, params.get(name) ?? ''])),
     answer: isCheckAnswer(answer) || isHttpStatus(answer) ? answer : '',
     range: isRange(range) ? range : unfiltered.range,
+    console: params.get('console') === 'shown' ? 'shown' : '',
   };
 }
 

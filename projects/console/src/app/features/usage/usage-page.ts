@@ -15,6 +15,7 @@ import { zone } from '../../shared/dates';
 import { Loading } from '../../shared/loading';
 import { PageHead } from '../../shared/page-head';
 import { ProblemNote } from '../../shared/problem-note';
+import { capital, counted } from '../../shared/words';
 import { UsageFiltersForm } from './usage-filters-form';
 import {
   addressOf,
@@ -61,15 +62,17 @@ export class UsagePage {
   protected readonly period = computed(() => ranges[this.filters().range].words);
   protected readonly aside = computed(() => {
     const period = this.period();
-    return `${period.charAt(0).toUpperCase()}${period.slice(1)}, times in ${zone()}`;
+    return `${capital(period)}, times in ${zone()}`;
   });
+
+  protected readonly leftOut = computed(() => capital(counted(this.log.leftOut(), 'call')));
 
   constructor() {
     this.choices.read();
     effect(() => {
       const filters = this.filters();
       this.connection.returns();
-      untracked(() => void this.log.read(queryOf(filters, new Date())));
+      untracked(() => void this.read(filters));
     });
   }
 
@@ -81,7 +84,15 @@ export class UsagePage {
     });
   }
 
+  protected showConsole(shown: boolean): void {
+    this.narrow({ ...this.filters(), console: shown ? 'shown' : '' });
+  }
+
   protected readAgain(): void {
-    void this.log.read(queryOf(this.filters(), new Date()));
+    void this.read(this.filters());
+  }
+
+  private read(filters: UsageFilters): Promise<void> {
+    return this.log.read(queryOf(filters, new Date()), filters.console === 'shown');
   }
 }
