@@ -49,13 +49,13 @@ export class LoadTable {
 
   protected remove(row: LoadRow): void {
     const index = this.rows().indexOf(row);
-    this.rows.set(this.rows().filter((one) => one !== row));
+    this.rows.set(this.rows().filter((one) => one.id !== row.id));
     if (this.rows().length > 0) this.focus(Math.max(0, index - 1), '.ht-load-remove');
     else this.focus(-1, '.ht-acts button');
   }
 
   protected change(row: LoadRow, change: Partial<LoadRow>): void {
-    this.rows.set(this.rows().map((one) => (one === row ? { ...row, ...change } : one)));
+    this.rows.set(this.rows().map((one) => (one.id === row.id ? { ...one, ...change } : one)));
   }
 
   protected fault(row: LoadRow, field: string): FieldFault | undefined {

@@ -1,4 +1,12 @@
-import { afterNextRender, DestroyRef, Directive, ElementRef, inject, signal } from '@angular/core';
+import {
+  afterNextRender,
+  DestroyRef,
+  Directive,
+  ElementRef,
+  inject,
+  input,
+  signal,
+} from '@angular/core';
 
 /** A box that scrolls sideways inside itself; the keyboard reaches it while there is something to scroll. */
 @Directive({
@@ -7,9 +15,12 @@ import { afterNextRender, DestroyRef, Directive, ElementRef, inject, signal } fr
     class: 'ht-scroll',
     '[attr.tabindex]': 'scrolls() ? 0 : null',
     '[attr.role]': "scrolls() ? 'group' : null",
+    '[attr.aria-label]': 'scrolls() ? htcScrolls() : null',
   },
 })
 export class Scrolls {
+  /** What is in the box, for those who reach it to scroll. */
+  readonly htcScrolls = input.required<string>();
   /** Whether the content is wider than the box. */
   protected readonly scrolls = signal(false);
 

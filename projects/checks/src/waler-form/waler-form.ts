@@ -73,12 +73,14 @@ export class WalerForm {
   }
 
   protected changeWaiver(row: WaiverRow, change: Partial<WaiverRow>): void {
-    const waivers = this.draft().waivers.map((one) => (one === row ? { ...row, ...change } : one));
+    const waivers = this.draft().waivers.map((one) =>
+      one.id === row.id ? { ...one, ...change } : one,
+    );
     this.set({ waivers });
   }
 
   protected removeWaiver(row: WaiverRow): void {
-    this.set({ waivers: this.draft().waivers.filter((one) => one !== row) });
+    this.set({ waivers: this.draft().waivers.filter((one) => one.id !== row.id) });
   }
 }
 

@@ -32,10 +32,9 @@ export class WorkingLine {
   protected readonly pieces = computed((): readonly (readonly MathElement[])[] => {
     const step = this.step();
     const value = this.value(step);
-    const formula = this.formula();
-    if (!formula) return [[symbolElement(step.symbol ?? ''), ...value]];
-    const [symbol, , expression] = (formula.elements as unknown as MathElement).children ?? [];
-    if (!symbol || !expression) return [[symbolElement(formula.symbol), ...value]];
+    const elements = this.formula()?.elements as MathElement | undefined;
+    const [symbol, , expression] = elements?.children ?? [];
+    if (!symbol || !expression) return [[symbolElement(step.symbol ?? ''), ...value]];
     const numbers = takesNumbers(expression) ? [[EQUALS, numbersIn(expression, step.inputs)]] : [];
     return [[symbol, EQUALS, expression], ...numbers, value];
   });
