@@ -8,7 +8,7 @@ import { problemOf } from '../core/api/problem';
   template: `
     <div class="problem" role="alert">
       <p>
-        <b>{{ problem().title }}.</b> {{ problem().detail }}
+        <b>{{ problem().title }}.</b> {{ detail() }}
       </p>
       @for (item of problem().errors; track $index) {
         <p class="quiet">{{ item.message }} {{ item.fix }}</p>
@@ -33,6 +33,11 @@ export class ProblemNote {
   readonly error = input.required<unknown>();
   readonly retry = input(true);
   readonly again = output();
+  /** Nothing where the title has said it already. */
+  protected readonly detail = computed(() => {
+    const { title, detail } = this.problem();
+    return detail === `${title}.` ? '' : detail;
+  });
   protected readonly problem = computed(() => {
     const error = this.error();
     // A resource wraps what is not an Error of its own making.

@@ -24,8 +24,8 @@ export function sparkPath(
     const last = run.at(-1);
     if (!first || !last) return;
     const points = run.map(([x, y]) => `${x} ${y}`).join('L');
-    // A single point between gaps is drawn as a dot: a line of no length with round ends.
-    line += run.length === 1 ? `M${points}h0.1` : `M${points}`;
+    // A single point between gaps is drawn as a short dash.
+    line += run.length === 1 ? `M${Math.max(0, first[0] - 3)} ${first[1]}h6` : `M${points}`;
     area += `M${first[0]} ${height}L${points}L${last[0]} ${height}Z`;
     run = [];
   };

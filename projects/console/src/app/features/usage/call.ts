@@ -49,6 +49,10 @@ export const milliseconds = (microseconds: number): string =>
     ? (microseconds / 1000).toFixed(1)
     : count(Math.round(microseconds / 1000));
 
-/** What this console itself read or wrote for somebody: no tool's call, and no check. */
-export const isConsoles = ({ personId, checkId }: Call): boolean =>
-  typeof personId === 'string' && checkId === null;
+/**
+ * What this console itself asked for somebody: no tool's call, and no check. A sign-in that was
+ * refused is nobody's, and always worth a look.
+ */
+export const isConsoles = ({ personId, checkId, route, httpStatus }: Call): boolean =>
+  (typeof personId === 'string' && checkId === null) ||
+  (route === '/v1/session' && httpStatus < 400);

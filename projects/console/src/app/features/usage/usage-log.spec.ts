@@ -7,6 +7,8 @@ interface Row {
   id: string;
   personId: string | null;
   checkId: string | null;
+  route: string;
+  httpStatus: number;
 }
 
 const tools = (name: string, count: number): Row[] =>
@@ -14,12 +16,16 @@ const tools = (name: string, count: number): Row[] =>
     id: `${name}${index}`,
     personId: null,
     checkId: 'waler',
+    route: '/v1/checks/waler',
+    httpStatus: 200,
   }));
 const consoles = (count: number): Row[] =>
   Array.from({ length: count }, (_, index) => ({
     id: `own${index}`,
     personId: 'p1',
     checkId: null,
+    route: '/v1/clients',
+    httpStatus: 200,
   }));
 
 function logOver(pages: readonly Row[][]) {
@@ -55,6 +61,19 @@ describe('the loaded part of the log', () => {
     expect(log.calls()).toHaveLength(70);
     expect(log.leftOut()).toBe(190);
     expect(asked).toHaveLength(2);
+  });
+
+  it('counts a sign-in as the console’s, unless it was refused', async () => {
+    const [row] = consoles(1);
+    const signIn = { ...row, id: 'in', personId: null, checkId: null, route: '/v1/session' };
+    const { log } = logOver([
+      [
+        { ...signIn, httpStatus: 200 },
+        { ...signIn, id: 'refused', httpStatus: 401 },
+      ],
+    ]);
+    await log.read({}, false);
+    expect(log.calls()?.map(({ id }) => id)).toEqual(['refused']);
   });
 
   it('shows it where that is wanted', async () => {
