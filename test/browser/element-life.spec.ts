@@ -1,6 +1,7 @@
 import type { Page } from 'playwright-core';
 import { startBench, type Bench } from './support/browser';
 import { answerOf, field, rememberEvents, told, waler, type WalerElement } from './support/element';
+import { startSite } from './support/site';
 import { failing, passing } from './support/waler';
 
 /** The element through all that a page and a network do to it. */
@@ -178,6 +179,18 @@ describe('a service that goes away', () => {
     expect(await answerOf(page)).toBe('pass');
     await page.getByText('The service does not answer').first().waitFor({ state: 'hidden' });
     expect((await told(page)).at(-1)).toMatchObject({ spans: [2.5, 3, 2.5] });
+  });
+});
+
+describe('a page whose origin no key lists', () => {
+  it('is told so, not that the service is away', async () => {
+    const stranger = await startSite();
+    const page = await bench.open({ value: passing, prepare: rememberEvents, site: stranger });
+    await page.getByText(`its origin ${stranger.origin} is on the list of no page key`).waitFor();
+    const [first] = await told(page);
+    expect(first).toMatchObject({ name: 'headtree-error', kind: 'not-allowed' });
+    await page.context().close();
+    await stranger.stop();
   });
 });
 

@@ -1,8 +1,9 @@
 /** The script that a page loads: makes the elements known to it, and nothing else. */
 import { CSP_NONCE, Injector, provideZonelessChangeDetection } from '@angular/core';
 import { createApplication } from '@angular/platform-browser';
-import { WalerCheck } from '@headtree/checks';
+import { HEADTREE_FETCH, WalerCheck } from '@headtree/checks';
 import { makeCheckElement } from './element/check-element';
+import { fetchOrSayWhy } from './script/fetcher';
 import { isTaken } from './script/taken';
 import { readScript } from './script/script';
 
@@ -17,6 +18,7 @@ async function start(): Promise<void> {
     providers: [
       provideZonelessChangeDetection(),
       { provide: CSP_NONCE, useValue: script.nonce ?? null },
+      { provide: HEADTREE_FETCH, useValue: fetchOrSayWhy },
     ],
   });
   const injector = application.injector.get(Injector);

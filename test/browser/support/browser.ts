@@ -26,6 +26,8 @@ export interface Bench {
 
 export interface OpenOptions {
   readonly value?: object;
+  /** Another site than the one that the page key lists. */
+  readonly site?: Site;
   readonly key?: string;
   readonly attributes?: string;
   /** Put into the head. */
@@ -71,7 +73,9 @@ export async function startBench(): Promise<Bench> {
       const page = await context.newPage();
       await prepare?.(page);
       const html = htmlOf(service.url, { key, ...options });
-      await page.goto(site.put(`/${++pages}`, { html, ...(policy && { policy }) }));
+      await page.goto(
+        (options.site ?? site).put(`/${++pages}`, { html, ...(policy && { policy }) }),
+      );
       await page.waitForFunction(() => customElements.get('headtree-waler') !== undefined);
       return page;
     },

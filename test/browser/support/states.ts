@@ -50,7 +50,10 @@ export const states: Readonly<Record<string, State>> = {
     options: { value: { ...passing, section: 'UB 999x999x999' } },
     reach: says(/999x999x999/),
   },
-  'key refused': { options: { value: passing, key: 'htp_none' }, reach: says('The key is mistyped') },
+  'key refused': {
+    options: { value: passing, key: 'htp_none' },
+    reach: says('The key is mistyped'),
+  },
   'secret key': {
     options: { value: passing, key: `htk_none` },
     reach: says('This is a secret key'),
