@@ -52,19 +52,34 @@ export async function buildWeb() {
  */
 async function bring(name, output, sources, make) {
   const hash = hashOf(sources);
-  const stamp = join(output, 'sources.sha256');
-  if (read(stamp) === hash) return say(`${name} built already`);
+  const stamp = `${output}.sha256`;
+  if (read(stamp) === hash && existsSync(output)) return say(`${name} built already`);
   say(`building the ${name}, up to a minute the first time`);
   const partial = join(dist, `${name}.${process.pid}.new`);
   try {
     mkdirSync(partial, { recursive: true });
     const words = await make(partial);
-    writeFileSync(join(partial, 'sources.sha256'), hash);
-    rmSync(output, { recursive: true, force: true });
-    renameSync(partial, output);
+    rmSync(stamp, { force: true });
+    takePlace(partial, output);
+    writeFileSync(stamp, hash);
     say(`${name} built${words ? `: ${words}` : ''}`);
   } finally {
     rmSync(partial, { recursive: true, force: true });
+  }
+}
+
+/** Another build of the same sources may come between. @param {string} fresh @param {string} place */
+function takePlace(fresh, place) {
+  const old = `${place}.${process.pid}.old`;
+  for (let tries = 3; tries > 0; tries--) {
+    if (existsSync(place)) renameSync(place, old);
+    try {
+      renameSync(fresh, place);
+      tries = 0;
+    } catch (error) {
+      if (tries === 1) throw error;
+    }
+    rmSync(old, { recursive: true, force: true });
   }
 }
 
@@ -100,7 +115,8 @@ function read(file) {
 
 /** Builds a project of angular.json into a folder. @param {string} project @param {string} folder */
 async function angular(project, folder) {
-  const args = ['build', project, '--output-path', folder, '--stats-json', '--progress', 'false'];
+  const stats = project === 'widgets' ? ['--stats-json'] : [];
+  const args = ['build', project, '--output-path', folder, '--progress', 'false', ...stats];
   const { code, stdout, stderr } = await run(join(root, 'node_modules/.bin/ng'), args, {
     cwd: root,
     env: { ...process.env, NG_CLI_ANALYTICS: 'false', NO_COLOR: '1', CI: '1' },
