@@ -3,13 +3,16 @@ import { answerOf, verification } from '../../testing/answers';
 import type { RunState } from '../api/check-runner';
 import type { CheckAnswer } from '../contract';
 import { barTone } from '../utilisation-bar/utilisation-bar';
+import { writeDraft } from '../form/write-draft';
+import { drawingModel } from '../member-drawing/drawing-model';
+import { patternText } from './pattern-words';
 import { AnswerPanel } from './answer-panel';
 import { AnswerPanelHarness } from './testing/answer-panel-harness';
 
 function panel(state: Partial<RunState>): AnswerPanelHarness {
   const fixture = TestBed.createComponent(AnswerPanel);
   fixture.componentRef.setInput('state', { phase: 'idle', answer: null, error: null, ...state });
-  fixture.componentRef.setInput('spans', 2);
+  fixture.componentRef.setInput('member', drawingModel(writeDraft({ spans: [3, 3] })));
   fixture.detectChanges();
   return new AnswerPanelHarness(fixture.nativeElement as Element);
 }
@@ -98,4 +101,21 @@ describe('the answer', () => {
     expect(shown.tones).toEqual(['none', 'none', 'none']);
     expect(shown.text).toContain('before its last change');
   });
+});
+
+describe('where variable loads stand', () => {
+  const plain = { spans: 4, start: false, end: false };
+  const hung = { spans: 3, start: true, end: true };
+
+  it.each([
+    ['all', plain, 'on every span'],
+    ['odd', plain, 'on spans 1 and 3'],
+    ['neighbours-1', plain, 'on spans 1, 2 and 4'],
+    ['without-neighbours-1', plain, 'on span 3'],
+    ['neighbours-1', hung, 'on the start overhang and spans 1 and 3'],
+    ['odd', hung, 'on the start overhang, span 2 and the end overhang'],
+    ['panels-0110', plain, 'on spans 2 and 3'],
+    ['none', plain, ''],
+    ['something-new', plain, 'something-new'],
+  ])('%s', (pattern, panels, words) => expect(patternText(pattern, panels)).toBe(words));
 });

@@ -8,15 +8,16 @@ import {
 } from '@angular/core';
 import type { RunState } from '../api/check-runner';
 import type { FieldFault } from '../form/read-draft';
+import type { DrawingModel } from '../member-drawing/drawing-model';
 import { utilisationText } from '../quantity/format';
 import { StatusMark, type MarkKind } from '../status-mark/status-mark';
 import { barTone, UtilisationBar } from '../utilisation-bar/utilisation-bar';
+import { listed, patternText } from './pattern-words';
 import { answerLines, governingText } from './answer-lines';
 import {
   capital,
   combinationTerms,
   count,
-  patternText,
   provisionalReasons,
   statusWord,
   verificationName,
@@ -42,8 +43,8 @@ export class AnswerPanel {
   readonly faults = input<readonly FieldFault[]>([]);
   /** How many things are marked beside their field. */
   readonly beside = input(0);
-  /** How many spans the member has. */
-  readonly spans = input(0);
+  /** The member of the answer. */
+  readonly member = input<DrawingModel | null>(null);
 
   /** The verification whose working is asked for. */
   readonly opened = output<string>();
@@ -54,7 +55,6 @@ export class AnswerPanel {
   protected readonly utilisationText = utilisationText;
   protected readonly verificationName = (id: string) => capital(verificationName(id));
   protected readonly combinationTerms = combinationTerms;
-  protected readonly patternText = patternText;
   protected readonly count = count;
 
   protected readonly answer = computed(() => this.state().answer);
@@ -100,9 +100,18 @@ export class AnswerPanel {
     const answer = this.answer();
     return answer && this.fresh() ? barTone(answer.status, answer.status === 'pass') : 'none';
   });
-  protected readonly wantingText = computed(() => {
-    const list = this.wanting();
-    if (list.length < 2) return list.join('');
-    return `${list.slice(0, -1).join(', ')} and ${list.at(-1) ?? ''}`;
+  /** Where the variable loads of the governing combination stand. */
+  protected readonly pattern = computed(() => {
+    const combination = this.governing()?.combination;
+    const member = this.member();
+    if (!combination || !member || combination.lostSupport !== null) return '';
+    const { spans, start, end } = member;
+    return patternText(combination.pattern, {
+      spans: spans.length,
+      start: start > 0,
+      end: end > 0,
+    });
   });
+  protected readonly wantingText = computed(() => listed(this.wanting()));
+  private readonly spans = computed(() => this.member()?.spans.length ?? 0);
 }

@@ -48,23 +48,6 @@ export function placeText(at: Verification['at'], spans: number): string {
   return `${where}, x = ${fixed(at.x, 2)} m`;
 }
 
-const PATTERNS: Readonly<Record<string, string>> = {
-  all: 'on every span',
-  odd: 'on odd spans',
-  even: 'on even spans',
-};
-
-/** Where the variable loads stand: "on the spans beside prop 2". */
-export function patternText(pattern: string | null): string {
-  if (pattern === null) return '';
-  const beside = /^(without-)?neighbours-(\d+)$/.exec(pattern);
-  if (!beside) return PATTERNS[pattern] ?? pattern;
-  const prop = Number(beside[2]) + 1;
-  return beside[1]
-    ? `on all but every other span from prop ${prop}`
-    : `beside prop ${prop} and every other span`;
-}
-
 /** The terms of a combination: "1.35 earth", "1.50 surcharge". */
 export function combinationTerms({ factors }: CombinationLine): string[] {
   return Object.entries(factors).map(([name, factor]) => `${fixed(factor, 2)} ${name}`);

@@ -1,5 +1,4 @@
 import { TestBed } from '@angular/core/testing';
-import type { ApiClient } from '../api/api-client';
 import { SectionPicker } from './section-picker';
 import { SectionPickerHarness } from './testing/section-picker-harness';
 
@@ -15,7 +14,9 @@ describe('the section picker', () => {
 
   function picker(sections: jest.Mock) {
     const fixture = TestBed.createComponent(SectionPicker);
-    fixture.componentRef.setInput('client', { sections } as unknown as ApiClient);
+    fixture.componentRef.setInput('client', { sections });
+    const pending: boolean[] = [];
+    fixture.componentInstance.pending.subscribe((now) => pending.push(now));
     fixture.detectChanges();
     const harness = new SectionPickerHarness(fixture.nativeElement as Element);
     const type = async (text: string) => {
@@ -27,7 +28,7 @@ describe('the section picker', () => {
       harness.key(name);
       fixture.detectChanges();
     };
-    return { harness, type, key, text: () => fixture.componentInstance.text() };
+    return { harness, pending, type, key, text: () => fixture.componentInstance.text() };
   }
 
   it('searches what is typed and is picked from by the keyboard', async () => {
@@ -44,6 +45,15 @@ describe('the section picker', () => {
     key('Enter');
     expect(text()).toBe('UC 254x254x89');
     expect(harness.options).toEqual([]);
+  });
+
+  it('says so while what is typed does not count yet', async () => {
+    const { type, key, pending } = picker(jest.fn().mockResolvedValue(lines));
+    await type('uc254');
+    expect(pending.at(-1)).toBe(true);
+    key('ArrowDown');
+    key('Enter');
+    expect(pending.at(-1)).toBe(false);
   });
 
   it('closes on Escape and keeps what is typed', async () => {

@@ -2,9 +2,11 @@ import {
   ChangeDetectionStrategy,
   Component,
   computed,
+  effect,
   input,
   linkedSignal,
   model,
+  output,
   signal,
   viewChild,
   type ElementRef,
@@ -41,6 +43,9 @@ export class SectionPicker {
   readonly readonly = input(false);
   readonly fault = input<FieldFault>();
 
+  /** Whether something is typed that does not count yet: no answer belongs to it. */
+  readonly pending = output<boolean>();
+
   protected readonly id = uniqueId();
   /** The text while it is typed, before it counts. */
   protected readonly typed = linkedSignal(() => this.text());
@@ -56,6 +61,7 @@ export class SectionPicker {
   );
 
   constructor() {
+    effect(() => this.pending.emit(this.typed() !== this.text()));
     const none: readonly SectionLine[] | null = null;
     this.searched
       .pipe(

@@ -23,7 +23,7 @@ import {
   type Credentials,
 } from '../api/api-client';
 import type { ApiError } from '../api/api-error';
-import { CheckRunner } from '../api/check-runner';
+import { CheckRunner, type RunState } from '../api/check-runner';
 import type { CheckAnswer, ProfileSummary, WalerRequest } from '../contract';
 import { EnvelopeDiagram } from '../envelope-diagram/envelope-diagram';
 import type { WalerDraft } from '../form/draft';
@@ -97,7 +97,13 @@ export class WalerCheck {
     return new ApiClient(access, this.fetcher);
   });
   private readonly runner = new CheckRunner(() => this.client());
-  protected readonly state = this.runner.state;
+  /** Whether a section is being typed that does not count yet. */
+  protected readonly picking = signal(false);
+  /** Where the check stands; what is typed beyond it makes its answer an old one. */
+  protected readonly state = computed((): RunState => {
+    const state = this.runner.state();
+    return this.picking() && state.phase === 'answered' ? { ...state, phase: 'busy' } : state;
+  });
   protected readonly profiles = signal<readonly ProfileSummary[]>([]);
 
   protected readonly draft = linkedSignal<[WalerRequest | null, string], WalerDraft>({
@@ -153,7 +159,7 @@ export class WalerCheck {
       untracked(() => this.follow(request));
     });
     effect(() => {
-      const { phase, answer, error } = this.state();
+      const { phase, answer, error } = this.runner.state();
       untracked(() => {
         if (phase === 'answered' && answer) this.result.emit(answer);
         else if (error && phase !== 'busy') this.failed.emit(error);

@@ -5,6 +5,7 @@ import {
   input,
   linkedSignal,
   model,
+  output,
   ViewEncapsulation,
 } from '@angular/core';
 import type { ApiClient } from '../api/api-client';
@@ -34,6 +35,9 @@ export class WalerForm {
   /** Where the catalogue is searched. */
   readonly client = input.required<ApiClient>();
   readonly readonly = input(false);
+
+  /** Whether a section is being typed that does not count yet. */
+  readonly pending = output<boolean>();
 
   protected readonly options = options;
   private readonly faultBehind = computed(() =>

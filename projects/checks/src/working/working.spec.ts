@@ -1,6 +1,5 @@
 import { TestBed } from '@angular/core/testing';
 import { answerOf } from '../../testing/answers';
-import type { ApiClient } from '../api/api-client';
 import type { Formula, MathElement } from '../contract';
 import { mathNode } from './math-line';
 import { numbersIn } from './numbers-in';
@@ -24,7 +23,7 @@ const formula = {
 const textOf = (element: MathElement): string => {
   const inner =
     element.text ?? (element.children ?? []).map(textOf).join(element.tag === 'mfrac' ? '/' : '');
-  return element.tag === 'msup' ? `${(element.children ?? []).map(textOf).join('^')}` : inner;
+  return element.tag === 'msup' ? (element.children ?? []).map(textOf).join('^') : inner;
 };
 
 describe('numbers in a formula', () => {
@@ -73,7 +72,7 @@ describe('the working', () => {
     const ask = jest.fn().mockResolvedValue(formula);
     const fixture = TestBed.createComponent(WorkingSheet);
     fixture.componentRef.setInput('answer', answerOf());
-    fixture.componentRef.setInput('client', { formula: ask } as unknown as ApiClient);
+    fixture.componentRef.setInput('client', { formula: ask });
     fixture.detectChanges();
     await fixture.whenStable();
     fixture.detectChanges();
@@ -93,7 +92,7 @@ describe('the working', () => {
     fixture.componentRef.setInput('answer', answerOf());
     fixture.componentRef.setInput('client', {
       formula: () => Promise.reject(new Error()),
-    } as unknown as ApiClient);
+    });
     fixture.detectChanges();
     await fixture.whenStable();
     expect((fixture.nativeElement as HTMLElement).textContent).toContain(

@@ -18,6 +18,10 @@ export const workingStyles = `
 .ht-math { display: block; flex: none; }
 .ht-math math { font-family: var(--ht-math); font-size: 17px; }
 .ht-math mn, .ht-math mtext { font-variant-numeric: lining-nums tabular-nums; }
+@container ht-sheet (width < 820px) {
+  .ht-line-clause { grid-row: 1; }
+  .ht-line-math, .ht-line-words { grid-column: 1 / -1; }
+}
 @container ht-sheet (width < 620px) {
   .ht-line { grid-template-columns: minmax(0, 1fr); }
   .ht-line-clause { grid-column: 1; grid-row: auto; text-align: start; }
