@@ -26,6 +26,12 @@ async function unsettled(route: Route): Promise<void> {
   });
 }
 
+/** The script has come, and then nothing more does. */
+async function away(page: Page): Promise<void> {
+  for (const path of ['**/v1/checks/**', '**/v1/profiles*', '**/custom-elements.json'])
+    await page.route(path, (route) => route.abort());
+}
+
 const says = (text: string | RegExp) => (page: Page) => page.getByText(text).first().waitFor();
 
 /** Every state that a person can meet. */
@@ -66,7 +72,7 @@ export const states: Readonly<Record<string, State>> = {
     reach: (page) => page.waitForTimeout(800),
   },
   offline: {
-    options: { value: passing, prepare: (page) => page.route(checks, (route) => route.abort()) },
+    options: { value: passing, prepare: away },
     reach: says('The service does not answer'),
   },
   readonly: { options: { value: passing, attributes: 'readonly' }, reach: answerOf },
