@@ -29,12 +29,17 @@ export class Scrolls {
     const ending = inject(DestroyRef);
     afterNextRender(() => {
       if (typeof ResizeObserver === 'undefined') return;
-      const observer = new ResizeObserver(() =>
-        this.scrolls.set(box.scrollWidth > box.clientWidth + 1),
-      );
-      observer.observe(box);
-      for (const child of Array.from(box.children)) observer.observe(child);
-      ending.onDestroy(() => observer.disconnect());
+      const measure = (): void => this.scrolls.set(box.scrollWidth > box.clientWidth + 1);
+      const sizes = new ResizeObserver(measure);
+      sizes.observe(box);
+      for (const child of Array.from(box.children)) sizes.observe(child);
+      // A formula that comes later runs over without a change of any box's size.
+      const content = new MutationObserver(measure);
+      content.observe(box, { childList: true, subtree: true, characterData: true });
+      ending.onDestroy(() => {
+        sizes.disconnect();
+        content.disconnect();
+      });
     });
   }
 }
