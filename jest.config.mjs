@@ -30,7 +30,12 @@ export default {
       testMatch: ['<rootDir>/test/**/*.spec.ts'],
       testPathIgnorePatterns: ['/node_modules/', '<rootDir>/test/browser/'],
     },
-    { ...shared, displayName: 'browser', testMatch: ['<rootDir>/test/browser/**/*.spec.ts'] },
+    {
+      ...shared,
+      displayName: 'browser',
+      testMatch: ['<rootDir>/test/browser/**/*.spec.ts'],
+      setupFilesAfterEnv: ['<rootDir>/test/browser/support/patience.ts'],
+    },
     library,
   ],
 };

@@ -6,7 +6,7 @@ import { failing, passing } from './support/waler';
 let bench: Bench;
 beforeAll(async () => {
   bench = await startBench();
-}, 60_000);
+});
 afterAll(() => bench.stop());
 
 /** What the page says on its console, from the start. */

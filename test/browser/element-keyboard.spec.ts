@@ -11,7 +11,7 @@ beforeAll(async () => {
     before: '<a href="#" id="before">Before</a>',
     after: '<a href="#" id="after">After</a>',
   });
-}, 60_000);
+});
 afterAll(() => bench.stop());
 
 /** What has the focus, in words, through shadow roots. */

@@ -8,7 +8,7 @@ import { failing, passing } from './support/waler';
 let bench: Bench;
 beforeAll(async () => {
   bench = await startBench();
-}, 60_000);
+});
 afterAll(() => bench.stop());
 
 const spansOf = (page: Page): Promise<unknown> =>

@@ -4,7 +4,7 @@ import { startBench, type Bench } from './support/browser';
 let bench: Bench;
 beforeAll(async () => {
   bench = await startBench();
-}, 60_000);
+});
 afterAll(() => bench.stop());
 
 interface Named {

@@ -40,7 +40,7 @@ beforeAll(async () => {
     [email, hashPassword(password, 4)],
   );
   admin = await (await browser.newContext({ viewport: { width: 1440, height: 1000 } })).newPage();
-}, 60_000);
+});
 afterAll(async () => {
   await browser.close();
   if (intranet) await end(intranet);
@@ -71,7 +71,7 @@ it('the admin signs in, makes a client and issues it a page key', async () => {
   key = (await admin.getByLabel('The key', { exact: true }).textContent())?.trim() ?? '';
   expect(key).toMatch(/^htp_[0-9A-Za-z]{12}_[0-9A-Za-z]{49}$/);
   await button('I have stored the key').click();
-}, 60_000);
+});
 
 let engineer: Page;
 it('an engineer’s waler fails on the intranet, is changed and passes', async () => {
@@ -104,7 +104,7 @@ it('an engineer’s waler fails on the intranet, is changed and passes', async (
   await engineer.locator('headtree-waler:state(pass)').waitFor();
   await engineer.getByText(/^pass, utilisation/).waitFor();
   expect(violations).toEqual([]);
-}, 60_000);
+});
 
 it('the same key is refused on a page of another origin', async () => {
   // An origin that another key lists, so that the page may read why.
@@ -113,7 +113,7 @@ it('the same key is refused on a page of another origin', async () => {
   await page.goto(site.put('/', { html: htmlOf(service.url, { key, value: passing }) }));
   await page.getByText('The Origin of the page is not on the list of the key.').first().waitFor();
   expect(await page.locator('headtree-waler:state(pass)').count()).toBe(0);
-}, 60_000);
+});
 
 it('the admin sees the calls, opens one, and finds the refused one', async () => {
   await admin.goto(`${service.url}/usage`);
@@ -132,4 +132,4 @@ it('the admin sees the calls, opens one, and finds the refused one', async () =>
       AND method = 'POST'`,
   );
   expect(refused).toEqual({ origin: site.origin, key_selector: key.split('_')[1] });
-}, 60_000);
+});
