@@ -11,6 +11,12 @@ export interface Action {
   readonly neverFavourable?: true;
 }
 
+/** The factor of an action in a combination; 0 where it does not act. */
+export function factorOf({ factors }: Combination, name: string): number {
+  // A name such as `toString` must not find what every object has.
+  return Object.hasOwn(factors, name) ? (factors[name] ?? 0) : 0;
+}
+
 /** One combination of actions: which take part and by which factor. */
 export interface Combination {
   readonly situation: Situation;

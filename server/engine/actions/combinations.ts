@@ -48,23 +48,34 @@ export function combine(
 }
 
 /**
- * Every value of the caller counts once, by 1. What the service adds itself, being characteristic,
- * has its upper factor in a strength situation.
+ * Every value of the caller counts once, by 1; a variable action may be absent. What the service
+ * adds itself, being characteristic, has its upper factor in a strength situation.
  */
 export function uncombined(
   actions: readonly Action[],
   situation: Situation,
   profile: ProfileReader,
 ): Combination[] {
-  const factors = Object.fromEntries(
-    actions.map(({ name, neverFavourable }) => [
-      name,
-      neverFavourable && situation === 'persistent'
-        ? profile.number('combinations.gamma_G_sup')
-        : 1,
-    ]),
+  const variable = actions.filter(({ nature }) => nature === 'variable');
+  const lasting = Object.fromEntries(
+    actions
+      .filter(({ nature }) => nature !== 'variable')
+      .map(({ name, neverFavourable }) => [
+        name,
+        neverFavourable && situation === 'persistent'
+          ? profile.number('combinations.gamma_G_sup')
+          : 1,
+      ]),
   );
-  return [{ situation, expression: 'none', leading: null, factors }];
+  const one = (): number => 1;
+  return distinct(
+    variableParts(variable, one, one).map((part) => ({
+      situation,
+      expression: 'none',
+      leading: null,
+      factors: { ...lasting, ...part.factors },
+    })),
+  );
 }
 
 interface Expression {

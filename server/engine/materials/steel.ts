@@ -13,6 +13,9 @@ export interface Steel {
   readonly clause: string;
 }
 
+/** N/mm²; EN 1993-1-1 3.1(2) goes up to S460, EN 1993-1-12 beyond. */
+export const HIGHEST_STRENGTH = 460;
+
 /** EN 1993-1-1 3.2.6; E confirmed by the N_cr of CO-01 (MSB04 App. A.5), G by the contract. */
 export const STEEL_E = 210_000;
 export const STEEL_G = 81_000;
@@ -23,9 +26,12 @@ export const STEEL_DENSITY = 7.85e-6;
 /** m/s²; RB-01 (MSB04 App. A.1) takes 0.482 kN/m for the 49.1 kg/m of IPE 330. */
 export const GRAVITY = 9.81;
 
+/** Quality and delivery that EN 10025, EN 10210 and EN 10219 put behind the strength class. */
+const gradeName = /^S ?(\d{3}) ?(?:JR|J0|J2|K2|NL|N|ML|M)?H?W?(?: ?\+(?:AR|N|M))?$/i;
+
 /** S275, `S 275`, S275JR, S355J2+N, S460M: the strength class is the letter and the number. */
 function strengthClass(grade: string): string {
-  const match = /^S\s?(\d{3})/i.exec(grade.trim());
+  const match = gradeName.exec(grade.trim());
   return match ? `S${match[1] ?? ''}` : grade.trim();
 }
 

@@ -14,6 +14,6 @@ export const deflectionCriterion = formula({
   title: 'Deflection relative to the chord of the supports',
   unit: '1',
   clause: 'EN 1990 6.5.1(1) (6.13)',
-  expression: 'w_inst / w_lim',
-  where: { w_inst: 'mm', w_lim: 'mm' },
+  expression: 'w / w_lim',
+  where: { w: 'mm', w_lim: 'mm' },
 });

@@ -3,7 +3,7 @@ import type { SolvedCase } from './solve';
 
 /** A combination as the answer lists it. */
 export function combinationLine(solved: SolvedCase): CombinationLine {
-  const { id, loadSet, combination, pattern, lifted } = solved;
+  const { id, loadSet, combination, arrangement, lifted } = solved;
   const line: CombinationLine = {
     id,
     situation: combination.situation,
@@ -11,7 +11,7 @@ export function combinationLine(solved: SolvedCase): CombinationLine {
     leading: combination.leading,
     factors: combination.factors,
     kMod: null,
-    pattern: pattern?.name ?? null,
+    pattern: arrangement?.name ?? null,
     lostSupport: null,
     lifted: [...lifted],
   };

@@ -29,7 +29,7 @@ export function readLoadSets(
 ): LoadCaseSet[] {
   const patterned = request.patternLoading !== false;
   if (!request.loads) return readSets(request, layout, profile, patterned, added);
-  const actions = readActions(request.loads, layout, '/loads', patterned);
+  const actions = readActions(request.loads, layout, '/loads', patterned, profile);
   if (actions.length === 0) refuse('empty', '/loads', 'No load is given.');
   const design = request.loadBasis === 'design';
   const make = design ? uncombined : combine;
@@ -46,6 +46,7 @@ function readSets(
   added: readonly Action[],
 ): LoadCaseSet[] {
   const sets = request.loadSets ?? [];
+  refuseNeverFactored(request, sets);
   const ids = new Set<string>();
   const verifiesService = sets.some(({ situation }) => situation === 'serviceability');
   return sets.map((set, index) => {
@@ -62,7 +63,7 @@ function readSets(
         'EN 1990 6.3.1',
       );
     }
-    const actions = readActions(set.loads, layout, `${pointer}/loads`, patterned);
+    const actions = readActions(set.loads, layout, `${pointer}/loads`, patterned, profile);
     const accidental = actions.some(({ action }) => action.nature === 'accidental');
     if (factored && accidental !== (set.situation === 'accidental')) {
       refuse(
@@ -91,4 +92,20 @@ function situationsOf(actions: readonly ActionLoads[], design: boolean): Situati
   return accidental
     ? ['persistent', 'accidental', 'serviceability']
     : ['persistent', 'serviceability'];
+}
+
+/** Characteristic values that nothing ever factors are no strength verification. */
+function refuseNeverFactored(
+  { loadBasis }: LoadsInput,
+  sets: readonly { situation: Situation; combination: 'A1' | 'none' }[],
+): void {
+  if (loadBasis === 'design') return;
+  const persistent = sets.filter(({ situation }) => situation === 'persistent');
+  if (persistent.length === 0 || persistent.some(({ combination }) => combination === 'A1')) return;
+  refuse(
+    'never-factored',
+    '/loadSets',
+    'Characteristic values that no set factors ("A1") are no strength verification; values that hold their factors are "loadBasis": "design".',
+    'EN 1990 6.3.1',
+  );
 }

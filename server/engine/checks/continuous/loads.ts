@@ -3,8 +3,10 @@ import { MOST_ACTIONS } from '../../actions/combinations';
 import type { BeamLoad } from '../../analysis/beam.types';
 import { fromUnit } from '../../units/units';
 import { readQuantity } from '../../units/quantity';
+import type { ProfileReader } from '../../profiles/reader';
 import type { LoadInput } from '../contract';
 import { refuse } from '../refuse';
+import { bySense } from './arrangements';
 import { memberEnds, type SupportLayout } from './geometry';
 
 /** Name of the action that self-weight is; a caller's load may not take it. */
@@ -31,17 +33,21 @@ export function readActions(
   layout: SupportLayout,
   pointer: string,
   patterned: boolean,
+  profile: ProfileReader,
 ): ActionLoads[] {
   const byName = new Map<string, { action: Action; bySpan: BeamLoad[]; whole: BeamLoad[] }>();
   loads.forEach((load, index) => {
     const here = `${pointer}/${index}`;
     const action = actionOf(load, here);
+    knownCategory(action, here, profile);
     const known = byName.get(load.name);
     if (known) sameSource(known.action, action, here);
     const entry = known ?? { action, bySpan: [], whole: [] };
     byName.set(load.name, entry);
     const spanBySpan = load.nature === 'variable' && patterned && load.patternLoading !== false;
-    (spanBySpan ? entry.bySpan : entry.whole).push(beamLoad(load, layout, here));
+    const made = beamLoad(load, layout, here);
+    if (spanBySpan) entry.bySpan.push(...bySense(made));
+    else entry.whole.push(made);
   });
   const actions = [...byName.values()];
   countNames(actions, pointer);
@@ -57,6 +63,18 @@ function actionOf({ name, nature, category }: LoadInput, pointer: string): Actio
     );
   }
   return category === undefined ? { name, nature } : { name, nature, category };
+}
+
+/** A category that the profile does not have is a slip, whether or not its psi would be read. */
+function knownCategory({ category }: Action, pointer: string, profile: ProfileReader): void {
+  if (category === undefined || profile.has(`psi.${category}.psi_0`)) return;
+  const known = Object.keys(profile.revision.tree.psi ?? {}).join(', ');
+  refuse(
+    'unknown-category',
+    `${pointer}/category`,
+    `The profile knows no category "${category}"; it knows ${known}.`,
+    'EN 1990 Table A1.1',
+  );
 }
 
 function sameSource(known: Action, action: Action, pointer: string): void {

@@ -66,13 +66,13 @@ function designOf(range: Range | null): DesignReaction | null {
 function actionRanges(solved: readonly SolvedCase[], supports: number): ByAction[][] {
   const found = Array.from({ length: supports }, () => new Map<string, ByAction>());
   const seen = new Set<string>();
-  for (const { source, pattern, state, loadSet } of solved) {
+  for (const { source, arrangement, state, loadSet } of solved) {
     if (!state) continue;
-    const key = `${loadSet ?? ''}|${pattern?.name ?? ''}|${state.acting.join()}`;
+    const key = `${loadSet ?? ''}|${arrangement?.name ?? ''}|${state.acting.join()}`;
     if (seen.has(key)) continue;
     seen.add(key);
     for (const { action } of new Set(source.slots.map((slot) => slot.action))) {
-      const factors = slotFactors(source, pattern, (name) => (name === action.name ? 1 : 0));
+      const factors = slotFactors(source, arrangement, (name) => (name === action.name ? 1 : 0));
       const sums = source.units.supportSums(factors, state.acting);
       if (!sums) continue;
       found.forEach((bySupport, support) => {

@@ -1,12 +1,18 @@
-import type { Combination } from '../../actions/action';
+import { factorOf, type Combination } from '../../actions/action';
 import type { BeamGeometry, BeamLoad } from '../../analysis/beam.types';
 import type { BeamState } from '../../analysis/beam-state';
 import { loadsByPanel } from '../../analysis/clip-load';
 import { solveCompressionOnly } from '../../analysis/compression-only';
 import { ContinuousBeam } from '../../analysis/continuous-beam';
-import { everyPattern, loadPatterns, type LoadPattern } from '../../analysis/load-patterns';
 import { UnitCases } from '../../analysis/unit-cases';
 import { refuse } from '../refuse';
+import {
+  everyArrangement,
+  senseOf,
+  usualArrangements,
+  type Arrangement,
+  type Sense,
+} from './arrangements';
 import type { LoadCaseSet } from './load-sets';
 import type { ActionLoads } from './loads';
 
@@ -18,7 +24,7 @@ export interface SolvedCase {
   readonly loadSet: string | null;
   readonly combination: Combination;
   /** Null where no variable load comes span by span. */
-  readonly pattern: LoadPattern | null;
+  readonly arrangement: Arrangement | null;
   /** Null: the member is a mechanism under this combination. */
   readonly state: BeamState | null;
   /** Supports that lift, counted from 1. */
@@ -33,10 +39,11 @@ export interface CaseSource {
   readonly slots: readonly CaseSlot[];
 }
 
-/** One unit case: an action, whole (panel null) or on one panel. */
+/** One unit case: an action, whole (panel null) or its loads of one sense on one panel. */
 interface CaseSlot {
   readonly action: ActionLoads;
   readonly panel: number | null;
+  readonly sense: Sense;
   readonly loads: readonly BeamLoad[];
 }
 
@@ -53,14 +60,12 @@ export interface SolvedCases {
 /** Solving and verifying more numbers than this would hold the caller up for many seconds. */
 const MOST_WORK = 1_000_000;
 
-/** Up to as many panels every arrangement is solved where the usual ones may not be enough. */
-const MOST_PANELS = 10;
-
 /**
  * Solves every combination of every set, each with the arrangements of its variable loads.
  *
- * On rigid supports that all hold, 2n + 2 arrangements give the full envelope. Where a support
- * lifts or gives under one of them they may fall short, and every arrangement is solved.
+ * On rigid supports that all hold, 2n + 2 arrangements give the full envelope, loads that pull
+ * standing where those that push do not. Where a support lifts or gives under one of them they may
+ * fall short, and every arrangement is solved.
  *
  * @throws {Refusal} `too-many-combinations`
  */
@@ -79,8 +84,8 @@ export function solveCases(
   for (const set of sets) {
     const source = caseSource(beam, set);
     for (const combination of set.combinations) {
-      const solve = (pattern: LoadPattern | null): SolvedCase =>
-        solveCase(set.id, combination, pattern, source, supports);
+      const solve = (arrangement: Arrangement | null): SolvedCase =>
+        solveCase(set.id, combination, arrangement, source, supports);
       const { solved, complete } = solveArrangements(combination, source, solve);
       arrangementsComplete &&= complete;
       cases.push(...solved);
@@ -105,24 +110,27 @@ function refuseTooMuch(work: number, set: LoadCaseSet): void {
 function solveArrangements(
   combination: Combination,
   source: CaseSource,
-  solve: (pattern: LoadPattern | null) => SolvedCase,
+  solve: (arrangement: Arrangement | null) => SolvedCase,
 ): { readonly solved: SolvedCase[]; readonly complete: boolean } {
-  if (!isArranged(combination, source)) return { solved: [solve(null)], complete: true };
+  const senses = arrangedSenses(combination, source);
+  if (senses.size === 0) return { solved: [solve(null)], complete: true };
   const { frame } = source.units.beam;
   const panels = frame.panels.length;
-  const usual = loadPatterns(panels).map(solve);
+  const usual = usualArrangements(panels, senses).map(solve);
   const gives = frame.geometry.supportStiffness.some((stiffness) => stiffness !== null);
   const lifts = usual.some(({ state, lifted }) => state === null || lifted.length > 0);
-  if (!gives && !lifts) return { solved: usual, complete: true };
-  if (panels > MOST_PANELS) return { solved: usual, complete: false };
-  return { solved: everyPattern(panels).map(solve), complete: true };
+  // What a couple does to its neighbours has no panels of one sign: no usual arrangement is sure.
+  if (!gives && !lifts && !senses.has('turning')) return { solved: usual, complete: true };
+  const every = everyArrangement(panels, senses);
+  return every ? { solved: every.map(solve), complete: true } : { solved: usual, complete: false };
 }
 
-/** Whether a variable load of the combination comes span by span. */
-function isArranged({ factors }: Combination, { slots }: CaseSource): boolean {
-  return slots.some(
-    ({ panel, action }) => panel !== null && (factors[action.action.name] ?? 0) !== 0,
+/** Senses of the variable loads of the combination that come span by span. */
+function arrangedSenses(combination: Combination, { slots }: CaseSource): Set<Sense> {
+  const acting = slots.filter(
+    ({ panel, action }) => panel !== null && factorOf(combination, action.action.name) !== 0,
   );
+  return new Set(acting.map(({ sense }) => sense));
 }
 
 function loadsOf({ bySpan, whole }: ActionLoads): readonly BeamLoad[] {
@@ -131,12 +139,15 @@ function loadsOf({ bySpan, whole }: ActionLoads): readonly BeamLoad[] {
 
 function caseSource(beam: ContinuousBeam, set: LoadCaseSet): CaseSource {
   const slots = set.actions.flatMap((action): CaseSlot[] => [
-    { action, panel: null, loads: action.whole },
-    ...loadsByPanel(action.bySpan, beam.frame.panels).map((loads, panel) => ({
-      action,
-      panel,
-      loads,
-    })),
+    { action, panel: null, sense: 'towards', loads: action.whole },
+    ...loadsByPanel(action.bySpan, beam.frame.panels).flatMap((loads, panel) =>
+      (['towards', 'away', 'turning'] as const).map((sense) => ({
+        action,
+        panel,
+        sense,
+        loads: loads.filter((load) => senseOf(load) === sense),
+      })),
+    ),
   ]);
   const used = slots.filter(({ loads }) => loads.length > 0);
   return {
@@ -151,16 +162,16 @@ function caseSource(beam: ContinuousBeam, set: LoadCaseSet): CaseSource {
 function solveCase(
   loadSet: string | null,
   combination: Combination,
-  pattern: LoadPattern | null,
+  arrangement: Arrangement | null,
   source: CaseSource,
   supports: SupportKind,
 ): SolvedCase {
-  const factors = slotFactors(source, pattern, (name) => combination.factors[name] ?? 0);
+  const factors = slotFactors(source, arrangement, (name) => factorOf(combination, name));
   const solution =
     supports === 'compression-only'
       ? solveCompressionOnly(source.units, factors)
       : source.units.combine(factors);
-  const base = { id: '', loadSet, combination, pattern, source };
+  const base = { id: '', loadSet, combination, arrangement, source };
   return solution.kind === 'mechanism'
     ? { ...base, state: null, lifted: [] }
     : { ...base, state: solution.state, lifted: solution.lifted.map((index) => index + 1) };
@@ -169,12 +180,12 @@ function solveCase(
 /** The factor of each unit case: that of its action where the arrangement puts it there. */
 export function slotFactors(
   { slots }: CaseSource,
-  pattern: LoadPattern | null,
-  factorOf: (action: string) => number,
+  arrangement: Arrangement | null,
+  factor: (action: string) => number,
 ): number[] {
-  return slots.map(({ action, panel }) =>
-    panel === null || pattern === null || pattern.loaded[panel] === true
-      ? factorOf(action.action.name)
+  return slots.map(({ action, panel, sense }) =>
+    panel === null || arrangement === null || arrangement.loaded[sense][panel] === true
+      ? factor(action.action.name)
       : 0,
   );
 }

@@ -1,5 +1,11 @@
 import type { Sheet } from '../../formula/sheet';
-import { GRAVITY, STEEL_DENSITY, STEEL_E, yieldStrength } from '../../materials/steel';
+import {
+  GRAVITY,
+  HIGHEST_STRENGTH,
+  STEEL_DENSITY,
+  STEEL_E,
+  yieldStrength,
+} from '../../materials/steel';
 import type { ProfileReader } from '../../profiles/reader';
 import { findSection, similarSections, type CatalogueEntry } from '../../sections/catalogue';
 import { propertiesOf, type SectionProperties } from '../../sections/properties';
@@ -24,6 +30,8 @@ export interface SteelISection {
   readonly count: number;
   readonly share: number;
   readonly connected: boolean;
+  /** Names of the properties that the caller set. */
+  readonly overridden: readonly string[];
   /** Weight of one member in N/mm. */
   readonly weight: number;
 }
@@ -73,6 +81,7 @@ export function readSteelISection(
       'EN 1993-1-5 4.4',
     );
   }
+  refuseContradictions(properties, input.properties ?? {});
   const count = input.count ?? 1;
   return {
     entry,
@@ -86,6 +95,7 @@ export function readSteelISection(
     count,
     share: shareOf(input, count),
     connected: input.connected ?? false,
+    overridden: Object.keys(input.properties ?? {}),
     weight: (entry.mass ?? computed.A * STEEL_DENSITY * 1e3) * GRAVITY * 1e-3,
   };
 }
@@ -145,11 +155,26 @@ function strengthOf(
   const E = material.E === undefined ? STEEL_E : readQuantity(material.E, 'N/mm^2');
   if ('fy' in material) {
     const f_y = readQuantity(material.fy, 'N/mm^2');
+    if (f_y > HIGHEST_STRENGTH) {
+      notCovered('/material/fy', `Steel above ${HIGHEST_STRENGTH} N/mm²`, 'EN 1993-1-12');
+    }
     return { f_y: sheet.given('f_y', f_y, 'N/mm^2', 'Yield strength', 'Given by the caller'), E };
   }
   const thickness = Math.max(entry.t_f, entry.t_w);
   const { f_y, clause } = yieldStrength(material.grade, thickness, profile);
   return { f_y: sheet.given('f_y', f_y, 'N/mm^2', `Yield strength at ${thickness} mm`, clause), E };
+}
+
+/** Properties of the caller's that no section can have. */
+function refuseContradictions(properties: SectionProperties, given: Overrides): void {
+  const contradiction = (field: string, message: string): never =>
+    refuse('contradiction', `/section/properties/${field}`, message);
+  const { A, W_el_y, W_el_z, W_pl_y, W_pl_z } = properties;
+  if (given.Wply !== undefined && W_pl_y < W_el_y) contradiction('Wply', 'Wply is below Wely.');
+  if (given.Wplz !== undefined && W_pl_z < W_el_z) contradiction('Wplz', 'Wplz is below Welz.');
+  const { z = 0, y = 0 } = shearAreasOf(given);
+  if (z > A) contradiction('Avz', 'A shear area is no greater than the area.');
+  if (y > A) contradiction('Avy', 'A shear area is no greater than the area.');
 }
 
 function shareOf(input: ByDesignation, count: number): number {

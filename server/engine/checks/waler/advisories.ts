@@ -7,7 +7,6 @@ export function advisoriesOf(
   request: WalerRequest,
   section: SteelISection,
   cases: readonly SolvedCase[],
-  arrangementsComplete: boolean,
 ): AdvisoryAnswer[] {
   const list: AdvisoryAnswer[] = [];
   if (section.gamma_M0 < 1.1) {
@@ -31,10 +30,14 @@ export function advisoriesOf(
     list.push({
       code: 'support-lifts',
       severity: 'info',
-      message: `The waler leaves ${supports.length === 1 ? 'prop' : 'props'} ${supports.join(', ')} in ${lifted.length} of ${cases.length} combinations; those are solved without.`,
+      message: `The waler leaves ${supports.length === 1 ? 'prop' : 'props'} ${supports.join(', ')} in ${lifted.length} of ${cases.length} combinations; those are solved without. Its own weight is taken to hang on every prop.`,
     });
   }
-  if (request.patternLoading === false) {
+  const loads = request.loads ?? (request.loadSets ?? []).flatMap((set) => set.loads);
+  const whole = loads.some(
+    ({ nature, patternLoading }) => nature === 'variable' && patternLoading === false,
+  );
+  if (request.patternLoading === false || whole) {
     list.push({
       code: 'no-pattern-loading',
       severity: 'caution',
@@ -43,14 +46,52 @@ export function advisoriesOf(
       clause: 'EN 1990 6.4.3.1(4)',
     });
   }
-  if (!arrangementsComplete) {
+  if (section.overridden.length > 0) {
     list.push({
-      code: 'arrangements-not-all',
+      code: 'properties-given',
       severity: 'caution',
-      message:
-        'Props lift or give under variable loads over more spans than every arrangement is solved for: all, none, every second span and the neighbours of each prop were. Other arrangements may do more.',
-      clause: 'EN 1990 6.4.3.1(4)',
+      message: `Properties are the caller's own: ${section.overridden.join(', ')}.`,
     });
   }
+  list.push(...setsByOne(request, cases), ...settlement(cases));
   return list;
+}
+
+/** Characteristic values that no factor meets: right for values factored beforehand, wrong else. */
+function setsByOne(request: WalerRequest, cases: readonly SolvedCase[]): AdvisoryAnswer[] {
+  if (request.loadBasis === 'design') return [];
+  const byOne = cases.filter(
+    ({ combination }) =>
+      combination.situation === 'persistent' && combination.expression === 'none',
+  );
+  const sets = [...new Set(byOne.map(({ loadSet }) => loadSet ?? ''))];
+  if (sets.length === 0) return [];
+  return [
+    {
+      code: 'set-not-factored',
+      severity: 'caution',
+      message: `The values of ${sets.join(', ')} are not factored, as asked ("none"): they must hold their partial factors already.`,
+      clause: 'EN 1990 6.3.1',
+    },
+  ];
+}
+
+/** Deflection is relative to the chord of the props; how far elastic props give is said apart. */
+function settlement(cases: readonly SolvedCase[]): AdvisoryAnswer[] {
+  let most = 0;
+  for (const { state, combination } of cases) {
+    if (!state || combination.situation !== 'serviceability') continue;
+    if (state.frame.geometry.supportStiffness.every((stiffness) => stiffness === null)) return [];
+    for (const support of state.acting) {
+      most = Math.max(most, Math.abs(state.supportDeflections[support] ?? 0));
+    }
+  }
+  if (most === 0) return [];
+  return [
+    {
+      code: 'props-give',
+      severity: 'caution',
+      message: `Elastic props give by up to ${most.toPrecision(3)} mm in serviceability; the deflection is relative to the line through them.`,
+    },
+  ];
 }

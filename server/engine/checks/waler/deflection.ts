@@ -7,10 +7,26 @@ import type { WalerRequest } from '../contract';
 import type { SolvedCase } from '../continuous/solve';
 import type { Finding } from '../verification';
 
-/** The n of `span/n` for the deflection at once; undefined where no limit is set. */
-export function instantRatio(limit: WalerRequest['deflectionLimit']): number | undefined {
-  const text = typeof limit === 'string' ? limit : limit?.instant;
-  return text === undefined ? undefined : Number(text.slice('span/'.length));
+/** A limit of the deflection with the id and symbol of its verification. */
+export interface Limit {
+  readonly id: 'deflection' | 'deflection-final' | 'deflection-net-final';
+  readonly symbol: string;
+  /** The n of `span/n`. */
+  readonly ratio: number;
+}
+
+/** The limits of a request. Steel does not creep: final and net final deflections are those at once. */
+export function limitsOf(limit: WalerRequest['deflectionLimit']): Limit[] {
+  if (limit === undefined) return [];
+  const given = typeof limit === 'string' ? { instant: limit } : limit;
+  const named = [
+    ['deflection', 'w_inst', given.instant],
+    ['deflection-final', 'w_fin', given.final],
+    ['deflection-net-final', 'w_net_fin', given.netFinal],
+  ] as const;
+  return named.flatMap(([id, symbol, text]) =>
+    text === undefined ? [] : [{ id, symbol, ratio: Number(text.slice('span/'.length)) }],
+  );
 }
 
 interface Worst {
@@ -22,12 +38,12 @@ interface Worst {
   readonly L: number;
 }
 
-/** The worst deflection of all serviceability combinations; null where there is none of those. */
-export function verifyDeflection(
+/** Each limit against the worst deflection of all serviceability combinations, if there are any. */
+export function verifyDeflections(
   cases: readonly SolvedCase[],
-  ratio: number,
+  limits: readonly Limit[],
   withSteps: boolean,
-): Finding | null {
+): Finding[] {
   let worst: Worst | null = null;
   for (const solved of cases) {
     if (!solved.state || solved.combination.situation !== 'serviceability') continue;
@@ -39,29 +55,24 @@ export function verifyDeflection(
         worst = { solved, bay, span, x, w_inst, L };
     }
   }
-  return worst && findingOf(worst, ratio, withSteps);
+  const found = worst;
+  return found ? limits.map((limit) => findingOf(found, limit, withSteps)) : [];
 }
 
 function findingOf(
   { solved, span, x, w_inst, L }: Worst,
-  ratio: number,
+  { id, symbol, ratio }: Limit,
   withSteps: boolean,
 ): Finding {
-  const sheet = new WorkingSheet('deflection', withSteps);
-  sheet.given(
-    'w_inst',
-    w_inst,
-    'mm',
-    'Deflection relative to the chord of the supports',
-    'Analysis',
-  );
+  const sheet = new WorkingSheet(id, withSteps);
+  sheet.given(symbol, w_inst, 'mm', 'Deflection relative to the chord of the supports', 'Analysis');
   const w_lim = sheet.evaluate(deflectionLimitOfSpan, { L, ratio });
-  sheet.evaluate(deflectionCriterion, { w_inst, w_lim });
+  sheet.evaluate(deflectionCriterion, { w: w_inst, w_lim });
   return {
-    id: 'deflection',
+    id,
     title: deflectionCriterion.title,
     clause: deflectionCriterion.clause,
-    effect: { symbol: 'w_inst', value: w_inst, unit: 'mm' },
+    effect: { symbol, value: w_inst, unit: 'mm' },
     resistance: { symbol: 'w_lim', value: w_lim, unit: 'mm' },
     combination: solved.id,
     place: { span, x },

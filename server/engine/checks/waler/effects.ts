@@ -1,6 +1,7 @@
 import type { BeamState } from '../../analysis/beam-state';
 import { sectionPoints } from '../../analysis/section-points';
 import { valuesAt } from '../../analysis/values-at';
+import { factorOf } from '../../actions/action';
 import { SELF_WEIGHT } from '../continuous/loads';
 import type { SolvedCase } from '../continuous/solve';
 import type { OwnWeight } from './own-weight';
@@ -20,45 +21,72 @@ export interface Effects {
 /** Places inside a piece that are looked at beside its ends: shear and moment may govern together. */
 const INSIDE = 8;
 
-/**
- * Every place of every strength combination where a cross-section may govern: supports, jumps,
- * extremes, the extremes of the own weight, and places in between.
- */
-export function* strengthEffects(
-  cases: readonly SolvedCase[],
-  share: number,
-  weight: OwnWeight,
-): Generator<Effects> {
-  for (const solved of cases) {
-    const { state, combination } = solved;
-    if (!state || combination.situation === 'serviceability') continue;
-    const factor = combination.factors[SELF_WEIGHT] ?? 0;
-    for (const { span, x, M, V } of placesOf(state, weight)) {
-      const { M_z, V_y } = weight.at(x);
-      yield {
-        solved,
-        span,
-        x,
-        M_y: Math.abs(M) * share,
-        V_z: Math.abs(V) * share,
-        M_z: M_z * factor,
-        V_y: V_y * factor,
-      };
+/** The effects of one strength combination along the member. */
+export class CaseEffects {
+  private readonly factor: number;
+
+  constructor(
+    readonly solved: SolvedCase,
+    private readonly state: BeamState,
+    private readonly share: number,
+    private readonly weight: OwnWeight,
+  ) {
+    this.factor = factorOf(solved.combination, SELF_WEIGHT);
+  }
+
+  /**
+   * Every place where a cross-section may govern: supports, jumps, extremes, the extremes of the
+   * own weight, and places in between.
+   */
+  *all(): Generator<Effects> {
+    for (const { span, x, M, V } of sectionPoints(this.state)) yield this.effects(span, x, M, V);
+    const { frame } = this.state;
+    for (const x of this.weight.places) yield this.at(x);
+    for (const [piece, length] of frame.lengths.entries()) {
+      const from = frame.breaks[piece] ?? 0;
+      for (let i = 1; i < INSIDE; i += 1) yield this.at(from + (length * i) / INSIDE);
     }
+  }
+
+  /** Where something jumps, the right side; both sides of a jump are among all places. */
+  at(x: number): Effects {
+    const { M, V } = valuesAt(this.state, x);
+    return this.effects(this.state.frame.pieceSpans[this.state.frame.pieceAt(x)] ?? 0, x, M, V);
+  }
+
+  /** The stretch around a place, inside its piece, that its nearest neighbours leave unseen. */
+  around(x: number): { readonly from: number; readonly to: number } {
+    const { frame } = this.state;
+    const piece = frame.pieceAt(x);
+    const from = frame.breaks[piece] ?? x;
+    const length = frame.lengths[piece] ?? 0;
+    const step = length / INSIDE;
+    return { from: Math.max(from, x - step), to: Math.min(from + length, x + step) };
+  }
+
+  private effects(span: number, x: number, M: number, V: number): Effects {
+    const { M_z, V_y } = this.weight.at(x);
+    return {
+      solved: this.solved,
+      span,
+      x,
+      M_y: Math.abs(M) * this.share,
+      V_z: Math.abs(V) * this.share,
+      M_z: M_z * this.factor,
+      V_y: V_y * this.factor,
+    };
   }
 }
 
-function* placesOf(state: BeamState, weight: OwnWeight) {
-  yield* sectionPoints(state);
-  const { frame } = state;
-  const inside: number[] = [...weight.places];
-  frame.lengths.forEach((length, piece) => {
-    const from = frame.breaks[piece] ?? 0;
-    for (let i = 1; i < INSIDE; i += 1) inside.push(from + (length * i) / INSIDE);
-  });
-  // Where something jumps both sides were seen above.
-  for (const x of inside) {
-    const { M, V } = valuesAt(state, x);
-    yield { span: frame.pieceSpans[frame.pieceAt(x)] ?? 0, x, M, V };
-  }
+/** One for each strength combination that the member stands under. */
+export function strengthEffects(
+  cases: readonly SolvedCase[],
+  share: number,
+  weight: OwnWeight,
+): CaseEffects[] {
+  return cases.flatMap((solved) =>
+    solved.state && solved.combination.situation !== 'serviceability'
+      ? [new CaseEffects(solved, solved.state, share, weight)]
+      : [],
+  );
 }

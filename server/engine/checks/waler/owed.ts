@@ -6,7 +6,8 @@ import type {
   WalerRequest,
 } from '../contract';
 import { refuse } from '../refuse';
-import { instantRatio } from './deflection';
+import type { SolvedCases } from '../continuous/solve';
+import { limitsOf } from './deflection';
 
 /** What a waler owes and the caller may take upon themselves (contract, section 5). */
 const waivable: ReadonlySet<VerificationId> = new Set<VerificationId>([
@@ -37,6 +38,7 @@ export function readWaivers(waive: readonly WaiverInput[] = []): CheckAnswer['wa
 export function missingOf(
   request: WalerRequest,
   waived: CheckAnswer['waived'],
+  { cases, arrangementsComplete }: SolvedCases,
   deflectionMade: boolean,
 ): MissingItem[] {
   const missing: MissingItem[] = [];
@@ -58,13 +60,32 @@ export function missingOf(
     reason: 'This version of the check does not verify the web at the props.',
     clause: 'EN 1993-1-5 6',
   });
-  if (!deflectionMade) owe(deflectionItem(request));
+  // Under a mechanism nothing deflects; the answer is a failure already.
+  const stands = cases.every(({ state }) => state !== null);
+  if (!deflectionMade && stands) owe(deflectionItem(request));
+  if (!cases.some(({ combination }) => combination.situation === 'persistent')) {
+    missing.push({
+      pointer: '/loadSets',
+      verification: 'bending-y',
+      reason: 'No loads of the persistent situation are given: strength was not verified for it.',
+      clause: 'EN 1990 3.2',
+    });
+  }
+  if (!arrangementsComplete) {
+    missing.push({
+      pointer: '/patternLoading',
+      verification: 'bending-y',
+      reason:
+        'Supports lift or give, or loads turn the member, over more spans than every arrangement of the variable loads is solved for; others than those solved may do more.',
+      clause: 'EN 1990 6.4.3.1(4)',
+    });
+  }
   return missing;
 }
 
 function deflectionItem(request: WalerRequest): MissingItem {
   const base = { verification: 'deflection', clause: 'EN 1990 6.5' } as const;
-  return instantRatio(request.deflectionLimit) === undefined
+  return limitsOf(request.deflectionLimit).length === 0
     ? {
         ...base,
         pointer: '/deflectionLimit',
@@ -73,6 +94,6 @@ function deflectionItem(request: WalerRequest): MissingItem {
     : {
         ...base,
         pointer: '/loadSets',
-        reason: 'Design values say nothing of serviceability; give a load set for it.',
+        reason: 'No loads of serviceability are given; give a load set for it.',
       };
 }

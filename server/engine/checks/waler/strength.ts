@@ -15,7 +15,7 @@ import {
 } from '../steel-i/resistances';
 import type { SteelISection } from '../steel-i/section';
 import type { Finding } from '../verification';
-import type { Effects } from './effects';
+import type { CaseEffects, Effects } from './effects';
 
 interface Side {
   readonly symbol: string;
@@ -32,28 +32,71 @@ interface Criterion {
   write(effects: Effects, sheet: Sheet): { effect: Side; resistance: Side };
   readonly title: string;
   readonly clause: string;
+  /** Its effects have extremes at unlike places, so that their sum may peak between them. */
+  readonly mayPeakBetween?: true;
+}
+
+interface Governing {
+  readonly utilisation: number;
+  readonly effects: Effects;
 }
 
 /** Searches all places for the worst of each criterion, then writes those down. */
 export function verifyStrength(
   section: SteelISection,
-  places: Iterable<Effects>,
+  cases: readonly CaseEffects[],
   withSteps: boolean,
 ): Finding[] {
-  const criteria = criteriaOf(section);
-  const worst = new Map<Criterion, { utilisation: number; effects: Effects }>();
-  for (const effects of places) {
-    for (const criterion of criteria) {
-      const utilisation = criterion.utilisation(effects);
-      if (utilisation === undefined) continue;
-      const known = worst.get(criterion);
-      if (!known || utilisation > known.utilisation) worst.set(criterion, { utilisation, effects });
-    }
-  }
-  return criteria.flatMap((criterion) => {
-    const found = worst.get(criterion);
-    return found ? [findingOf(criterion, found.effects, withSteps)] : [];
+  return criteriaOf(section).flatMap((criterion) => {
+    let worst: Governing | undefined;
+    for (const one of cases) worst = worstOf(criterion, one, worst);
+    return worst ? [findingOf(criterion, worst.effects, withSteps)] : [];
   });
+}
+
+/** A place this near to the worst seen may hide a worse one between it and its neighbours. */
+const NEAR = 0.97;
+
+function worstOf(
+  criterion: Criterion,
+  one: CaseEffects,
+  known: Governing | undefined,
+): Governing | undefined {
+  let worst = known;
+  const seen: Governing[] = [];
+  const look = (effects: Effects): void => {
+    const utilisation = criterion.utilisation(effects);
+    if (utilisation === undefined) return;
+    if (Number.isNaN(utilisation)) throw new Error(`${criterion.id} has no number at ${effects.x}`);
+    if (criterion.mayPeakBetween) seen.push({ utilisation, effects });
+    if (!worst || utilisation > worst.utilisation) worst = { utilisation, effects };
+  };
+  for (const effects of one.all()) look(effects);
+  const bar = NEAR * (worst?.utilisation ?? 0);
+  // A copy: what refining looks at is not refined again.
+  for (const { effects } of seen.filter(({ utilisation }) => utilisation >= bar)) {
+    refine(one, effects.x, (x) => criterion.utilisation(one.at(x)) ?? 0, look);
+  }
+  return worst;
+}
+
+const GOLDEN = (Math.sqrt(5) - 1) / 2;
+
+/** Golden section search for the greatest value around x; to 1e-7 of the stretch. */
+function refine(
+  one: CaseEffects,
+  x: number,
+  value: (x: number) => number,
+  look: (effects: Effects) => void,
+): void {
+  let { from, to } = one.around(x);
+  for (let round = 0; round < 34; round += 1) {
+    const left = to - GOLDEN * (to - from);
+    const right = from + GOLDEN * (to - from);
+    if (value(left) >= value(right)) to = right;
+    else from = left;
+  }
+  look(one.at((from + to) / 2));
 }
 
 function findingOf(criterion: Criterion, effects: Effects, withSteps: boolean): Finding {
@@ -115,6 +158,7 @@ function criteriaOf(section: SteelISection): Criterion[] {
     },
     {
       id: 'bending-shear-y',
+      mayPeakBetween: true,
       title: bendingShearCriterion.title,
       clause: bendingShearCriterion.clause,
       utilisation: ({ M_y, V_z }) =>
@@ -179,6 +223,7 @@ function biaxial(
   const criterion = section.sectionClass <= 2 ? plasticBiaxialCriterion : elasticBiaxialCriterion;
   return {
     id: 'biaxial',
+    mayPeakBetween: true,
     title: criterion.title,
     clause: criterion.clause,
     utilisation: ({ M_y, V_z, M_z }) => {

@@ -1,6 +1,8 @@
 import { create, all, type Unit } from 'mathjs';
 import { Refusal } from '../../refusal';
+import { publishedRevision } from '../../testing/profiles';
 import { northFace, runWaler, uniform, verification } from '../../testing/waler';
+import { waler } from './waler';
 import type { LoadInput, WalerRequest } from '../contract';
 
 if (!all) throw new Error('mathjs has no functions');
@@ -87,10 +89,26 @@ describe('what a waler owes', () => {
   test('without a limit the deflection is owed', () => {
     const { deflectionLimit, ...rest } = northFace;
     expect(deflectionLimit).toBeDefined();
-    const answer = runWaler({ ...rest, deflectionLimit: { final: 'span/200' } });
+    const profile = publishedRevision('en-recommended');
+    const answer = waler.run(rest, { profile, detail: 'summary' });
     expect(answer.missing).toEqual([
       expect.objectContaining({ pointer: '/deflectionLimit', verification: 'deflection' }),
     ]);
+  });
+
+  test('steel does not creep: a limit on the final deflection is held against the same', () => {
+    const answer = runWaler({ deflectionLimit: { instant: 'span/200', final: 'span/99999' } });
+    expect(verification(answer, 'deflection').status).toBe('pass');
+    expect(verification(answer, 'deflection-final').status).toBe('fail');
+  });
+
+  test('strength is owed: loads of serviceability alone are never a pass', () => {
+    const loads = uniform(1);
+    const sets = (situation: 'serviceability' | 'accidental') => [
+      { id: 's', situation, combination: 'none' as const, loads },
+    ];
+    expect(runWaler({ loadSets: sets('serviceability') }).status).toBe('incomplete');
+    expect(runWaler({ loadSets: sets('accidental') }).status).toBe('incomplete');
   });
 
   test('design values say nothing of deflection', () => {
@@ -271,7 +289,7 @@ describe('what lies outside this version is refused with its clause', () => {
     ['a shape by dimensions', { section: { shape: 'round', d: 80 } }, 'EN 1993-1-1 6.2'],
     [
       'a class 4 section',
-      { section: 'HE 300 AA', material: { type: 'steel', fy: 690 } },
+      { section: 'HE 300 AA', material: { type: 'steel', fy: 460 } },
       'EN 1993-1-5 4.4',
     ],
   ])('%s', (_what, change, clause) => {
@@ -281,6 +299,145 @@ describe('what lies outside this version is refused with its clause', () => {
   test('an unknown section is refused with what is near it', () => {
     expect(refusalOf({ section: 'UB 457x191x68' }).detail).toContain('UB 457x191x67');
   });
+});
+
+describe('variable loads of unlike signs', () => {
+  const variable = (name: string, value: number, from = 0, to = 18): LoadInput => ({
+    name,
+    nature: 'variable',
+    category: 'construction',
+    kind: 'uniform',
+    value,
+    from,
+    to,
+  });
+  const base: Partial<WalerRequest> = {
+    spans: [6, 6, 6],
+    selfWeight: false,
+    supports: 'both-ways',
+    deflectionLimit: 'span/100',
+  };
+
+  test.each(['both-ways', 'compression-only'] as const)(
+    'stand where they do most together (%s)',
+    (supports) => {
+      const earth = uniform(supports === 'both-ways' ? 0.001 : 55);
+      const [push, pull] = supports === 'both-ways' ? [60, -60] : [20, -14];
+      const found = runWaler({
+        ...base,
+        supports,
+        loads: [...earth, variable('a', push), variable('b', pull)],
+      });
+      for (const cut of [6, 12]) {
+        const placed = runWaler({
+          ...base,
+          supports,
+          patternLoading: false,
+          loads: [...earth, variable('a', push, 0, cut), variable('b', pull, cut, 18)],
+        });
+        expect(found.utilisation).toBeGreaterThanOrEqual((placed.utilisation ?? NaN) * (1 - 1e-9));
+      }
+    },
+  );
+
+  test('one source that pushes on some spans and pulls on others is arranged by its parts', () => {
+    const both = [variable('a', 50, 0, 12), variable('a', -50, 12, 18)];
+    const found = runWaler({ ...base, loads: both });
+    const part = runWaler({
+      ...base,
+      patternLoading: false,
+      loads: [variable('a', 50, 6, 12), variable('a', -50, 12, 18)],
+    });
+    expect(found.utilisation).toBeGreaterThanOrEqual((part.utilisation ?? NaN) * (1 - 1e-9));
+  });
+
+  test('with design values a favourable one may be absent', () => {
+    const alone = runWaler({ ...base, loadBasis: 'design', loads: [variable('a', 40)] });
+    const both = runWaler({
+      ...base,
+      loadBasis: 'design',
+      loads: [variable('a', 40), variable('b', -20)],
+    });
+    expect(both.utilisation).toBeGreaterThanOrEqual((alone.utilisation ?? NaN) * (1 - 1e-9));
+  });
+});
+
+test('over too many elastic props for every arrangement the answer is incomplete', () => {
+  const answer = runWaler({
+    spans: Array.from({ length: 12 }, () => 3),
+    supportStiffness: Array.from({ length: 13 }, () => 1),
+    supports: 'both-ways',
+    selfWeight: false,
+    loads: [
+      ...uniform(5),
+      { name: 'q', nature: 'variable', category: 'construction', kind: 'uniform', value: 5 },
+    ],
+  });
+  expect(answer.status).toBe('incomplete');
+  expect(answer.missing.map(({ pointer }) => pointer)).toContain('/patternLoading');
+  expect(answer.advisories.map(({ code }) => code)).toContain('props-give');
+});
+
+test.each(['toString', 'valueOf', 'hasOwnProperty'])('a source may be called %s', (name) => {
+  const named = runWaler({ loads: [{ name, nature: 'permanent', kind: 'uniform', value: 95 }] });
+  expect(named.utilisation).toBe(runWaler({ loads: uniform(95) }).utilisation);
+});
+
+test('bending about both axes is found where it peaks between the moments’ own extremes', () => {
+  const answer = runWaler({
+    loadBasis: 'design',
+    spans: [20],
+    loads: [
+      { name: 'wedge', nature: 'permanent', kind: 'linear', start: 0, end: 9.130744304604377 },
+    ],
+  });
+  expect(verification(answer, 'biaxial').utilisation).toBeCloseTo(1.00783, 4);
+});
+
+describe('characteristic values', () => {
+  test('that no set ever factors are refused', () => {
+    const loadSets = [
+      { id: 's', situation: 'persistent', combination: 'none', loads: uniform(190) },
+    ] as const;
+    expect(refusalOf({ loadSets }).code).toBe('never-factored');
+  });
+
+  test('of a category that the profile does not know are refused at their place', () => {
+    const loads = [
+      { name: 'q', nature: 'variable', category: 'bogus', kind: 'uniform', value: 1 },
+    ] as const;
+    expect(refusalOf({ loads }).items[0]).toMatchObject({
+      code: 'unknown-category',
+      pointer: '/loads/0/category',
+    });
+  });
+});
+
+describe('steel by name', () => {
+  test.each(['S275', 's 275', 'S275JR', 'S275J2+N', 'S275NL', 'S275J0H', 'S275J2W+N'])(
+    '%s',
+    (grade) => {
+      expect(runWaler({ material: { type: 'steel', grade } }).values.f_y?.value).toBe(275);
+    },
+  );
+
+  test.each(['S2755', 'S275garbage', 'S275 or so', '275', 'S100'])('%s is refused', (grade) => {
+    expect(refusalOf({ material: { type: 'steel', grade } }).code).toBe('unknown-grade');
+  });
+
+  test('above 460 N/mm² is outside of EN 1993-1-1', () => {
+    expect(refusalOf({ material: { type: 'steel', fy: 500 } }).items[0]?.clause).toBe(
+      'EN 1993-1-12',
+    );
+  });
+});
+
+test.each([
+  [{ Wply: 1e5 }, '/section/properties/Wply'],
+  [{ Avz: 1e7 }, '/section/properties/Avz'],
+])('properties that contradict each other are refused: %j', (properties, pointer) => {
+  const section = { designation: 'UB 457x191x67', properties };
+  expect(refusalOf({ section }).items[0]).toMatchObject({ code: 'contradiction', pointer });
 });
 
 describe('loads that do not fit the member', () => {

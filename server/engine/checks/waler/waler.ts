@@ -9,13 +9,13 @@ import { readLayout } from '../continuous/geometry';
 import { SELF_WEIGHT } from '../continuous/loads';
 import { readLoadSets } from '../continuous/load-sets';
 import { reactionsOf } from '../continuous/reactions';
-import { solveCases, type SolvedCase } from '../continuous/solve';
+import { solveCases } from '../continuous/solve';
 import { notCovered } from '../refuse';
 import { refuseSlenderWeb } from '../steel-i/resistances';
 import { readSteelISection } from '../steel-i/section';
 import { verificationAnswer, type Finding } from '../verification';
 import { advisoriesOf } from './advisories';
-import { instantRatio, verifyDeflection } from './deflection';
+import { limitsOf, verifyDeflections } from './deflection';
 import { strengthEffects } from './effects';
 import { mechanismOf } from './mechanism';
 import { missingOf, readWaivers } from './owed';
@@ -47,22 +47,23 @@ function run(request: WalerRequest, { profile: revision, detail }: CheckContext)
     ...layout,
     flexuralRigidity: (section.E * section.properties.I_y) / section.share,
   };
-  const { cases, arrangementsComplete } = solveCases(
-    geometry,
-    sets,
-    request.supports ?? 'compression-only',
+  const solved = solveCases(geometry, sets, request.supports ?? 'compression-only');
+  const { cases } = solved;
+  const mechanism = mechanismOf(cases, withSteps);
+  const weight = ownWeight(request, layout, section);
+  const strength = verifyStrength(
+    section,
+    strengthEffects(cases, section.share, weight),
+    withSteps,
   );
-  const deflection = waived.some(({ verification }) => verification === 'deflection')
-    ? null
-    : deflectionOf(request, cases, withSteps);
+  const deflections = waived.some(({ verification }) => verification === 'deflection')
+    ? []
+    : verifyDeflections(cases, limitsOf(request.deflectionLimit), withSteps);
   const findings: Finding[] = [
-    ...mechanismOf(cases, withSteps),
-    ...verifyStrength(
-      section,
-      strengthEffects(cases, section.share, ownWeight(request, layout, section)),
-      withSteps,
-    ),
-    ...(deflection ? [deflection] : []),
+    ...mechanism,
+    // A member that cannot stand has no bending resistance to set against.
+    ...strength.filter(({ id }) => !mechanism.some((one) => one.id === id)),
+    ...deflections,
   ];
   const frame = cases[0]?.source.units.beam.frame;
   const supports = frame?.supports ?? [];
@@ -73,10 +74,10 @@ function run(request: WalerRequest, { profile: revision, detail }: CheckContext)
     common,
     verifications: findings.map((one) => verificationAnswer(one, supports)),
     steps: findings.flatMap(({ sheet }) => sheet.steps),
-    missing: missingOf(request, waived, deflection !== null),
+    missing: missingOf(request, waived, solved, deflections.length > 0),
     waived,
     notCovered: NOT_COVERED,
-    advisories: advisoriesOf(request, section, cases, arrangementsComplete),
+    advisories: advisoriesOf(request, section, cases),
     standards: ['EN 1990:2002+A1:2005', 'EN 1993-1-1:2005+A1:2014'],
     reactions: frame ? reactionsOf(frame, cases) : [],
     combinations: () => cases.map(combinationLine),
@@ -92,15 +93,6 @@ function refuseWhatIsNotMade(request: WalerRequest): void {
   if (request.lossOfProp !== undefined && request.lossOfProp !== false) {
     notCovered('/lossOfProp', 'Loss of a prop', 'EN 1990 6.4.3.3');
   }
-}
-
-function deflectionOf(
-  request: WalerRequest,
-  cases: readonly SolvedCase[],
-  withSteps: boolean,
-): Finding | null {
-  const ratio = instantRatio(request.deflectionLimit);
-  return ratio === undefined ? null : verifyDeflection(cases, ratio, withSteps);
 }
 
 /** Arrangements × spans, squared by the number of sources: what a request may come to. */
