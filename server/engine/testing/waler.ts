@@ -1,3 +1,4 @@
+import { Refusal } from '../refusal';
 import type { CheckAnswer, LoadInput, WalerRequest } from '../checks/contract';
 import { waler } from '../checks/waler/waler';
 import { publishedRevision } from './profiles';
@@ -38,4 +39,15 @@ export function verification(answer: CheckAnswer, id: string) {
 /** One permanent uniform load in kN/m. */
 export function uniform(value: number): LoadInput[] {
   return [{ name: 'earth', nature: 'permanent', kind: 'uniform', value }];
+}
+
+/** The refusal of a waler's request that the engine will not answer. */
+export function refusalOf(change: Partial<WalerRequest>, profile?: string): Refusal {
+  try {
+    runWaler(change, profile);
+  } catch (error) {
+    if (error instanceof Refusal) return error;
+    throw error;
+  }
+  throw new Error('the check was made');
 }

