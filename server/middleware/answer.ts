@@ -110,7 +110,6 @@ export function answers({ usage, logger, onKeyUse }: AnswerDeps): {
       }
     },
     // Express knows an error handler by its four parameters.
-    // eslint-disable-next-line @typescript-eslint/no-unused-vars -- see above
     fail: (error: unknown, request, response, _next) => {
       void sendProblem(request, response, toProblem(error));
     },
