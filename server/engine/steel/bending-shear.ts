@@ -2,13 +2,16 @@ import { formula } from '../formula/formula';
 
 const SHEAR_REDUCTION = 'EN 1993-1-1 6.2.8(3)';
 
-/** Valid for V_Ed above half of V_pl_Rd; below that no reduction is due (6.2.8(2)). */
+/**
+ * Valid for V_Ed above half of V_pl_Rd; below that no reduction is due (6.2.8(2)). Beyond V_pl_Rd,
+ * where shear fails by itself, nothing is left of the shear area.
+ */
 export const shearReduction = formula({
   symbol: 'rho',
   title: 'Reduction of yield by shear',
   unit: '1',
   clause: SHEAR_REDUCTION,
-  expression: '(2 * V_z_Ed / V_pl_z_Rd - 1)^2',
+  expression: 'min((2 * V_z_Ed / V_pl_z_Rd - 1)^2, 1)',
   where: { V_z_Ed: 'kN', V_pl_z_Rd: 'kN' },
 });
 
