@@ -48,8 +48,7 @@ export function verifyStrength(
   withSteps: boolean,
 ): Finding[] {
   return criteriaOf(section).flatMap((criterion) => {
-    let worst: Governing | undefined;
-    for (const one of cases) worst = worstOf(criterion, one, worst);
+    const worst = worstOf(criterion, cases);
     return worst ? [findingOf(criterion, worst.effects, withSteps)] : [];
   });
 }
@@ -57,46 +56,51 @@ export function verifyStrength(
 /** A place this near to the worst seen may hide a worse one between it and its neighbours. */
 const NEAR = 0.97;
 
-function worstOf(
-  criterion: Criterion,
-  one: CaseEffects,
-  known: Governing | undefined,
-): Governing | undefined {
-  let worst = known;
-  const seen: Governing[] = [];
-  const look = (effects: Effects): void => {
+function worstOf(criterion: Criterion, cases: readonly CaseEffects[]): Governing | undefined {
+  let worst: Governing | undefined;
+  const seen: (Governing & { readonly one: CaseEffects })[] = [];
+  const look = (effects: Effects, one: CaseEffects): void => {
     const utilisation = criterion.utilisation(effects);
     if (utilisation === undefined) return;
     if (Number.isNaN(utilisation)) throw new Error(`${criterion.id} has no number at ${effects.x}`);
-    if (criterion.mayPeakBetween) seen.push({ utilisation, effects });
-    if (!worst || utilisation > worst.utilisation) worst = { utilisation, effects };
+    const bar = worst?.utilisation ?? -1;
+    if (criterion.mayPeakBetween && utilisation >= NEAR * bar)
+      seen.push({ utilisation, effects, one });
+    if (utilisation > bar) worst = { utilisation, effects };
   };
-  for (const effects of one.all()) look(effects);
+  for (const one of cases) for (const effects of one.all()) look(effects, one);
   const bar = NEAR * (worst?.utilisation ?? 0);
-  // A copy: what refining looks at is not refined again.
-  for (const { effects } of seen.filter(({ utilisation }) => utilisation >= bar)) {
-    refine(one, effects.x, (x) => criterion.utilisation(one.at(x)) ?? 0, look);
+  for (const { effects, one } of seen.filter(({ utilisation }) => utilisation >= bar)) {
+    look(peakNear(one, effects.x, criterion), one);
   }
   return worst;
 }
 
 const GOLDEN = (Math.sqrt(5) - 1) / 2;
 
-/** Golden section search for the greatest value around x; to 1e-7 of the stretch. */
-function refine(
-  one: CaseEffects,
-  x: number,
-  value: (x: number) => number,
-  look: (effects: Effects) => void,
-): void {
+/** Golden section search for the greatest value around x; to 1e-5 of the stretch. */
+function peakNear(one: CaseEffects, x: number, criterion: Criterion): Effects {
+  const value = (at: number): number => criterion.utilisation(one.at(at)) ?? 0;
   let { from, to } = one.around(x);
-  for (let round = 0; round < 34; round += 1) {
-    const left = to - GOLDEN * (to - from);
-    const right = from + GOLDEN * (to - from);
-    if (value(left) >= value(right)) to = right;
-    else from = left;
+  let left = to - GOLDEN * (to - from);
+  let right = from + GOLDEN * (to - from);
+  let [atLeft, atRight] = [value(left), value(right)];
+  for (let round = 0; round < 24; round += 1) {
+    if (atLeft >= atRight) {
+      to = right;
+      right = left;
+      atRight = atLeft;
+      left = to - GOLDEN * (to - from);
+      atLeft = value(left);
+    } else {
+      from = left;
+      left = right;
+      atLeft = atRight;
+      right = from + GOLDEN * (to - from);
+      atRight = value(right);
+    }
   }
-  look(one.at((from + to) / 2));
+  return one.at((from + to) / 2);
 }
 
 function findingOf(criterion: Criterion, effects: Effects, withSteps: boolean): Finding {
