@@ -24,6 +24,7 @@ const INSIDE = 8;
 /** The effects of one strength combination along the member. */
 export class CaseEffects {
   private readonly factor: number;
+  private places: readonly Effects[] | undefined;
 
   constructor(
     readonly solved: SolvedCase,
@@ -38,7 +39,11 @@ export class CaseEffects {
    * Every place where a cross-section may govern: supports, jumps, extremes, the extremes of the
    * own weight, and places in between.
    */
-  *all(): Generator<Effects> {
+  all(): readonly Effects[] {
+    return (this.places ??= [...this.look()]);
+  }
+
+  private *look(): Generator<Effects> {
     for (const { span, x, M, V } of sectionPoints(this.state)) yield this.effects(span, x, M, V);
     const { frame } = this.state;
     for (const x of this.weight.places) yield this.at(x);
