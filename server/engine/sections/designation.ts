@@ -1,3 +1,5 @@
+import { editDistance } from '../text/edit-distance';
+
 /** Names of the same family in the trade. */
 const aliases: Readonly<Record<string, string>> = { UKB: 'UB', UKC: 'UC', UKBP: 'UBP' };
 
@@ -26,17 +28,4 @@ export function nearest(text: string, candidates: readonly string[], count: numb
     .sort((a, b) => a.distance - b.distance || a.candidate.localeCompare(b.candidate))
     .slice(0, count)
     .map(({ candidate }) => candidate);
-}
-
-export function editDistance(a: string, b: string): number {
-  let previous = Array.from({ length: b.length + 1 }, (_, index) => index);
-  for (const [i, left] of Array.from(a).entries()) {
-    const current = [i + 1];
-    for (const [j, right] of Array.from(b).entries()) {
-      const substitution = (previous[j] ?? 0) + (left === right ? 0 : 1);
-      current.push(Math.min(substitution, (previous[j + 1] ?? 0) + 1, (current[j] ?? 0) + 1));
-    }
-    previous = current;
-  }
-  return previous[b.length] ?? 0;
 }

@@ -1,4 +1,5 @@
 import { formula } from '../formula/formula';
+import { fillet, lengths } from './shapes/fillet';
 
 /** Dimensions of a rolled I or H section in mm. */
 export interface ISectionDimensions {
@@ -9,27 +10,16 @@ export interface ISectionDimensions {
   readonly r: number;
 }
 
-type Dimension = keyof ISectionDimensions;
-
-/**
- * A root fillet is a square of side r less a quarter circle. Its area is (1 - pi/4) r²; its
- * centroid stands c_r = (10 - 3 pi)/(12 - 3 pi) r from the corner that it fills; its own second
- * moment of area is r⁴ (1/3 - pi/16 - 1/(9 (4 - pi))). Derived from the geometry.
- */
-const filletArea = '(1 - pi / 4) * r^2';
-const filletCentroid = '(10 - 3 * pi) / (12 - 3 * pi) * r';
-const filletInertia = 'r^4 * (1 / 3 - pi / 16 - 1 / (9 * (4 - pi)))';
+const root = fillet('r');
 
 const clause = 'Geometry of EN 10365 dimensions';
-const lengths = <D extends Dimension>(...names: D[]): Record<D, 'mm'> =>
-  Object.fromEntries(names.map((name) => [name, 'mm'])) as Record<D, 'mm'>;
 
 export const area = formula({
   symbol: 'A',
   title: 'Area',
   unit: 'mm^2',
   clause,
-  expression: `2 * b * t_f + (h - 2 * t_f) * t_w + 4 * ${filletArea}`,
+  expression: `2 * b * t_f + (h - 2 * t_f) * t_w + 4 * ${root.area}`,
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 
@@ -38,7 +28,7 @@ export const secondMomentY = formula({
   title: 'Second moment of area about y-y',
   unit: 'mm^4',
   clause,
-  expression: `(b * h^3 - (b - t_w) * (h - 2 * t_f)^3) / 12 + 4 * (${filletInertia} + ${filletArea} * (h / 2 - t_f - ${filletCentroid})^2)`,
+  expression: `(b * h^3 - (b - t_w) * (h - 2 * t_f)^3) / 12 + 4 * (${root.inertia} + ${root.area} * (h / 2 - t_f - ${root.centroid})^2)`,
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 
@@ -47,7 +37,7 @@ export const secondMomentZ = formula({
   title: 'Second moment of area about z-z',
   unit: 'mm^4',
   clause,
-  expression: `t_f * b^3 / 6 + (h - 2 * t_f) * t_w^3 / 12 + 4 * (${filletInertia} + ${filletArea} * (t_w / 2 + ${filletCentroid})^2)`,
+  expression: `t_f * b^3 / 6 + (h - 2 * t_f) * t_w^3 / 12 + 4 * (${root.inertia} + ${root.area} * (t_w / 2 + ${root.centroid})^2)`,
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 
@@ -74,7 +64,7 @@ export const plasticModulusY = formula({
   title: 'Plastic section modulus about y-y',
   unit: 'mm^3',
   clause,
-  expression: `b * t_f * (h - t_f) + t_w * (h - 2 * t_f)^2 / 4 + 4 * ${filletArea} * (h / 2 - t_f - ${filletCentroid})`,
+  expression: `b * t_f * (h - t_f) + t_w * (h - 2 * t_f)^2 / 4 + 4 * ${root.area} * (h / 2 - t_f - ${root.centroid})`,
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 
@@ -83,7 +73,7 @@ export const plasticModulusZ = formula({
   title: 'Plastic section modulus about z-z',
   unit: 'mm^3',
   clause,
-  expression: `t_f * b^2 / 2 + (h - 2 * t_f) * t_w^2 / 4 + 4 * ${filletArea} * (t_w / 2 + ${filletCentroid})`,
+  expression: `t_f * b^2 / 2 + (h - 2 * t_f) * t_w^2 / 4 + 4 * ${root.area} * (t_w / 2 + ${root.centroid})`,
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 

@@ -1,21 +1,4 @@
-/** Steps of inserting, dropping, changing or swapping neighbours that lead from one to the other. */
-export function editDistance(from: string, to: string): number {
-  let before: number[] = [];
-  let row = Array.from({ length: to.length + 1 }, (_, j) => j);
-  for (let i = 1; i <= from.length; i += 1) {
-    const next = [i];
-    for (let j = 1; j <= to.length; j += 1) {
-      const same = from[i - 1] === to[j - 1];
-      const steps = [(row[j] ?? 0) + 1, (next[j - 1] ?? 0) + 1, (row[j - 1] ?? 0) + (same ? 0 : 1)];
-      const swapped = i > 1 && j > 1 && from[i - 1] === to[j - 2] && from[i - 2] === to[j - 1];
-      if (swapped) steps.push((before[j - 2] ?? 0) + 1);
-      next.push(Math.min(...steps));
-    }
-    before = row;
-    row = next;
-  }
-  return row[to.length] ?? 0;
-}
+import { editDistance } from '../../engine/text/edit-distance';
 
 const plain = (text: string) => text.toLowerCase().replace(/[^a-z0-9]/g, '');
 

@@ -1,5 +1,6 @@
 import { contract } from './document';
-import { editDistance, nearest } from './nearest';
+import { editDistance } from '../../engine/text/edit-distance';
+import { nearest } from './nearest';
 import { validateAnswer, validateRequest } from './validate';
 
 const waler = {
