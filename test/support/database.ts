@@ -20,8 +20,20 @@ export async function createDatabase(): Promise<TestDatabase> {
   return {
     url: at(url, name),
     ownerUrl: at(ownerUrl, name),
-    drop: () => asOwner(ownerUrl, `drop database if exists ${name} with (force)`),
+    drop: async () => {
+      await asOwner(ownerUrl, cutConnections(name));
+      await asOwner(ownerUrl, `drop database if exists ${name}`);
+    },
   };
+}
+
+/**
+ * Not `drop … with (force)`: that ends every session, and fails when one is the superuser's autovacuum
+ * worker. A plain drop asks that worker to leave and waits for it.
+ */
+function cutConnections(database: string): string {
+  return `select pg_terminate_backend(pid) from pg_stat_activity
+    where datname = '${database}' and backend_type = 'client backend' and pid <> pg_backend_pid()`;
 }
 
 function fromEnvironment(name: string): URL {
