@@ -4,6 +4,9 @@ type Schemas = components['schemas'];
 
 /** The contract's types by the names the checks use. */
 export type WalerRequest = Schemas['WalerRequest'];
+export type SectionRequest = Schemas['SectionRequest'];
+export type StressRequest = Schemas['StressRequest'];
+export type SectionEffects = Schemas['SectionEffects'];
 export type LoadInput = Schemas['Load'];
 export type LoadSetInput = Schemas['LoadSet'];
 export type SectionInput = Schemas['SectionInput'];

@@ -2,17 +2,6 @@ import { Refusal } from '../refusal';
 import type { ProfileReader } from '../profiles/reader';
 import { steelStrengths, type StrengthTable } from './steel-strengths';
 
-/** Steel as a check uses it, in N/mm². */
-export interface Steel {
-  /** Grade, or `f_y 275` where the caller gave the strength. */
-  readonly name: string;
-  readonly f_y: number;
-  readonly E: number;
-  readonly G: number;
-  /** Where f_y comes from. */
-  readonly clause: string;
-}
-
 /** N/mm²; EN 1993-1-1 3.1(2) goes up to S460, EN 1993-1-12 beyond. */
 export const HIGHEST_STRENGTH = 460;
 
@@ -35,17 +24,26 @@ function strengthClass(grade: string): string {
   return match ? `S${match[1] ?? ''}` : grade.trim();
 }
 
+/** Nominal strengths of a grade at a thickness, N/mm². */
+export interface NominalStrength {
+  readonly f_y: number;
+  /** Where f_y comes from. */
+  readonly clause: string;
+  /** f_u, recorded as read when it is asked for. */
+  ultimate(): { readonly f_u: number; readonly clause: string };
+}
+
 /**
- * f_y of a grade at a thickness, by the table that the profile's annex chooses.
+ * f_y and f_u of a grade at a thickness, by the table that the profile's annex chooses.
  *
  * @param thickness nominal thickness of the thickest part in mm
  * @throws {Refusal} `unknown-grade`, `thickness-not-covered`
  */
-export function yieldStrength(
+export function steelStrength(
   grade: string,
   thickness: number,
   profile: ProfileReader,
-): { readonly f_y: number; readonly clause: string } {
+): NominalStrength {
   const table = profile.choice<StrengthTable>('steel.strengths', [
     'table-3.1',
     'product-standards',
@@ -62,8 +60,18 @@ export function yieldStrength(
     const message = `${clause} gives no strength of ${name} at ${thickness} mm.`;
     throw refusal('thickness-not-covered', message, clause);
   }
-  profile.record(`strengths.${table}.${name}.upTo${row.upTo}.fy`, row.fy);
-  return { f_y: row.fy.value, clause: `${row.fy.clause}, ${name}, t ≤ ${row.upTo} mm` };
+  const path = `strengths.${table}.${name}.upTo${row.upTo}`;
+  const words = (value: { clause: string }): string =>
+    `${value.clause}, ${name}, t ≤ ${row.upTo} mm`;
+  profile.record(`${path}.fy`, row.fy);
+  return {
+    f_y: row.fy.value,
+    clause: words(row.fy),
+    ultimate: () => {
+      profile.record(`${path}.fu`, row.fu);
+      return { f_u: row.fu.value, clause: words(row.fu) };
+    },
+  };
 }
 
 function refusal(code: string, message: string, clause?: string): Refusal {

@@ -16,15 +16,15 @@ import ub from './catalogue/ub.json';
 import ubp from './catalogue/ubp.json';
 import uc from './catalogue/uc.json';
 import { designationKey, nearest } from './designation';
-import type { ISectionDimensions } from './i-section';
+import type { SectionShape } from './shapes/shape';
 
 /** A section of the catalogue: dimensions in mm, mass in kg/m (null where none is published). */
-export interface CatalogueEntry extends ISectionDimensions {
+export type CatalogueEntry = SectionShape & {
   readonly designation: string;
   readonly family: string;
   readonly source: string;
   readonly mass: number | null;
-}
+};
 
 interface FamilyFile {
   readonly family: string;
@@ -63,7 +63,9 @@ function entriesOf(file: FamilyFile): CatalogueEntry[] {
       number,
       number | null,
     ];
-    return { designation, family: file.family, source: file.source, h, b, t_w, t_f, r, mass };
+    const { family, source } = file;
+    const shape = { shape: 'I', fabrication: 'rolled', h, b, t_w, t_f, r } as const;
+    return { ...shape, designation, family, source, mass };
   });
 }
 

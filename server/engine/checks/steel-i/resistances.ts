@@ -48,21 +48,21 @@ export function shearResistanceAlongWeb(section: SteelISection, sheet: Sheet): n
 }
 
 function areaAlongWeb(section: SteelISection, sheet: Sheet): number {
-  const { entry, eta, properties, shearAreas } = section;
+  const { shape, eta, properties, shearAreas } = section;
   if (shearAreas.z !== undefined) {
     return sheet.given('A_v_z', shearAreas.z, 'mm^2', 'Shear area', 'Given by the caller');
   }
-  const { h, b, t_f, t_w, r } = entry;
+  const { h, b, t_f, t_w, r } = shape;
   const h_w = sheet.evaluate(webHeight, { h, t_f });
   return sheet.evaluate(shearAreaZ, { A: properties.A, b, t_f, t_w, r, eta, h_w });
 }
 
 /** N, along the flanges. */
 export function shearResistanceAlongFlanges(section: SteelISection, sheet: Sheet): number {
-  const { entry, f_y, gamma_M0, shearAreas } = section;
+  const { shape, f_y, gamma_M0, shearAreas } = section;
   const A_v_y =
     shearAreas.y === undefined
-      ? sheet.evaluate(shearAreaY, { b: entry.b, t_f: entry.t_f })
+      ? sheet.evaluate(shearAreaY, { b: shape.b, t_f: shape.t_f })
       : sheet.given('A_v_y', shearAreas.y, 'mm^2', 'Shear area', 'Given by the caller');
   return sheet.evaluate(shearResistanceY, { A_v_y, f_y, gamma_M0 });
 }
@@ -80,8 +80,8 @@ export function bendingResistanceWithShear(
   const V_pl_z_Rd = shearResistanceAlongWeb(section, sheet);
   const M_c_y_Rd = bendingResistanceY(section, sheet);
   if (V_z_Ed <= 0.5 * V_pl_z_Rd) return M_c_y_Rd;
-  const { entry, f_y, gamma_M0, properties, sectionClass } = section;
-  const { h, t_f, t_w } = entry;
+  const { shape, f_y, gamma_M0, properties, sectionClass } = section;
+  const { h, t_f, t_w } = shape;
   const rho = sheet.evaluate(shearReduction, { V_z_Ed, V_pl_z_Rd });
   const h_w = sheet.evaluate(webHeight, { h, t_f });
   if (sectionClass > 2) {
@@ -103,15 +103,15 @@ export function bendingResistanceWithShear(
 
 /** @throws {Refusal} `shear-buckling` where the web is too slender for 6.2.6 alone. */
 export function refuseSlenderWeb(section: SteelISection, sheet: Sheet): void {
-  const { entry, eta, f_y } = section;
-  const h_w = sheet.evaluate(webHeight, { h: entry.h, t_f: entry.t_f });
+  const { shape, eta, f_y } = section;
+  const h_w = sheet.evaluate(webHeight, { h: shape.h, t_f: shape.t_f });
   const epsilon = sheet.evaluate(epsilonFactor, { f_y });
-  const ratio = sheet.evaluate(shearBucklingRatio, { h_w, t_w: entry.t_w, epsilon, eta });
+  const ratio = sheet.evaluate(shearBucklingRatio, { h_w, t_w: shape.t_w, epsilon, eta });
   if (ratio <= 1) return;
   refuse(
     'shear-buckling',
     '/section',
-    `The web of ${entry.designation} is ${ratio.toFixed(2)} times as slender as 6.2.6(6) allows without a verification of shear buckling, which this version of the check does not make.`,
+    `The web of ${section.name} is ${ratio.toFixed(2)} times as slender as 6.2.6(6) allows without a verification of shear buckling, which this version of the check does not make.`,
     'EN 1993-1-5 5',
   );
 }
