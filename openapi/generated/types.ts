@@ -1471,7 +1471,7 @@ export interface components {
          * @description One verification of the contract.
          * @enum {string}
          */
-        readonly VerificationId: "tension" | "compression" | "bending-y" | "bending-z" | "shear-z" | "shear-y" | "torsion" | "shear-torsion" | "bending-shear-y" | "bending-axial-y" | "bending-axial-z" | "biaxial" | "flexural-buckling-y" | "flexural-buckling-z" | "flexural-buckling-u" | "flexural-buckling-v" | "torsional-buckling" | "torsional-flexural-buckling" | "lateral-torsional-buckling" | "interaction-y" | "interaction-z" | "interaction-lt" | "von-mises" | "transverse-force" | "transverse-force-bending" | "web-buckling-shear" | "flange-induced-buckling" | "bearing-across-grain" | "bearing-at-angle" | "notch" | "ground-bearing" | "adjustable-prop" | "deflection" | "deflection-final" | "deflection-net-final";
+        readonly VerificationId: "tension" | "compression" | "bending-y" | "bending-z" | "shear-z" | "shear-y" | "torsion" | "shear-torsion" | "bending-shear-y" | "bending-shear-z" | "bending-axial-y" | "bending-axial-z" | "biaxial" | "flexural-buckling-y" | "flexural-buckling-z" | "flexural-buckling-u" | "flexural-buckling-v" | "torsional-buckling" | "torsional-flexural-buckling" | "lateral-torsional-buckling" | "interaction-y" | "interaction-z" | "interaction-lt" | "von-mises" | "transverse-force" | "transverse-force-bending" | "web-buckling-shear" | "flange-induced-buckling" | "bearing-across-grain" | "bearing-at-angle" | "notch" | "ground-bearing" | "adjustable-prop" | "deflection" | "deflection-final" | "deflection-net-final";
         /** @description Why, in the caller's own words. It is printed beside the status everywhere. */
         readonly Reason: string;
         /** A verification the caller takes upon themselves */
@@ -1600,6 +1600,12 @@ export interface components {
             readonly combination: string | null;
             /** @description Where it governs; `null` where the whole member is meant. */
             readonly at: components["schemas"]["Place"] | null;
+            /**
+             * @description The named point of the section, or the state of stress counted from 1 (`state-3`), where it governs.
+             * @example flange-tip-top-right
+             * @example state-3
+             */
+            readonly point?: string;
             readonly values: components["schemas"]["Values"];
         };
         /** One line of the working */
@@ -1726,6 +1732,101 @@ export interface components {
             /** @description In mm, positive with the load. */
             readonly deflection: readonly components["schemas"]["DiagramPoint"][];
         };
+        /** A strip of a plate that does not count */
+        readonly IneffectiveStrip: {
+            /**
+             * @description The effect whose effective section leaves it out.
+             * @enum {string}
+             */
+            readonly under: "N" | "My" | "Mz";
+            /** @description Of its centre. */
+            readonly y: number;
+            /** @description Of its centre. */
+            readonly z: number;
+            /** @description Along y-y. */
+            readonly width: number;
+            /** @description Along z-z. */
+            readonly height: number;
+        };
+        /**
+         * What a drawing of the section needs
+         * @description Lengths in mm, from the centroid of the gross section; y to the right, z downwards, as M_y positive stretches z > 0.
+         */
+        readonly SectionSketch: {
+            /** @description Designation or the shape in words. */
+            readonly name: string;
+            /** @enum {string} */
+            readonly shape: "I" | "channel" | "RHS" | "CHS" | "angle" | "rectangle" | "round";
+            /** @description By the names of a request: h b tw tf r, slope and r2 of tapered flanges; h b t ro ri of an RHS; d t; h b t r1 r2 of an angle; yc and zc, the centroid from the back of the web or legs. */
+            readonly dimensions: {
+                readonly [key: string]: number;
+            };
+            /** @description What class 4 leaves out, under the axial force or under the moment that acts. */
+            readonly ineffective: readonly components["schemas"]["IneffectiveStrip"][];
+        };
+        /**
+         * Stress at one point
+         * @description In N/mm², tension positive; y and z in mm from the centroid of the gross section.
+         */
+        readonly StressPoint: {
+            /** @example web-centre */
+            readonly id: string;
+            /** @description The point in words. */
+            readonly title: string;
+            /** @description `null` for a state of stress. */
+            readonly y: number | null;
+            /** @description `null` for a state of stress. */
+            readonly z: number | null;
+            /** @description Along the member. */
+            readonly sigma: number;
+            /** @description Across it; only of a state of stress. */
+            readonly sigmaZ?: number;
+            /** @description Shear along the wall, from shear forces and torsion. */
+            readonly tau: number;
+            /** @description By von Mises. */
+            readonly sigma_v: number;
+        };
+        /** Stress along one wall */
+        readonly StressWall: {
+            /** @example web */
+            readonly id: string;
+            /** @description The wall in words. */
+            readonly title: string;
+            /** @description Its thickness in mm. */
+            readonly t: number;
+            readonly points: readonly {
+                /** @description In mm. */
+                readonly y: number;
+                /** @description In mm. */
+                readonly z: number;
+                /** @description In N/mm². */
+                readonly sigma: number;
+                /** @description In N/mm². */
+                readonly tau: number;
+            }[];
+        };
+        /** One axis of an interaction curve */
+        readonly InteractionAxis: {
+            readonly symbol: components["schemas"]["Symbol"];
+            readonly unit: components["schemas"]["Unit"];
+        };
+        /** A point of an interaction curve */
+        readonly InteractionPoint: {
+            readonly x: number;
+            readonly y: number;
+        };
+        /**
+         * What two effects may be together
+         * @description Numbers in the unit of their axis; the curve runs from the axis of one to that of the other.
+         */
+        readonly InteractionCurve: {
+            readonly verification: components["schemas"]["VerificationId"];
+            readonly x: components["schemas"]["InteractionAxis"];
+            readonly y: components["schemas"]["InteractionAxis"];
+            readonly curve: readonly components["schemas"]["InteractionPoint"][];
+            /** @description What acts. */
+            readonly point: components["schemas"]["InteractionPoint"];
+        };
         /**
          * @description Where the revision stands in its approval.
          * @enum {string}
@@ -1816,6 +1917,13 @@ export interface components {
             readonly combinations?: readonly components["schemas"]["CombinationLine"][];
             readonly reactions?: readonly components["schemas"]["Reaction"][];
             readonly diagrams?: components["schemas"]["Diagrams"];
+            readonly section?: components["schemas"]["SectionSketch"];
+            /** @description Stress at each named point of the section or in each state; of `stress` and of `section`. */
+            readonly points?: readonly components["schemas"]["StressPoint"][];
+            /** @description How stress runs along each wall of the section; with `detail=full`. */
+            readonly walls?: readonly components["schemas"]["StressWall"][];
+            /** @description What the section carries together, with the point that acts; with `detail=full`. */
+            readonly interaction?: readonly components["schemas"]["InteractionCurve"][];
             readonly profile: components["schemas"]["ProfileStamp"];
             readonly advisories: readonly components["schemas"]["Advisory"][];
             readonly basis: components["schemas"]["Basis"];
@@ -2226,14 +2334,14 @@ export interface components {
         };
         /**
          * Cross-section check
-         * @description Design effects that act together at one cross-section. V above 0.5 V_pl reduces the yield strength of A_v by (1 - rho) in N and M (EN 1993-1-1 6.2.10).
+         * @description Design effects that act together at one cross-section, on one member whatever `count` is. V above 0.5 V_pl reduces the yield strength of A_v by (1 - rho) in N and M (EN 1993-1-1 6.2.10). Shear forces act through the shear centre; what a load beside it turns is given as `T`.
          */
         readonly SectionRequest: {
             readonly profile?: components["schemas"]["ProfileName"];
             readonly material: components["schemas"]["MaterialWithDurationInput"];
             readonly section: components["schemas"]["SectionInput"];
             readonly effects: components["schemas"]["SectionEffects"];
-            /** @description Net area at the holes, of one member. Default the gross area. */
+            /** @description Net area at the holes for fasteners, of one member; without it there are none. */
             readonly netArea?: components["schemas"]["QuantityInput"];
             /**
              * @description Whether von Mises' criterion (EN 1993-1-1 6.2.1(5)) counts.
