@@ -4,6 +4,14 @@ type Schemas = components['schemas'];
 
 /** The body of `POST /v1/checks/waler`. */
 export type WalerRequest = Schemas['WalerRequest'];
+/** The body of `POST /v1/checks/section`. */
+export type SectionRequest = Schemas['SectionRequest'];
+/** The body of `POST /v1/checks/stress`. */
+export type StressRequest = Schemas['StressRequest'];
+/** Design effects at one cross-section. */
+export type SectionEffects = Schemas['SectionEffects'];
+/** Name of a check in its address. */
+export type CheckId = Schemas['CheckId'];
 /** What a check answers. */
 export type CheckAnswer = Schemas['CheckAnswer'];
 /** The word of an answer; only `pass` is a pass. */
@@ -36,6 +44,18 @@ export type AxialLoad = Schemas['AxialLoad'];
 export type SectionInput = Schemas['SectionInput'];
 /** What a member is made of. */
 export type MaterialInput = Schemas['MaterialInput'];
+/** Steel by its grade. */
+export type SteelByGrade = Schemas['SteelByGrade'];
+/** What a drawing of the section needs. */
+export type SectionSketch = Schemas['SectionSketch'];
+/** A strip of a plate that does not count. */
+export type IneffectiveStrip = Schemas['IneffectiveStrip'];
+/** Stress at one named point, or a state of stress. */
+export type StressPoint = Schemas['StressPoint'];
+/** Stress along one wall of a section. */
+export type StressWall = Schemas['StressWall'];
+/** What two effects may be together. */
+export type InteractionCurve = Schemas['InteractionCurve'];
 /** A verification the caller takes upon themselves. */
 export type Waiver = Schemas['Waiver'];
 /** A number in the field's unit, or text with a unit. */
@@ -64,6 +84,7 @@ interface SectionFact {
 export interface SectionLine {
   readonly designation: string;
   readonly family?: string;
+  readonly shape?: string;
   readonly mass?: SectionFact | null;
-  readonly dimensions?: { readonly h?: SectionFact; readonly b?: SectionFact };
+  readonly dimensions?: Readonly<Record<string, SectionFact>>;
 }

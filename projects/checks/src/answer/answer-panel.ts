@@ -7,7 +7,7 @@ import {
   ViewEncapsulation,
 } from '@angular/core';
 import type { RunState } from '../api/check-runner';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 import type { DrawingModel } from '../member-drawing/drawing-model';
 import { utilisationText } from '../quantity/format';
 import { StatusMark, type MarkKind } from '../status-mark/status-mark';

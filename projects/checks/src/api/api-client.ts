@@ -1,5 +1,5 @@
 import { InjectionToken } from '@angular/core';
-import type { CheckAnswer, Formula, ProfileSummary, SectionLine, WalerRequest } from '../contract';
+import type { CheckAnswer, CheckId, Formula, ProfileSummary, SectionLine } from '../contract';
 import { ApiError, awayError, errorOf, secretKeyError } from './api-error';
 
 /** How a page shows who it is: a page key in a header, or the console's own signed-in session. */
@@ -56,9 +56,9 @@ export class ApiClient {
     return undefined;
   }
 
-  /** Checks a waler and asks for the whole working. */
-  checkWaler(request: WalerRequest, signal?: AbortSignal): Promise<CheckAnswer> {
-    return this.call('/v1/checks/waler?detail=full', signal, request);
+  /** Makes a check and asks for the whole working. */
+  check(id: CheckId, request: object, signal?: AbortSignal): Promise<CheckAnswer> {
+    return this.call(`/v1/checks/${id}?detail=full`, signal, request);
   }
 
   /** The formula behind a line of the working; asked for once in the life of the page. */

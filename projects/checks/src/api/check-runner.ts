@@ -16,8 +16,7 @@ import {
   timer,
   type Subscription,
 } from 'rxjs';
-import type { CheckAnswer, WalerRequest } from '../contract';
-import type { ApiClient } from './api-client';
+import type { CheckAnswer } from '../contract';
 import { ApiError } from './api-error';
 
 /** Where the check stands. */
@@ -42,10 +41,13 @@ export interface RunState {
 }
 
 interface Ask {
-  readonly request: WalerRequest;
+  readonly request: object;
   readonly wait: number;
   done(answer?: CheckAnswer): void;
 }
+
+/** The call behind a check. */
+type Call = (request: object, signal: AbortSignal) => Promise<CheckAnswer>;
 
 const DEBOUNCE = 250;
 const LONGEST_PAUSE = 30;
@@ -63,12 +65,12 @@ export class CheckRunner {
   /** The answer, while it belongs to the form as it stands. */
   readonly fresh = computed(() => (this.held().phase === 'answered' ? this.held().answer : null));
 
-  constructor(private readonly client: () => ApiClient) {
+  constructor(private readonly call: Call) {
     this.running = this.asks.pipe(switchMap((ask) => (ask ? this.run(ask) : EMPTY))).subscribe();
   }
 
   /** Asks a moment later, so that a word being typed is asked once; `now` asks at once. */
-  ask(request: WalerRequest, now = false): Promise<CheckAnswer | undefined> {
+  ask(request: object, now = false): Promise<CheckAnswer | undefined> {
     this.current?.done();
     return new Promise((resolve) => {
       const ask: Ask = { request, wait: now ? 0 : DEBOUNCE, done: resolve };
@@ -126,8 +128,8 @@ export class CheckRunner {
   private once(ask: Ask): Observable<CheckAnswer> {
     return new Observable((reader) => {
       const abort = new AbortController();
-      const call = defer(() => from(this.client().checkWaler(ask.request, abort.signal)));
-      const reading = call.subscribe(reader);
+      const asking = defer(() => from(this.call(ask.request, abort.signal)));
+      const reading = asking.subscribe(reader);
       return () => {
         reading.unsubscribe();
         abort.abort();

@@ -21,7 +21,7 @@ const settle = () => jest.advanceTimersByTimeAsync(0);
 describe('the client', () => {
   it('sends the page key and no cookies', async () => {
     const fetcher = jest.fn().mockResolvedValue(json(answer(0.5)));
-    await new ApiClient(access, fetcher).checkWaler(request);
+    await new ApiClient(access, fetcher).check('waler', request);
     expect(fetcher).toHaveBeenCalledWith(
       'https://checks.example/v1/checks/waler?detail=full',
       expect.objectContaining({
@@ -41,7 +41,7 @@ describe('the client', () => {
       credentials: 'session',
       csrfToken: () => 'T',
     } as const;
-    await new ApiClient(session, fetcher).checkWaler(request);
+    await new ApiClient(session, fetcher).check('waler', request);
     const [url, init] = fetcher.mock.calls[0] as [string, RequestInit];
     expect(url).toBe('/v1/checks/waler?detail=full');
     expect(init.credentials).toBe('same-origin');
@@ -52,7 +52,7 @@ describe('the client', () => {
   it('refuses a secret key before anything is sent', async () => {
     const fetcher = jest.fn();
     const client = new ApiClient({ ...access, apiKey: ' htk_abc' }, fetcher);
-    await expect(client.checkWaler(request)).rejects.toMatchObject({ kind: 'secret-key' });
+    await expect(client.check('waler', request)).rejects.toMatchObject({ kind: 'secret-key' });
     await expect(client.profiles()).rejects.toMatchObject({ kind: 'secret-key' });
     expect(fetcher).not.toHaveBeenCalled();
   });
@@ -75,7 +75,7 @@ describe('the client', () => {
     const items = [{ pointer: '/spans/0', code: 'must-be-positive', message: 'no' }];
     const problem = { code: 'not-valid', detail: 'Here is why.', errors: items, requestId: 'R' };
     const fetcher = jest.fn().mockResolvedValue(json(problem, status, { 'Retry-After': '7' }));
-    await expect(new ApiClient(access, fetcher).checkWaler(request)).rejects.toMatchObject({
+    await expect(new ApiClient(access, fetcher).check('waler', request)).rejects.toMatchObject({
       kind,
       status,
       items,
@@ -91,26 +91,26 @@ describe('the runner', () => {
 
   function withAnswers(...answers: (() => Promise<CheckAnswer>)[]) {
     const signals: (AbortSignal | undefined)[] = [];
-    let call = 0;
-    const checkWaler = jest.fn((_: WalerRequest, signal?: AbortSignal) => {
+    let calls = 0;
+    const call = jest.fn((_: object, signal?: AbortSignal) => {
       signals.push(signal);
-      const give = answers[Math.min(call, answers.length - 1)];
-      call += 1;
+      const give = answers[Math.min(calls, answers.length - 1)];
+      calls += 1;
       return give ? give() : Promise.reject(new Error('none'));
     });
-    const runner = new CheckRunner(() => ({ checkWaler }) as unknown as ApiClient);
-    return { runner, checkWaler, signals };
+    const runner = new CheckRunner(call);
+    return { runner, call, signals };
   }
 
   it('waits until the typing pauses', async () => {
-    const { runner, checkWaler } = withAnswers(() => Promise.resolve(answer(0.5)));
+    const { runner, call } = withAnswers(() => Promise.resolve(answer(0.5)));
     void runner.ask(request);
     await jest.advanceTimersByTimeAsync(200);
     const last = runner.ask(request);
     await jest.advanceTimersByTimeAsync(249);
-    expect(checkWaler).not.toHaveBeenCalled();
+    expect(call).not.toHaveBeenCalled();
     await jest.advanceTimersByTimeAsync(1);
-    expect(checkWaler).toHaveBeenCalledTimes(1);
+    expect(call).toHaveBeenCalledTimes(1);
     await expect(last).resolves.toEqual(answer(0.5));
     runner.stop();
   });
@@ -146,16 +146,16 @@ describe('the runner', () => {
 
   it('asks an absent service again, later each time, until it is back', async () => {
     const away = () =>
-      new ApiClient(access, () => Promise.reject(new TypeError())).checkWaler(request);
-    const { runner, checkWaler } = withAnswers(away, away, () => Promise.resolve(answer(0.5)));
+      new ApiClient(access, () => Promise.reject(new TypeError())).check('waler', request);
+    const { runner, call } = withAnswers(away, away, () => Promise.resolve(answer(0.5)));
     void runner.ask(request, true);
     await settle();
     expect(runner.state().phase).toBe('offline');
     expect(runner.state().error?.message).toContain('does not answer');
     await jest.advanceTimersByTimeAsync(1000);
-    expect(checkWaler).toHaveBeenCalledTimes(2);
+    expect(call).toHaveBeenCalledTimes(2);
     await jest.advanceTimersByTimeAsync(1999);
-    expect(checkWaler).toHaveBeenCalledTimes(2);
+    expect(call).toHaveBeenCalledTimes(2);
     await jest.advanceTimersByTimeAsync(1);
     expect(runner.state()).toMatchObject({ phase: 'answered', answer: answer(0.5), error: null });
     runner.stop();
@@ -163,26 +163,26 @@ describe('the runner', () => {
 
   it('asks at once when the network is back, or when told to', async () => {
     const away = () =>
-      new ApiClient(access, () => Promise.reject(new TypeError())).checkWaler(request);
-    const { runner, checkWaler } = withAnswers(away);
+      new ApiClient(access, () => Promise.reject(new TypeError())).check('waler', request);
+    const { runner, call } = withAnswers(away);
     void runner.ask(request, true);
     await settle();
     globalThis.dispatchEvent(new Event('online'));
     await settle();
-    expect(checkWaler).toHaveBeenCalledTimes(2);
+    expect(call).toHaveBeenCalledTimes(2);
     runner.tryNow();
     await settle();
-    expect(checkWaler).toHaveBeenCalledTimes(3);
+    expect(call).toHaveBeenCalledTimes(3);
     runner.stop();
   });
 
   it('does not ask again what was refused', async () => {
     const problem = json({ detail: 'no', errors: [] }, 422);
-    const refuse = () => new ApiClient(access, () => Promise.resolve(problem)).checkWaler(request);
-    const { runner, checkWaler } = withAnswers(refuse);
+    const refuse = () => new ApiClient(access, () => Promise.resolve(problem)).check('waler', request);
+    const { runner, call } = withAnswers(refuse);
     await Promise.all([runner.ask(request, true), settle()]);
     await jest.advanceTimersByTimeAsync(60_000);
-    expect(checkWaler).toHaveBeenCalledTimes(1);
+    expect(call).toHaveBeenCalledTimes(1);
     expect(runner.state().phase).toBe('refused');
     runner.stop();
   });

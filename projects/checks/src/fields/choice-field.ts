@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, input, model, ViewEncapsulation } from '@angular/core';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 import { uniqueId } from '../look/unique-id';
 import { FaultNote } from './fault-note';
 

@@ -5,7 +5,7 @@ import {
   output,
   ViewEncapsulation,
 } from '@angular/core';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 
 /** What is wrong with a field, and the ways to read it where there are two. */
 @Component({

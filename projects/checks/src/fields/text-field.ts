@@ -6,7 +6,7 @@ import {
   model,
   ViewEncapsulation,
 } from '@angular/core';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 import { uniqueId } from '../look/unique-id';
 import { unitText } from '../quantity/units';
 import { FaultNote } from './fault-note';

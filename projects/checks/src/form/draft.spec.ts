@@ -2,6 +2,7 @@ import type { WalerRequest } from '../contract';
 import { emptyRow, type WalerDraft } from './draft';
 import { placeFaults } from './place-faults';
 import { readDraft } from './read-draft';
+import { shownOfWaler } from './waler-fields';
 import { writeDraft } from './write-draft';
 
 const northFace: WalerRequest = {
@@ -158,7 +159,7 @@ describe('a form that is no request yet', () => {
 
 describe('what the service refuses', () => {
   const at = (pointer: string, request = northFace) => {
-    const { beside, rest } = placeFaults(writeDraft(request), [
+    const { beside, rest } = placeFaults(shownOfWaler(writeDraft(request)), [
       { pointer, message: 'no', code: 'x' },
     ]);
     return rest.length > 0 ? 'the list' : [...beside.keys()][0];

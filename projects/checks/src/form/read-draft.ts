@@ -1,69 +1,18 @@
-import type { MaterialInput, QuantityInput, SectionInput, WalerRequest } from '../contract';
-import { readList } from '../quantity/read-list';
-import { readQuantity, type Choice } from '../quantity/read-quantity';
-import type { FieldUnit } from '../quantity/units';
+import type { QuantityInput, SectionInput, WalerRequest } from '../contract';
 import type { WalerDraft } from './draft';
+import { FieldReader, type DraftReading } from './field-reader';
+import { readMaterial } from './material';
 import { readRows } from './read-rows';
 import {
   writeCount,
   writeDraft,
-  writeGrade,
   writeLimit,
   writeSection,
   writeStiffness,
 } from './write-draft';
 
-/** What is wrong with one field, beside which it is shown. */
-export interface FieldFault {
-  /** JSON pointer of the field. */
-  readonly pointer: string;
-  readonly message: string;
-  /** Ways to read the text, where it can be read in two. */
-  readonly choices?: readonly Choice[];
-  /** What to do, where it is known. */
-  readonly fix?: string;
-}
-
-/** The form as a request, or why it is none yet. */
-export interface DraftReading {
-  /** The request; null while a field cannot be read or something it needs is not given. */
-  readonly request: WalerRequest | null;
-  readonly faults: readonly FieldFault[];
-  /** What is not given yet, in words. */
-  readonly wanting: readonly string[];
-}
-
-/** Reads single fields and gathers what is wrong with them. */
-export class FieldReader {
-  readonly faults: FieldFault[] = [];
-
-  quantity(pointer: string, text: string, unit: FieldUnit): QuantityInput | undefined {
-    const reading = readQuantity(text, unit);
-    if (reading.state === 'ok') return reading.value.json;
-    if (reading.state === 'wrong') this.fault(pointer, reading.message, reading.choices);
-    return undefined;
-  }
-
-  /** A quantity that must be given. */
-  needed(pointer: string, text: string, unit: FieldUnit): QuantityInput | undefined {
-    if (text.trim() === '') this.fault(pointer, 'Give a value.');
-    return this.quantity(pointer, text, unit);
-  }
-
-  list(pointer: string, text: string, unit: FieldUnit): QuantityInput[] | undefined {
-    const reading = readList(text, unit);
-    if (reading.state === 'ok') return reading.value.map(({ json }) => json);
-    if (reading.state === 'wrong') this.fault(pointer, reading.message, reading.choices);
-    return undefined;
-  }
-
-  fault(pointer: string, message: string, choices?: readonly Choice[]): void {
-    this.faults.push({ pointer, message, ...(choices && { choices }) });
-  }
-}
-
 /** Reads the form; what it does not show is taken from the request it was filled from. */
-export function readDraft(draft: WalerDraft): DraftReading {
+export function readDraft(draft: WalerDraft): DraftReading<WalerRequest> {
   const reader = new FieldReader();
   const shown = writeDraft(draft.kept);
   const same = (...names: (keyof WalerDraft)[]) => names.every((n) => draft[n] === shown[n]);
@@ -71,7 +20,7 @@ export function readDraft(draft: WalerDraft): DraftReading {
   const spans = same('spans') ? kept.spans : reader.list('/spans', draft.spans, 'm');
   const { loads, thrust } = readRows(draft.rows, reader);
   const section = readSection(draft);
-  const material = readMaterial(draft);
+  const material = readMaterial(kept.material, draft.grade);
   const made = {
     ...kept,
     profile: draft.profile || undefined,
@@ -97,14 +46,7 @@ export function readDraft(draft: WalerDraft): DraftReading {
     ...(draft.spans.trim() === '' ? ['spans'] : []),
     ...(kept.loadSets || loads.length > 0 ? [] : ['a load']),
   ];
-  const complete = reader.faults.length === 0 && wanting.length === 0;
-  return { request: complete ? defined(made) : null, faults: reader.faults, wanting };
-}
-
-/** Without the fields that hold nothing, in the order in which the contract names them. */
-function defined(made: object): WalerRequest {
-  const entries = Object.entries(made).filter(([, value]) => value !== undefined);
-  return Object.fromEntries(entries) as unknown as WalerRequest;
+  return reader.reading(made, wanting);
 }
 
 function readSection({ kept, section, count }: WalerDraft): SectionInput | undefined {
@@ -120,13 +62,6 @@ function readSection({ kept, section, count }: WalerDraft): SectionInput | undef
   const { connected } = base as { connected?: boolean };
   if (count === '1') return text;
   return { designation: text, count: 2, ...(connected !== undefined && { connected }) };
-}
-
-function readMaterial({ kept, grade }: WalerDraft): MaterialInput | undefined {
-  if (grade === writeGrade(kept.material)) return kept.material;
-  if (grade === '') return undefined;
-  const { E, G } = (kept.material ?? {}) as { E?: QuantityInput; G?: QuantityInput };
-  return { type: 'steel', grade, ...(E !== undefined && { E }), ...(G !== undefined && { G }) };
 }
 
 function readOverhangs(draft: WalerDraft, reader: FieldReader): WalerRequest['overhangs'] {

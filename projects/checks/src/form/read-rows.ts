@@ -1,7 +1,7 @@
 import type { AxialLoad, Load, QuantityInput } from '../contract';
 import type { FieldUnit } from '../quantity/units';
 import { isEmptyRow, rowPointer, type LoadRow, type LoadShape } from './draft';
-import type { FieldReader } from './read-draft';
+import type { FieldReader } from './field-reader';
 import { writeDraft } from './write-draft';
 
 /** The unit of a load's value. */

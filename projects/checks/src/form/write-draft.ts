@@ -1,8 +1,9 @@
-import type { AxialLoad, Load, MaterialInput, SectionInput, WalerRequest } from '../contract';
+import type { AxialLoad, Load, SectionInput, WalerRequest } from '../contract';
 import { writeList } from '../quantity/read-list';
 import { writeQuantity } from '../quantity/read-quantity';
 import { writeNumber } from '../quantity/read-number';
 import { emptyRow, nextId, type LoadRow, type RestraintWord, type WalerDraft } from './draft';
+import { writeGrade } from './material';
 
 type Partly = Partial<WalerRequest>;
 
@@ -47,20 +48,6 @@ export function writeSection(section: SectionInput | undefined): string {
 
 export function writeCount(section: SectionInput | undefined): '1' | '2' {
   return typeof section === 'object' && 'count' in section && section.count === 2 ? '2' : '1';
-}
-
-/** The grade of a steel; `kept` for a material that the form does not write itself. */
-export function writeGrade(material: MaterialInput | undefined): string {
-  if (!material) return '';
-  return 'grade' in material ? material.grade : 'kept';
-}
-
-/** A material that is no grade of steel, in words. */
-export function materialText(material: MaterialInput | undefined): string {
-  if (!material || 'grade' in material) return '';
-  if ('fy' in material)
-    return `f_y ${material.fy}${typeof material.fy === 'number' ? ' N/mm²' : ''}`;
-  return 'class' in material ? material.class : 'timber by strengths';
 }
 
 function writeRestraint(restraint: WalerRequest['restraint']): RestraintWord {

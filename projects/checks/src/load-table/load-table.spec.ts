@@ -1,6 +1,6 @@
 import { TestBed } from '@angular/core/testing';
 import { emptyRow, type LoadRow } from '../form/draft';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 import { LoadTable } from './load-table';
 import { LoadTableHarness } from './testing/load-table-harness';
 

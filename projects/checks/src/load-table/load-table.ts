@@ -13,7 +13,7 @@ import {
 import { ChoiceField } from '../fields/choice-field';
 import { TextField } from '../fields/text-field';
 import { emptyRow, rowPointer, type LoadRow } from '../form/draft';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 import { shapeUnit } from '../form/read-rows';
 import { categoryOptions, natures, shapes } from './load-words';
 

@@ -17,7 +17,7 @@ import { catchError, debounceTime, from, of, Subject, switchMap } from 'rxjs';
 import type { ApiClient } from '../api/api-client';
 import type { SectionLine } from '../contract';
 import { FaultNote } from '../fields/fault-note';
-import type { FieldFault } from '../form/read-draft';
+import type { FieldFault } from '../form/field-reader';
 import { uniqueId } from '../look/unique-id';
 import { readable } from '../quantity/format';
 

@@ -1,19 +1,5 @@
 import type { Option } from '../fields/choice-field';
 import type { WalerDraft } from '../form/draft';
-import { materialText } from '../form/write-draft';
-
-const GRADES = ['S235', 'S275', 'S355', 'S450', 'S460'];
-
-/** The steel grades, and the material of the request where it is none of them. */
-export function gradeOptions({ kept, grade }: WalerDraft): readonly Option[] {
-  const own = kept.material && !('grade' in kept.material);
-  const others = grade !== '' && grade !== 'kept' && !GRADES.includes(grade) ? [grade] : [];
-  return [
-    ...(grade === '' ? [{ value: '', label: 'choose' }] : []),
-    ...[...GRADES, ...others].map((value) => ({ value, label: value })),
-    ...(own ? [{ value: 'kept', label: materialText(kept.material) }] : []),
-  ];
-}
 
 /** How the flanges are held. */
 export function restraintOptions({ kept }: WalerDraft): readonly Option[] {

@@ -12,8 +12,9 @@ import type { ApiClient } from '../api/api-client';
 import { ChoiceField } from '../fields/choice-field';
 import { TextField } from '../fields/text-field';
 import { nextId, type WaiverRow, type WalerDraft } from '../form/draft';
-import { MORE } from '../form/place-faults';
-import type { FieldFault } from '../form/read-draft';
+import { MORE } from '../form/waler-fields';
+import type { FieldFault } from '../form/field-reader';
+import { gradeOptions } from '../form/material';
 import { LoadTable } from '../load-table/load-table';
 import { SectionPicker } from '../section-picker/section-picker';
 import * as options from './form-options';
@@ -48,7 +49,7 @@ export class WalerForm {
     source: this.faultBehind,
     computation: (behind, before) => behind || (before?.value ?? false),
   });
-  protected readonly grades = computed(() => options.gradeOptions(this.draft()));
+  protected readonly grades = computed(() => gradeOptions(this.draft().kept.material, this.draft().grade));
   protected readonly restraints = computed(() => options.restraintOptions(this.draft()));
   /** What the request holds and the form does not show. */
   protected readonly keptWords = computed(() => keptFields(this.draft()));
