@@ -1,0 +1,141 @@
+/**
+ * Resistances of a cross-section to one effect, and to bending with shear: EN 1993-1-1 6.2.3 to
+ * 6.2.8 and EN 1993-1-5 5, as clauses.md has them. N and mm; both partial factors are 1.
+ */
+import { epsilonOf, isSlender } from './classes.mjs';
+import { effectiveArea, effectiveModulus } from './effective.mjs';
+import { propertiesOf } from './sections.mjs';
+
+/** @typedef {import('./outline.mjs').Axis} Axis */
+/** @typedef {import('./sections.mjs').Properties} Properties */
+/** @typedef {import('./sections.mjs').Section} Section */
+/** @typedef {import('./classes.mjs').SectionClass} SectionClass */
+/** Shear by its direction, or what follows from it. @typedef {Record<Axis, number>} ByDirection */
+/** @typedef {{ section: Section, fy: number, gross: Properties }} Member */
+
+/** EN 1993-1-5 5.1, for steels up to S460. */
+const ETA = 1.2;
+
+/** The shear that goes with bending about an axis. @type {Record<Axis, Axis>} */
+export const shearWith = { y: 'z', z: 'y' };
+
+/** @param {Section} section @param {number} fy @returns {Member} */
+export function memberOf(section, fy) {
+  return { section, fy, gross: propertiesOf(section) };
+}
+
+/** @param {Member} member */
+export function tensionResistance({ gross, fy }) {
+  return gross.A * fy;
+}
+
+/** @param {Member} member */
+export function compressionResistance({ section, fy, gross }) {
+  return (isSlender(section, fy) ? effectiveArea(section, fy).A : gross.A) * fy;
+}
+
+/** @param {Section} section */
+export function webHeight(section) {
+  switch (section.shape) {
+    case 'I':
+    case 'channel':
+      return section.h - 2 * section.tf;
+    case 'RHS':
+      return section.h - 2 * section.t;
+    case 'CHS':
+      return 0;
+  }
+}
+
+/** @param {Member} member @returns {ByDirection} */
+export function shearAreas({ section, gross: { A } }) {
+  switch (section.shape) {
+    case 'I': {
+      const { b, tw, tf, r } = section;
+      const least = ETA * webHeight(section) * tw;
+      const rolled = Math.max(A - 2 * b * tf + (tw + 2 * r) * tf, least);
+      return { z: section.fabrication === 'rolled' ? rolled : least, y: 2 * b * tf };
+    }
+    case 'channel': {
+      const { b, tw, tf, r } = section;
+      return { z: A - 2 * b * tf + (tw + r) * tf, y: 2 * b * tf };
+    }
+    case 'RHS': {
+      const { h, b } = section;
+      return { z: (A * h) / (b + h), y: (A * b) / (b + h) };
+    }
+    case 'CHS':
+      return { z: (2 * A) / Math.PI, y: (2 * A) / Math.PI };
+  }
+}
+
+/** @param {Member} member @param {Axis} direction */
+export function plasticShear(member, direction) {
+  return (shearAreas(member)[direction] * member.fy) / Math.sqrt(3);
+}
+
+/**
+ * The resistance of the webs to shear buckling, where they are slender enough for it to count.
+ * @param {Member} member
+ */
+export function bucklingShear({ section, fy }) {
+  if (section.shape === 'CHS') return undefined;
+  const [thickness, webs] = section.shape === 'RHS' ? [section.t, 2] : [section.tw, 1];
+  const height = webHeight(section);
+  const epsilon = epsilonOf(fy);
+  if (height / thickness <= (72 * epsilon) / ETA) return undefined;
+  const lambda = height / (86.4 * thickness * epsilon);
+  const chi = lambda < 0.83 / ETA ? ETA : 0.83 / lambda;
+  return (chi * fy * height * thickness * webs) / Math.sqrt(3);
+}
+
+/**
+ * By how much shear lowers the yield strength of its area: 6.2.8(3).
+ * @param {Member} member @param {ByDirection} shear @returns {ByDirection}
+ */
+export function shearReductions(member, shear) {
+  /** @param {Axis} direction */
+  const one = (direction) => {
+    const ratio = shear[direction] / plasticShear(member, direction);
+    return ratio > 0.5 ? Math.min(1, (2 * ratio - 1) ** 2) : 0;
+  };
+  return { y: one('y'), z: one('z') };
+}
+
+/**
+ * Bending about an axis, lowered by the shear that goes with it.
+ * @param {Member} member @param {Axis} axis @param {SectionClass} of @param {number} rho
+ */
+export function bendingResistance(member, axis, of, rho) {
+  return modulus(member, axis, of, rho) * member.fy;
+}
+
+/** @param {Member} member @param {Axis} axis @param {SectionClass} of @param {number} rho */
+function modulus(member, axis, of, rho) {
+  const { section, fy, gross } = member;
+  switch (of) {
+    case 1:
+    case 2:
+      return plasticModulus(member, axis, rho);
+    case 3:
+      if (axis === 'z' || section.shape === 'RHS' || section.shape === 'CHS') {
+        return gross.Wel[axis] * (1 - rho);
+      }
+      return Math.min(gross.Wel.y, ((1 - rho) * 2 * gross.I.y) / webHeight(section));
+    case 4:
+      return effectiveModulus(section, fy, axis) * (1 - rho);
+  }
+}
+
+/** @param {Member} member @param {Axis} axis @param {number} rho */
+function plasticModulus(member, axis, rho) {
+  const { section, gross } = member;
+  const whole = gross.Wpl[axis];
+  if (section.shape === 'RHS') {
+    const shearArea = shearAreas(member)[shearWith[axis]];
+    return whole - (rho * shearArea ** 2) / (8 * section.t);
+  }
+  if (section.shape === 'CHS' || axis === 'z') return whole * (1 - rho);
+  const web = webHeight(section) * section.tw;
+  return whole - (rho * web ** 2) / (4 * section.tw);
+}
