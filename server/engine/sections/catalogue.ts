@@ -1,91 +1,67 @@
-import hd from './catalogue/hd.json';
-import heX from './catalogue/he-x.json';
-import hea from './catalogue/hea.json';
-import heaa from './catalogue/heaa.json';
-import heb from './catalogue/heb.json';
-import hem from './catalogue/hem.json';
-import hl from './catalogue/hl.json';
-import hp from './catalogue/hp.json';
-import ipe from './catalogue/ipe.json';
-import ipea from './catalogue/ipea.json';
-import ipeaa from './catalogue/ipeaa.json';
-import ipeo from './catalogue/ipeo.json';
-import iper from './catalogue/iper.json';
-import ipev from './catalogue/ipev.json';
-import ub from './catalogue/ub.json';
-import ubp from './catalogue/ubp.json';
-import uc from './catalogue/uc.json';
-import { designationKey, nearest } from './designation';
-import type { SectionShape } from './shapes/shape';
+import { designationKey, formingIn, nearest } from './designation';
+import { familyFiles } from './families';
+import { entriesOf, type CatalogueEntry } from './family-file';
 
-/** A section of the catalogue: dimensions in mm, mass in kg/m (null where none is published). */
-export type CatalogueEntry = SectionShape & {
-  readonly designation: string;
-  readonly family: string;
-  readonly source: string;
-  readonly mass: number | null;
-};
+export type { CatalogueEntry } from './family-file';
 
-interface FamilyFile {
-  readonly family: string;
-  readonly source: string;
-  readonly rows: readonly (readonly (string | number | null)[])[];
+export const catalogue: readonly CatalogueEntry[] = familyFiles.flatMap(([file, shapeOf]) =>
+  entriesOf(file, shapeOf),
+);
+
+const HOT = 'HF ';
+const COLD = 'CF ';
+
+/** A hollow section's key says how it was formed, whether its name does or not. */
+function keyOf(entry: CatalogueEntry): string {
+  const key = designationKey(entry.designation);
+  const hot = 'forming' in entry && entry.forming === 'hot-finished';
+  return hot ? HOT + key : key;
 }
-
-const files: readonly FamilyFile[] = [
-  ub,
-  uc,
-  ubp,
-  hea,
-  heb,
-  hem,
-  heaa,
-  heX,
-  hd,
-  hl,
-  hp,
-  ipe,
-  ipea,
-  ipeaa,
-  ipeo,
-  iper,
-  ipev,
-];
-
-function entriesOf(file: FamilyFile): CatalogueEntry[] {
-  return file.rows.map((row) => {
-    const [designation, h, b, t_w, t_f, r, mass] = row as [
-      string,
-      number,
-      number,
-      number,
-      number,
-      number,
-      number | null,
-    ];
-    const { family, source } = file;
-    const shape = { shape: 'I', fabrication: 'rolled', h, b, t_w, t_f, r } as const;
-    return { ...shape, designation, family, source, mass };
-  });
-}
-
-export const catalogue: readonly CatalogueEntry[] = files.flatMap(entriesOf);
 
 const byKey = new Map<string, CatalogueEntry>();
 for (const entry of catalogue) {
-  const key = designationKey(entry.designation);
+  const key = keyOf(entry);
   if (byKey.has(key)) throw new Error(`Two sections answer to ${entry.designation}.`);
   byKey.set(key, entry);
 }
 
-/** The entry that a designation names in any usual spelling: `457 x 191 x 67 UB`, `HEB200`. */
+/**
+ * The entry that a designation names in any usual spelling: `457 x 191 x 67 UB`, `HEB200`.
+ * A hollow section whose forming is not said is the hot-finished one where both are made.
+ */
 export function findSection(designation: string): CatalogueEntry | undefined {
-  return byKey.get(designationKey(designation));
+  const key = designationKey(designation);
+  return byKey.get(key) ?? byKey.get(HOT + key) ?? byKey.get(COLD + key);
 }
 
-/** Up to three designations that look most like one that is not in the catalogue. */
+/**
+ * Whether a hollow section's forming follows from its designation: said there, or the size is made
+ * in one way only. True of all that is not hollow.
+ */
+export function formingIsSaid(designation: string): boolean {
+  const key = designationKey(designation);
+  return formingIn(designation) !== undefined || !(byKey.has(HOT + key) && byKey.has(COLD + key));
+}
+
+/** "CF SHS" of "CF SHS 150x150x8". */
+const familyIn = (key: string): string => key.slice(0, key.lastIndexOf(' '));
+
+const keysOfFamily = new Map<string, Map<string, CatalogueEntry>>();
+for (const entry of catalogue) {
+  const key = designationKey(entry.designation);
+  const keys = keysOfFamily.get(familyIn(key)) ?? new Map<string, CatalogueEntry>();
+  keysOfFamily.set(familyIn(key), keys.set(key, entry));
+}
+
+/**
+ * Up to three designations that look most like one that is not in the catalogue: of its family
+ * where there is such a family.
+ */
 export function similarSections(designation: string): string[] {
-  return nearest(designationKey(designation), [...byKey.keys()], 3).map(
-    (key) => byKey.get(key)?.designation ?? key,
+  const key = designationKey(designation).replace(HOT, '');
+  const family = keysOfFamily.get(familyIn(key));
+  const candidates = family ?? new Map([...keysOfFamily.values()].flatMap((keys) => [...keys]));
+  return nearest(key, [...candidates.keys()], 3).map(
+    (found) => candidates.get(found)?.designation ?? found,
   );
 }

@@ -19,6 +19,7 @@ import { channelProperties } from './shapes/channel';
 import { chsProperties, rhsProperties } from './shapes/hollow';
 import type { IShape, SectionShape } from './shapes/shape';
 import { rectangleProperties, roundProperties } from './shapes/solid';
+import { taperedChannelProperties, taperedIProperties } from './shapes/tapered';
 
 export type { SectionProperties } from './properties.types';
 
@@ -32,9 +33,15 @@ export function propertiesOf(
 ): SectionProperties {
   switch (section.shape) {
     case 'I':
-      return iProperties(section, section.family, sheet);
+      return section.taper
+        ? symmetrical(taperedIProperties(section, section.taper, sheet))
+        : iProperties(section, section.family, sheet);
     case 'channel':
-      return symmetrical(channelProperties(section, sheet));
+      return symmetrical(
+        section.taper
+          ? taperedChannelProperties(section, section.taper, sheet)
+          : channelProperties(section, sheet),
+      );
     case 'RHS':
       return symmetrical(rhsProperties(section, sheet));
     case 'CHS':
@@ -79,8 +86,7 @@ function iProperties(section: IShape, family: string | undefined, sheet: Sheet):
 
 function torsionConstant(section: IShape, uk: boolean, sheet: Sheet): number {
   const { h, b, t_w, t_f, r, fabrication } = section;
-  if (fabrication === 'welded')
-    return sheet.evaluate(torsionConstantOfPlates, { h, b, t_w, t_f });
+  if (fabrication === 'welded') return sheet.evaluate(torsionConstantOfPlates, { h, b, t_w, t_f });
   const formula = uk ? torsionConstantByJunctions : torsionConstantOfMills;
   return sheet.evaluate(formula, { h, b, t_w, t_f, r });
 }

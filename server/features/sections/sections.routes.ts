@@ -4,7 +4,7 @@ import { pageOf, readPage } from '../../middleware/page';
 import { Problem } from '../../middleware/problem';
 import type { Route } from '../../middleware/route';
 import { toSection } from './section';
-import { families, searchSections } from './section-search';
+import { families, searchSections, shapes } from './section-search';
 
 const shared = {
   method: 'get',
@@ -23,9 +23,15 @@ export const sectionRoutes = (): Route[] => [
   {
     ...shared,
     path: '/v1/sections',
-    query: { search: 'text', family: families, pageSize: 'text', pageToken: 'text' },
+    query: {
+      search: 'text',
+      family: families,
+      shape: shapes,
+      pageSize: 'text',
+      pageToken: 'text',
+    },
     handler: ({ request, query }) => {
-      const found = searchSections((query.search ?? '').slice(0, 60), query.family);
+      const found = searchSections((query.search ?? '').slice(0, 60), query);
       const place = (mark: string): number =>
         found.findIndex(({ designation }) => designation === mark);
       const { size, after } = readPage(query, (mark) => place(mark) >= 0);

@@ -30,6 +30,8 @@ export interface ChannelShape {
 export interface FlangeTaper {
   /** Rise of the inner face over its run, such as 0.14. */
   readonly slope: number;
+  /** Distance in mm from the toe to where the flange is t_f thick. */
+  readonly at: number;
   /** Radius of the toe in mm. */
   readonly r_2: number;
 }
@@ -75,13 +77,7 @@ export interface RoundShape {
 
 /** A cross-section by its dimensions in mm. A square hollow section is an RHS with h = b. */
 export type SectionShape =
-  | IShape
-  | ChannelShape
-  | RhsShape
-  | ChsShape
-  | AngleShape
-  | RectangleShape
-  | RoundShape;
+  IShape | ChannelShape | RhsShape | ChsShape | AngleShape | RectangleShape | RoundShape;
 
 export type ShapeName = SectionShape['shape'];
 export type ShapeOf<N extends ShapeName> = Extract<SectionShape, { readonly shape: N }>;
