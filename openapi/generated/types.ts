@@ -269,7 +269,7 @@ export interface paths {
         };
         /**
          * List the sections
-         * @description Those that begin as searched, in any spelling, then those that hold it. An answer that has not changed is a 304 and counts against no limit.
+         * @description Those that begin as searched, in any spelling, then those that hold it. A family's name is the trade's: `RHS`, `SHS` and `CHS` are hot-finished, `CF RHS`, `CF SHS` and `CF CHS` cold-formed. An answer that has not changed is a 304 and counts against no limit.
          */
         readonly get: operations["listSections"];
         readonly put?: never;
@@ -2538,22 +2538,56 @@ export interface components {
                 readonly [key: string]: unknown;
             };
         };
-        /** Dimensions of a section */
+        /**
+         * Shape of a section of the catalogue
+         * @description A square hollow section is an `RHS` whose `h` and `b` are one.
+         * @enum {string}
+         */
+        readonly CatalogueShape: "I" | "channel" | "angle" | "RHS" | "CHS" | "rectangle" | "round";
+        /**
+         * Taper of the flanges
+         * @description Of sections whose flanges thin towards their toes, UPN and IPN.
+         */
+        readonly FlangeTaper: {
+            /** @description Rise of the inner face over its run. */
+            readonly slope: components["schemas"]["Quantity"];
+            /** @description Distance from the toe to where the flange is `tf` thick. */
+            readonly at: components["schemas"]["Quantity"];
+            /** @description Radius of the toe. */
+            readonly r2: components["schemas"]["Quantity"];
+        };
+        /**
+         * Dimensions of a section
+         * @description Those of its shape, named as a request names them: I and channel `h b tw tf r`, RHS `h b t ro ri`, CHS `d t`, angle `h b t r1 r2`, rectangle `b h`, round `d`.
+         */
         readonly SectionDimensions: {
-            /** @description Depth. */
-            readonly h: components["schemas"]["Quantity"];
-            /** @description Width. */
-            readonly b: components["schemas"]["Quantity"];
+            /** @description Depth, along z-z; the longer leg of an angle. */
+            readonly h?: components["schemas"]["Quantity"];
+            /** @description Width, along y-y; the shorter leg of an angle. */
+            readonly b?: components["schemas"]["Quantity"];
+            /** @description Diameter. */
+            readonly d?: components["schemas"]["Quantity"];
             /** @description Thickness of the web. */
-            readonly tw: components["schemas"]["Quantity"];
-            /** @description Thickness of the flange. */
-            readonly tf: components["schemas"]["Quantity"];
+            readonly tw?: components["schemas"]["Quantity"];
+            /** @description Thickness of the flange, of a tapered one at `taper.at`. */
+            readonly tf?: components["schemas"]["Quantity"];
+            /** @description Thickness of the wall or of the legs. */
+            readonly t?: components["schemas"]["Quantity"];
             /** @description Radius of the root. */
-            readonly r: components["schemas"]["Quantity"];
+            readonly r?: components["schemas"]["Quantity"];
+            /** @description Radius of the root of an angle. */
+            readonly r1?: components["schemas"]["Quantity"];
+            /** @description Radius of the toes of an angle. */
+            readonly r2?: components["schemas"]["Quantity"];
+            /** @description Outer radius of the corners. */
+            readonly ro?: components["schemas"]["Quantity"];
+            /** @description Inner radius of the corners. */
+            readonly ri?: components["schemas"]["Quantity"];
+            readonly taper?: components["schemas"]["FlangeTaper"];
         };
         /**
          * Properties of a section
-         * @description Computed from the dimensions, of one member, gross.
+         * @description Computed from the dimensions, of one member, gross. y-y and z-z are parallel to the flanges and to the web or the legs; of an angle the principal axes u-u and v-v are given too. What has no meaning for a shape is left out.
          */
         readonly SectionPropertyValues: {
             /** @description Area. */
@@ -2566,28 +2600,57 @@ export interface components {
             readonly Wely: components["schemas"]["Quantity"];
             /** @description Elastic modulus about z-z. */
             readonly Welz: components["schemas"]["Quantity"];
-            /** @description Plastic modulus about y-y. */
-            readonly Wply: components["schemas"]["Quantity"];
-            /** @description Plastic modulus about z-z. */
-            readonly Wplz: components["schemas"]["Quantity"];
+            /** @description Plastic modulus about y-y; not of angles. */
+            readonly Wply?: components["schemas"]["Quantity"];
+            /** @description Plastic modulus about z-z; not of angles. */
+            readonly Wplz?: components["schemas"]["Quantity"];
             /** @description Radius of gyration about y-y. */
             readonly iy: components["schemas"]["Quantity"];
             /** @description Radius of gyration about z-z. */
             readonly iz: components["schemas"]["Quantity"];
             /** @description St Venant torsion constant. */
             readonly It: components["schemas"]["Quantity"];
-            /** @description Warping constant. */
-            readonly Iw: components["schemas"]["Quantity"];
+            /** @description Warping constant; of I sections and channels. */
+            readonly Iw?: components["schemas"]["Quantity"];
+            /** @description Torsion modulus; of hollow sections. */
+            readonly Wt?: components["schemas"]["Quantity"];
+            /** @description Centroid from the back of the web of a channel or of the upright leg of an angle. */
+            readonly yc?: components["schemas"]["Quantity"];
+            /** @description Centroid from the back of the lying leg of an angle. */
+            readonly zc?: components["schemas"]["Quantity"];
+            /** @description Shear centre of a channel from the web's centre line, on the side without flanges. */
+            readonly e0?: components["schemas"]["Quantity"];
+            /** @description Shear centre from the centroid along y-y, towards the web or the upright leg. */
+            readonly y0?: components["schemas"]["Quantity"];
+            /** @description Shear centre from the centroid along z-z, towards the lying leg. */
+            readonly z0?: components["schemas"]["Quantity"];
+            /** @description Product of area of an angle, toes towards positive y and z. */
+            readonly Iyz?: components["schemas"]["Quantity"];
+            /** @description Greater principal second moment of area of an angle. */
+            readonly Iu?: components["schemas"]["Quantity"];
+            /** @description Lesser principal second moment of area of an angle. */
+            readonly Iv?: components["schemas"]["Quantity"];
+            /** @description Radius of gyration about u-u. */
+            readonly iu?: components["schemas"]["Quantity"];
+            /** @description Radius of gyration about v-v. */
+            readonly iv?: components["schemas"]["Quantity"];
         };
         /** A section of the catalogue */
         readonly SectionFacts: {
             /** @description As a request names it. */
             readonly designation: string;
             readonly family: string;
-            /** @enum {string} */
-            readonly shape: "I";
-            /** @enum {string} */
-            readonly fabrication: "rolled" | "welded";
+            readonly shape: components["schemas"]["CatalogueShape"];
+            /**
+             * @description Of an I section.
+             * @enum {string}
+             */
+            readonly fabrication?: "rolled" | "welded";
+            /**
+             * @description Of a hollow section. A designation that does not say it means the hot-finished one where both are made.
+             * @enum {string}
+             */
+            readonly forming?: "hot-finished" | "cold-formed";
             /** @description Where the dimensions come from. */
             readonly source: string;
             /** @description Per length, as published; `null` where none is. */
@@ -3793,6 +3856,11 @@ export interface components {
          * @example UB
          */
         readonly SectionFamily: string;
+        /**
+         * @description Only sections of this shape.
+         * @example I
+         */
+        readonly SectionShape: components["schemas"]["CatalogueShape"];
         /** @description How many to a page. */
         readonly PageSize: number;
         /** @description `nextPageToken` of the page before. Default the first page. */
@@ -4456,6 +4524,11 @@ export interface operations {
                  * @example UB
                  */
                 readonly family?: components["parameters"]["SectionFamily"];
+                /**
+                 * @description Only sections of this shape.
+                 * @example I
+                 */
+                readonly shape?: components["parameters"]["SectionShape"];
                 /** @description How many to a page. */
                 readonly pageSize?: components["parameters"]["PageSize"];
                 /** @description `nextPageToken` of the page before. Default the first page. */
