@@ -86,11 +86,11 @@ export function designationKey(text: string): string {
   return `${prefix}${family} ${numbers.join('x')}`;
 }
 
-/** The `count` candidates with the smallest edit distance, nearest first. */
+/** The `count` candidates with the smallest edit distance, nearest first, else as they came. */
 export function nearest(text: string, candidates: readonly string[], count: number): string[] {
   return candidates
     .map((candidate) => ({ candidate, distance: editDistance(text, candidate) }))
-    .sort((a, b) => a.distance - b.distance || a.candidate.localeCompare(b.candidate))
+    .sort((a, b) => a.distance - b.distance)
     .slice(0, count)
     .map(({ candidate }) => candidate);
 }

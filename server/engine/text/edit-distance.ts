@@ -6,10 +6,12 @@ export function editDistance(from: string, to: string): number {
     const next = [i];
     for (let j = 1; j <= to.length; j += 1) {
       const same = from[i - 1] === to[j - 1];
-      const steps = [(row[j] ?? 0) + 1, (next[j - 1] ?? 0) + 1, (row[j - 1] ?? 0) + (same ? 0 : 1)];
+      // Thousands of designations are compared at a time: no list is made for each letter.
+      let least = (row[j - 1] ?? 0) + (same ? 0 : 1);
+      least = Math.min(least, (row[j] ?? 0) + 1, (next[j - 1] ?? 0) + 1);
       const swapped = i > 1 && j > 1 && from[i - 1] === to[j - 2] && from[i - 2] === to[j - 1];
-      if (swapped) steps.push((before[j - 2] ?? 0) + 1);
-      next.push(Math.min(...steps));
+      if (swapped) least = Math.min(least, (before[j - 2] ?? 0) + 1);
+      next.push(least);
     }
     before = row;
     row = next;
