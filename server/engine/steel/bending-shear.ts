@@ -4,15 +4,16 @@ const SHEAR_REDUCTION = 'EN 1993-1-1 6.2.8(3)';
 
 /**
  * Valid for V_Ed above half of V_pl_Rd; below that no reduction is due (6.2.8(2)). Beyond V_pl_Rd,
- * where shear fails by itself, nothing is left of the shear area.
+ * where shear fails by itself, nothing is left of the shear area. With torsion V_pl_T_Rd stands in
+ * its place (6.2.8(4)).
  */
 export const shearReduction = formula({
   symbol: 'rho',
   title: 'Reduction of yield by shear',
   unit: '1',
-  clause: SHEAR_REDUCTION,
-  expression: 'min((2 * V_z_Ed / V_pl_z_Rd - 1)^2, 1)',
-  where: { V_z_Ed: 'kN', V_pl_z_Rd: 'kN' },
+  clause: `${SHEAR_REDUCTION} and (4)`,
+  expression: 'min((2 * V_Ed / V_pl_Rd - 1)^2, 1)',
+  where: { V_Ed: 'kN', V_pl_Rd: 'kN' },
 });
 
 export const webArea = formula({
@@ -24,6 +25,8 @@ export const webArea = formula({
   where: { h_w: 'mm', t_w: 'mm' },
 });
 
+const strength = { rho: '1', f_y: 'N/mm^2', gamma_M0: '1' } as const;
+
 /** Never above M_c_y_Rd, nor below nothing where shear alone exhausts the web. */
 export const plasticBendingWithShear = formula({
   symbol: 'M_V_y_Rd',
@@ -32,15 +35,7 @@ export const plasticBendingWithShear = formula({
   clause: 'EN 1993-1-1 6.2.8(5) (6.30)',
   expression:
     'max(min((W_pl_y - rho * A_w^2 / (4 * t_w)) * f_y / gamma_M0, M_c_y_Rd), 0 * M_c_y_Rd)',
-  where: {
-    W_pl_y: 'mm^3',
-    rho: '1',
-    A_w: 'mm^2',
-    t_w: 'mm',
-    f_y: 'N/mm^2',
-    gamma_M0: '1',
-    M_c_y_Rd: 'kN m',
-  },
+  where: { ...strength, W_pl_y: 'mm^3', A_w: 'mm^2', t_w: 'mm', M_c_y_Rd: 'kN m' },
 });
 
 /** Elastic sections: first yield at the web's edge, where the reduced strength holds. */
@@ -50,21 +45,51 @@ export const elasticBendingWithShear = formula({
   unit: 'kN m',
   clause: SHEAR_REDUCTION,
   expression: 'max(min(W_el_y, (1 - rho) * 2 * I_y / h_w), 0 * W_el_y) * f_y / gamma_M0',
-  where: {
-    W_el_y: 'mm^3',
-    rho: '1',
-    I_y: 'mm^4',
-    h_w: 'mm',
-    f_y: 'N/mm^2',
-    gamma_M0: '1',
-  },
+  where: { ...strength, W_el_y: 'mm^3', I_y: 'mm^4', h_w: 'mm' },
 });
 
-export const bendingShearCriterion = formula({
+/** Walls of a hollow section whose shear area A_v stands in two plates of thickness t. */
+function hollowWithShear(axis: 'y' | 'z') {
+  return formula({
+    symbol: `M_V_${axis}_Rd`,
+    title: `Bending resistance about ${axis}-${axis} reduced by shear`,
+    unit: 'kN m',
+    clause: SHEAR_REDUCTION,
+    expression: 'max(W_pl - rho * A_v^2 / (8 * t), 0 * W_pl) * f_y / gamma_M0',
+    where: { ...strength, W_pl: 'mm^3', A_v: 'mm^2', t: 'mm' },
+  });
+}
+
+export const hollowBendingWithShear = { y: hollowWithShear('y'), z: hollowWithShear('z') };
+
+/** The whole section at the reduced strength, where its shear area is not told apart: the safe end. */
+function wholeWithShear(axis: 'y' | 'z') {
+  return formula({
+    symbol: `M_V_${axis}_Rd`,
+    title: `Bending resistance about ${axis}-${axis} reduced by shear`,
+    unit: 'kN m',
+    clause: SHEAR_REDUCTION,
+    expression: '(1 - rho) * M_c_Rd',
+    where: { rho: '1', M_c_Rd: 'kN m' },
+  });
+}
+
+export const wholeBendingWithShear = { y: wholeWithShear('y'), z: wholeWithShear('z') };
+
+export const bendingShearYCriterion = formula({
   symbol: 'utilisation',
   title: 'Bending about y-y with shear',
   unit: '1',
-  clause: 'EN 1993-1-1 6.2.8(3)',
+  clause: SHEAR_REDUCTION,
   expression: 'M_y_Ed / M_V_y_Rd',
   where: { M_y_Ed: 'kN m', M_V_y_Rd: 'kN m' },
+});
+
+export const bendingShearZCriterion = formula({
+  symbol: 'utilisation',
+  title: 'Bending about z-z with shear',
+  unit: '1',
+  clause: SHEAR_REDUCTION,
+  expression: 'M_z_Ed / M_V_z_Rd',
+  where: { M_z_Ed: 'kN m', M_V_z_Rd: 'kN m' },
 });

@@ -1,6 +1,7 @@
 import { formula } from '../formula/formula';
 
 const CLAUSE_PLASTIC = 'EN 1993-1-1 6.2.5(2) (6.13)';
+const CLAUSE_EFFECTIVE = 'EN 1993-1-1 6.2.5(2) (6.15)';
 const CLAUSE_ELASTIC = 'EN 1993-1-1 6.2.5(2) (6.14)';
 
 export const plasticBendingY = formula({
@@ -37,6 +38,24 @@ export const elasticBendingZ = formula({
   clause: CLAUSE_ELASTIC,
   expression: 'W_el_z * f_y / gamma_M0',
   where: { W_el_z: 'mm^3', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+export const effectiveBendingY = formula({
+  symbol: 'M_c_y_Rd',
+  title: 'Bending resistance about y-y of the effective section',
+  unit: 'kN m',
+  clause: CLAUSE_EFFECTIVE,
+  expression: 'W_eff_y * f_y / gamma_M0',
+  where: { W_eff_y: 'mm^3', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+export const effectiveBendingZ = formula({
+  symbol: 'M_c_z_Rd',
+  title: 'Bending resistance about z-z of the effective section',
+  unit: 'kN m',
+  clause: CLAUSE_EFFECTIVE,
+  expression: 'W_eff_z * f_y / gamma_M0',
+  where: { W_eff_z: 'mm^3', f_y: 'N/mm^2', gamma_M0: '1' },
 });
 
 export const bendingYCriterion = formula({

@@ -1,11 +1,11 @@
 import type { AdvisoryAnswer, WalerRequest } from '../contract';
 import type { SolvedCase } from '../continuous/solve';
-import type { SteelISection } from '../steel-i/section';
+import type { SteelSection } from '../steel/section';
 
 /** What a competent reader of the answer will want to know. */
 export function advisoriesOf(
   request: WalerRequest,
-  section: SteelISection,
+  section: SteelSection,
   cases: readonly SolvedCase[],
 ): AdvisoryAnswer[] {
   const list: AdvisoryAnswer[] = [];

@@ -5,7 +5,7 @@ import { valuesAt } from '../../analysis/values-at';
 import { readQuantity } from '../../units/quantity';
 import type { WalerRequest } from '../contract';
 import { memberEnds, type SupportLayout } from '../continuous/geometry';
-import type { SteelISection } from '../steel-i/section';
+import type { SteelSection } from '../steel/section';
 
 /** Bending about z-z and shear along the flanges, N mm and N, for one member. */
 export interface SideEffect {
@@ -30,7 +30,7 @@ const none: OwnWeight = { at: () => ({ M_z: 0, V_y: 0 }), places: [] };
 export function ownWeight(
   request: Pick<WalerRequest, 'selfWeight' | 'verticalSupports'>,
   layout: SupportLayout,
-  section: SteelISection,
+  section: SteelSection,
 ): OwnWeight {
   if (request.selfWeight === false) return none;
   const { weight } = section;
@@ -46,7 +46,7 @@ export function ownWeight(
   return betweenProps(layout, section);
 }
 
-function betweenProps(layout: SupportLayout, section: SteelISection): OwnWeight {
+function betweenProps(layout: SupportLayout, section: SteelSection): OwnWeight {
   const { weight, E, properties } = section;
   const ends = memberEnds(layout);
   const load = {

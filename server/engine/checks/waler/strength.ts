@@ -1,21 +1,16 @@
 import { WorkingSheet, silentSheet, type Sheet } from '../../formula/sheet';
 import { bendingYCriterion, bendingZCriterion } from '../../steel/bending';
-import { bendingShearCriterion } from '../../steel/bending-shear';
-import { elasticBiaxialCriterion, plasticBiaxialCriterion } from '../../steel/biaxial';
+import { bendingShearYCriterion } from '../../steel/bending-shear';
+import { biaxialCriterion, elasticBiaxialCriterion } from '../../steel/biaxial';
 import { shearYCriterion, shearZCriterion } from '../../steel/shear';
 import type { UnitName } from '../../units/units';
 import type { VerificationId } from '../contract';
 import { refuse } from '../refuse';
-import {
-  bendingResistanceWithShear,
-  bendingResistanceY,
-  bendingResistanceZ,
-  shearResistanceAlongFlanges,
-  shearResistanceAlongWeb,
-} from '../steel-i/resistances';
-import type { SteelISection } from '../steel-i/section';
+import { bendingResistance } from '../steel/bending';
+import { shearResistance } from '../steel/shear';
 import type { Finding } from '../verification';
 import type { CaseEffects, Effects } from './effects';
+import { bendingResistanceWithShear, type WalerSection } from './section';
 
 interface Side {
   readonly symbol: string;
@@ -43,7 +38,7 @@ interface Governing {
 
 /** Searches all places for the worst of each criterion, then writes those down. */
 export function verifyStrength(
-  section: SteelISection,
+  section: WalerSection,
   cases: readonly CaseEffects[],
   withSteps: boolean,
 ): Finding[] {
@@ -122,11 +117,11 @@ function findingOf(criterion: Criterion, effects: Effects, withSteps: boolean): 
 const kNm = (symbol: string, value: number): Side => ({ symbol, value, unit: 'kN m' });
 const kN = (symbol: string, value: number): Side => ({ symbol, value, unit: 'kN' });
 
-function criteriaOf(section: SteelISection): Criterion[] {
-  const M_c_y_Rd = bendingResistanceY(section, silentSheet);
-  const M_c_z_Rd = bendingResistanceZ(section, silentSheet);
-  const V_pl_z_Rd = shearResistanceAlongWeb(section, silentSheet);
-  const V_pl_y_Rd = shearResistanceAlongFlanges(section, silentSheet);
+function criteriaOf(section: WalerSection): Criterion[] {
+  const M_c_y_Rd = bendingResistance(section, 'y', section.sectionClass, silentSheet);
+  const M_c_z_Rd = bendingResistance(section, 'z', section.sectionClass, silentSheet);
+  const V_pl_z_Rd = shearResistance(section, 'z', silentSheet);
+  const V_pl_y_Rd = shearResistance(section, 'y', silentSheet);
   const reduced = (V_z: number): number =>
     V_z > 0.5 * V_pl_z_Rd ? bendingResistanceWithShear(section, V_z, silentSheet) : M_c_y_Rd;
   return [
@@ -137,7 +132,7 @@ function criteriaOf(section: SteelISection): Criterion[] {
       utilisation: ({ M_y }) => M_y / M_c_y_Rd,
       write: ({ M_y }, sheet) => {
         const M_y_Ed = sheet.given('M_y_Ed', M_y, 'kN m', 'Design moment about y-y', 'Analysis');
-        const resistance = bendingResistanceY(section, sheet);
+        const resistance = bendingResistance(section, 'y', section.sectionClass, sheet);
         sheet.evaluate(bendingYCriterion, { M_y_Ed, M_c_y_Rd: resistance });
         return { effect: kNm('M_y_Ed', M_y), resistance: kNm('M_c_y_Rd', resistance) };
       },
@@ -155,7 +150,7 @@ function criteriaOf(section: SteelISection): Criterion[] {
           'Design shear force along the web',
           'Analysis',
         );
-        const resistance = shearResistanceAlongWeb(section, sheet);
+        const resistance = shearResistance(section, 'z', sheet);
         sheet.evaluate(shearZCriterion, { V_z_Ed, V_pl_z_Rd: resistance });
         return { effect: kN('V_z_Ed', V_z), resistance: kN('V_pl_z_Rd', resistance) };
       },
@@ -163,15 +158,15 @@ function criteriaOf(section: SteelISection): Criterion[] {
     {
       id: 'bending-shear-y',
       mayPeakBetween: true,
-      title: bendingShearCriterion.title,
-      clause: bendingShearCriterion.clause,
+      title: bendingShearYCriterion.title,
+      clause: bendingShearYCriterion.clause,
       utilisation: ({ M_y, V_z }) =>
         V_z > 0.5 * V_pl_z_Rd && M_y > 0 ? M_y / reduced(V_z) : undefined,
       write: ({ M_y, V_z }, sheet) => {
         const M_y_Ed = sheet.given('M_y_Ed', M_y, 'kN m', 'Design moment about y-y', 'Analysis');
         sheet.given('V_z_Ed', V_z, 'kN', 'Design shear force at the same place', 'Analysis');
         const M_V_y_Rd = bendingResistanceWithShear(section, V_z, sheet);
-        if (M_V_y_Rd > 0) sheet.evaluate(bendingShearCriterion, { M_y_Ed, M_V_y_Rd });
+        if (M_V_y_Rd > 0) sheet.evaluate(bendingShearYCriterion, { M_y_Ed, M_V_y_Rd });
         return { effect: kNm('M_y_Ed', M_y), resistance: kNm('M_V_y_Rd', M_V_y_Rd) };
       },
     },
@@ -188,7 +183,7 @@ function criteriaOf(section: SteelISection): Criterion[] {
           'Design moment about z-z from own weight',
           'Analysis',
         );
-        const resistance = bendingResistanceZ(section, sheet);
+        const resistance = bendingResistance(section, 'z', section.sectionClass, sheet);
         sheet.evaluate(bendingZCriterion, { M_z_Ed, M_c_z_Rd: resistance });
         return { effect: kNm('M_z_Ed', M_z), resistance: kNm('M_c_z_Rd', resistance) };
       },
@@ -209,7 +204,7 @@ function criteriaOf(section: SteelISection): Criterion[] {
           'Design shear force along the flanges',
           'Analysis',
         );
-        const resistance = shearResistanceAlongFlanges(section, sheet);
+        const resistance = shearResistance(section, 'y', sheet);
         sheet.evaluate(shearYCriterion, { V_y_Ed, V_pl_y_Rd: resistance });
         return { effect: kN('V_y_Ed', V_y), resistance: kN('V_pl_y_Rd', resistance) };
       },
@@ -218,23 +213,45 @@ function criteriaOf(section: SteelISection): Criterion[] {
   ];
 }
 
+interface Moments {
+  readonly M_y_Ed: number;
+  readonly M_y_Rd: number;
+  readonly M_z_Ed: number;
+  readonly M_z_Rd: number;
+}
+
 /** Bending about both axes; shear along the web reduces the resistance about y-y. */
 function biaxial(
-  section: SteelISection,
+  section: WalerSection,
   reduced: (V_z: number) => number,
   M_c_z_Rd: number,
 ): Criterion {
-  const criterion = section.sectionClass <= 2 ? plasticBiaxialCriterion : elasticBiaxialCriterion;
+  const plastic = section.sectionClass <= 2;
+  const { title, clause } = plastic ? biaxialCriterion : elasticBiaxialCriterion;
+  // Without axial force n is 0, so that alpha is 2 and beta, 5 n but not below 1, is 1.
+  const sumOf = (moments: Moments, sheet: Sheet): number => {
+    const { M_y_Ed, M_y_Rd, M_z_Ed, M_z_Rd } = moments;
+    return plastic
+      ? sheet.evaluate(biaxialCriterion, {
+          M_y_Ed,
+          M_N_y_Rd: M_y_Rd,
+          M_z_Ed,
+          M_N_z_Rd: M_z_Rd,
+          alpha: 2,
+          beta: 1,
+        })
+      : sheet.evaluate(elasticBiaxialCriterion, moments);
+  };
   return {
     id: 'biaxial',
     mayPeakBetween: true,
-    title: criterion.title,
-    clause: criterion.clause,
+    title,
+    clause,
     utilisation: ({ M_y, V_z, M_z }) => {
       if (!(M_z > 0)) return undefined;
       const M_y_Rd = reduced(V_z);
       if (M_y_Rd === 0) return M_y === 0 ? M_z / M_c_z_Rd : Infinity;
-      return criterion.compute({ M_y_Ed: M_y, M_y_Rd, M_z_Ed: M_z, M_z_Rd: M_c_z_Rd });
+      return sumOf({ M_y_Ed: M_y, M_y_Rd, M_z_Ed: M_z, M_z_Rd: M_c_z_Rd }, silentSheet);
     },
     write: ({ M_y, V_z, M_z }, sheet) => {
       const M_y_Ed = sheet.given('M_y_Ed', M_y, 'kN m', 'Design moment about y-y', 'Analysis');
@@ -247,9 +264,9 @@ function biaxial(
         'Analysis',
       );
       const M_y_Rd = bendingResistanceWithShear(section, V_z, sheet);
-      const M_z_Rd = bendingResistanceZ(section, sheet);
+      const M_z_Rd = bendingResistance(section, 'z', section.sectionClass, sheet);
       const one: Side = { symbol: 'limit', value: M_y_Rd > 0 ? 1 : 0, unit: '1' };
-      const sum = M_y_Rd > 0 ? sheet.evaluate(criterion, { M_y_Ed, M_y_Rd, M_z_Ed, M_z_Rd }) : 1;
+      const sum = M_y_Rd > 0 ? sumOf({ M_y_Ed, M_y_Rd, M_z_Ed, M_z_Rd }, sheet) : 1;
       return { effect: { symbol: 'utilisation', value: sum, unit: '1' }, resistance: one };
     },
   };

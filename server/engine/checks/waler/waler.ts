@@ -11,8 +11,6 @@ import { readLoadSets } from '../continuous/load-sets';
 import { reactionsOf } from '../continuous/reactions';
 import { solveCases } from '../continuous/solve';
 import { notCovered } from '../refuse';
-import { refuseSlenderWeb } from '../steel-i/resistances';
-import { readSteelISection } from '../steel-i/section';
 import { verificationAnswer, type Finding } from '../verification';
 import { advisoriesOf } from './advisories';
 import { limitsOf, verifyDeflections } from './deflection';
@@ -20,6 +18,7 @@ import { strengthEffects } from './effects';
 import { mechanismOf } from './mechanism';
 import { missingOf, readWaivers } from './owed';
 import { ownWeight } from './own-weight';
+import { readWalerSection } from './section';
 import { verifyStrength } from './strength';
 
 const NOT_COVERED = [
@@ -38,8 +37,7 @@ function run(request: WalerRequest, { profile: revision, detail }: CheckContext)
   const common = new WorkingSheet(null, withSteps);
   const waived = readWaivers(request.waive);
   const layout = readLayout(request);
-  const section = readSteelISection(request.section, request.material, profile, common);
-  refuseSlenderWeb(section, common);
+  const section = readWalerSection(request.section, request.material, profile, common);
   const weighs = request.selfWeight !== false;
   const own = { name: SELF_WEIGHT, nature: 'permanent', neverFavourable: true } as const;
   const sets = readLoadSets(request, layout, profile, weighs ? [own] : []);

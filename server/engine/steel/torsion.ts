@@ -1,0 +1,170 @@
+import { formula } from '../formula/formula';
+
+const STRESS = 'EN 1993-1-1 6.2.7(4)';
+const REDUCED = 'EN 1993-1-1 6.2.7(9)';
+
+/** From the torsion modulus of a closed or solid section, W_t. */
+export const torsionResistance = formula({
+  symbol: 'T_t_Rd',
+  title: 'Torsion resistance, St Venant',
+  unit: 'kN m',
+  clause: 'EN 1993-1-1 6.2.7(1)',
+  expression: 'W_t * f_y / (sqrt(3) * gamma_M0)',
+  where: { W_t: 'mm^3', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+export const openTorsionModulus = formula({
+  symbol: 'W_t',
+  title: 'Torsion modulus at the thickest part of an open section',
+  unit: 'mm^3',
+  clause: 'Thin-walled torsion, I_t over the greatest thickness',
+  expression: 'I_t / t_max',
+  where: { I_t: 'mm^4', t_max: 'mm' },
+});
+
+export const torsionCriterion = formula({
+  symbol: 'utilisation',
+  title: 'Torsion',
+  unit: '1',
+  clause: 'EN 1993-1-1 6.2.7(1) (6.23)',
+  expression: 'T_t_Ed / T_t_Rd',
+  where: { T_t_Ed: 'kN m', T_t_Rd: 'kN m' },
+});
+
+/** Both parts shear the same flange. */
+export const mixedTorsionCriterion = formula({
+  symbol: 'utilisation',
+  title: 'St Venant and warping torsion, shear stress at the flange',
+  unit: '1',
+  clause: 'EN 1993-1-1 6.2.7(2) and (5)',
+  expression: 'T_t_Ed / T_t_Rd + tau_w_Ed * sqrt(3) * gamma_M0 / f_y',
+  where: {
+    T_t_Ed: 'kN m',
+    T_t_Rd: 'kN m',
+    tau_w_Ed: 'N/mm^2',
+    gamma_M0: '1',
+    f_y: 'N/mm^2',
+  },
+});
+
+export const torsionStress = formula({
+  symbol: 'tau_t_Ed',
+  title: 'Shear stress from St Venant torsion',
+  unit: 'N/mm^2',
+  clause: STRESS,
+  expression: 'T_t_Ed / W_t',
+  where: { T_t_Ed: 'kN m', W_t: 'mm^3' },
+});
+
+/** The flange of an I section as a rectangle under T_w/(h - t_f). */
+export const warpingShearOfI = formula({
+  symbol: 'tau_w_Ed',
+  title: 'Shear stress in the flanges from warping torsion',
+  unit: 'N/mm^2',
+  clause: STRESS,
+  expression: '1.5 * T_w_Ed / ((h - t_f) * b * t_f)',
+  where: { T_w_Ed: 'kN m', h: 'mm', t_f: 'mm', b: 'mm' },
+});
+
+/** S_omega is the greatest sectorial moment of the walls over their thickness. */
+export const warpingShear = formula({
+  symbol: 'tau_w_Ed',
+  title: 'Shear stress from warping torsion',
+  unit: 'N/mm^2',
+  clause: STRESS,
+  expression: 'T_w_Ed * S_omega_t / I_w',
+  where: { T_w_Ed: 'kN m', S_omega_t: 'mm^3', I_w: 'mm^6' },
+});
+
+/** Vlasov's sectorial coordinate of an I section at the tips of its flanges. */
+export const sectorialOfI = formula({
+  symbol: 'omega_max',
+  title: 'Greatest sectorial coordinate, at the flange tips',
+  unit: 'mm^2',
+  clause: 'Vlasov, thin-walled bars',
+  expression: 'b * (h - t_f) / 4',
+  where: { b: 'mm', h: 'mm', t_f: 'mm' },
+});
+
+/** At the toes, or at the back corners where the shear centre is far from the web. */
+export const sectorialOfChannel = formula({
+  symbol: 'omega_max',
+  title: 'Greatest sectorial coordinate, at the toes or the corners',
+  unit: 'mm^2',
+  clause: 'Vlasov, thin-walled bars',
+  expression: '(h - t_f) / 2 * max(b - t_w / 2 - e_0, e_0)',
+  where: { h: 'mm', t_f: 'mm', b: 'mm', t_w: 'mm', e_0: 'mm' },
+});
+
+export const sectorialMomentOfChannel = formula({
+  symbol: 'S_omega_t',
+  title: 'Greatest sectorial moment of the flange over its thickness',
+  unit: 'mm^3',
+  clause: 'Vlasov, thin-walled bars',
+  expression: '(h - t_f) / 4 * max((b - t_w / 2 - e_0)^2, abs((b - t_w / 2) * (b - t_w / 2 - 2 * e_0)))',
+  where: { h: 'mm', t_f: 'mm', b: 'mm', t_w: 'mm', e_0: 'mm' },
+});
+
+export const warpingStress = formula({
+  symbol: 'sigma_w_Ed',
+  title: 'Stress along the member from the bimoment',
+  unit: 'N/mm^2',
+  clause: STRESS,
+  expression: 'B_Ed * omega_max / I_w',
+  where: { B_Ed: 'kN m^2', omega_max: 'mm^2', I_w: 'mm^6' },
+});
+
+export const bimomentResistance = formula({
+  symbol: 'B_Rd',
+  title: 'Bimoment that makes the tips yield',
+  unit: 'kN m^2',
+  clause: STRESS,
+  expression: 'I_w / omega_max * f_y / gamma_M0',
+  where: { I_w: 'mm^6', omega_max: 'mm^2', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+/** One for each direction of shear. */
+function reducedShear(direction: 'z' | 'y') {
+  const symbol = `V_pl_T_${direction}_Rd`;
+  const title = `Plastic shear resistance along ${direction}-${direction}, reduced by torsion`;
+  const strength = 'f_y / (sqrt(3) * gamma_M0)';
+  const where = { V_pl_Rd: 'kN', tau_t_Ed: 'N/mm^2', f_y: 'N/mm^2', gamma_M0: '1' } as const;
+  return {
+    flanged: formula({
+      symbol,
+      title,
+      unit: 'kN',
+      clause: `${REDUCED} (6.26)`,
+      expression: `sqrt(max(1 - tau_t_Ed / (1.25 * ${strength}), 0)) * V_pl_Rd`,
+      where,
+    }),
+    warped: formula({
+      symbol,
+      title,
+      unit: 'kN',
+      clause: `${REDUCED} (6.27)`,
+      expression: `max(sqrt(max(1 - tau_t_Ed / (1.25 * ${strength}), 0)) - tau_w_Ed / (${strength}), 0) * V_pl_Rd`,
+      where: { ...where, tau_w_Ed: 'N/mm^2' },
+    }),
+    hollow: formula({
+      symbol,
+      title,
+      unit: 'kN',
+      clause: `${REDUCED} (6.28)`,
+      expression: `max(1 - tau_t_Ed / (${strength}), 0) * V_pl_Rd`,
+      where,
+    }),
+  };
+}
+
+export const shearWithTorsion = { z: reducedShear('z'), y: reducedShear('y') };
+
+/** Along z-z and along y-y. */
+export const shearTorsionCriterion = formula({
+  symbol: 'utilisation',
+  title: 'Shear with torsion',
+  unit: '1',
+  clause: `${REDUCED} (6.25)`,
+  expression: 'V_Ed / V_pl_T_Rd',
+  where: { V_Ed: 'kN', V_pl_T_Rd: 'kN' },
+});
