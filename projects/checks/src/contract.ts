@@ -75,6 +75,9 @@ export interface MathElement {
   readonly attributes?: Readonly<Record<string, string>>;
 }
 
+/** A shape that the catalogue knows. */
+export type CatalogueShape = Schemas['CatalogueShape'];
+
 /** A length or a mass of the catalogue. */
 interface SectionFact {
   readonly value: number;
@@ -85,6 +88,8 @@ export interface SectionLine {
   readonly designation: string;
   readonly family?: string;
   readonly shape?: string;
+  /** Of a hollow section. */
+  readonly forming?: string;
   readonly mass?: SectionFact | null;
   readonly dimensions?: Readonly<Record<string, SectionFact>>;
 }

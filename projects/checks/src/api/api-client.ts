@@ -1,5 +1,12 @@
 import { InjectionToken } from '@angular/core';
-import type { CheckAnswer, CheckId, Formula, ProfileSummary, SectionLine } from '../contract';
+import type {
+  CatalogueShape,
+  CheckAnswer,
+  CheckId,
+  Formula,
+  ProfileSummary,
+  SectionLine,
+} from '../contract';
 import { ApiError, awayError, errorOf, secretKeyError } from './api-error';
 
 /** How a page shows who it is: a page key in a header, or the console's own signed-in session. */
@@ -72,9 +79,14 @@ export class ApiClient {
     return asked;
   }
 
-  /** Sections of the catalogue whose designation fits a text in any spelling. */
-  async sections(search: string, signal?: AbortSignal): Promise<readonly SectionLine[]> {
-    const query = new URLSearchParams({ search, pageSize: '20' }).toString();
+  /** Sections of the catalogue whose designation fits a text in any spelling, of one shape or all. */
+  async sections(
+    search: string,
+    shape?: CatalogueShape,
+    signal?: AbortSignal,
+  ): Promise<readonly SectionLine[]> {
+    const narrowed = shape === undefined ? {} : { shape };
+    const query = new URLSearchParams({ search, ...narrowed, pageSize: '20' }).toString();
     const { items } = await this.call<Page<SectionLine>>(`/v1/sections?${query}`, signal);
     return items;
   }

@@ -8,12 +8,15 @@ const lines = ['UC 254x254x73', 'UC 254x254x89'].map((designation) => ({
   dimensions: { h: { value: 260.3 }, b: { value: 256.3 } },
 }));
 
+const upn = { dimensions: { h: { value: 200 }, b: { value: 75 } } };
+
 describe('the section picker', () => {
   beforeEach(() => jest.useFakeTimers());
   afterEach(() => jest.useRealTimers());
 
-  function picker(sections: jest.Mock) {
+  function picker(sections: jest.Mock, shapes: readonly string[] = []) {
     const fixture = TestBed.createComponent(SectionPicker);
+    fixture.componentRef.setInput('shapes', shapes);
     fixture.componentRef.setInput('client', { sections });
     const pending: boolean[] = [];
     fixture.componentInstance.pending.subscribe((now) => pending.push(now));
@@ -45,6 +48,34 @@ describe('the section picker', () => {
     key('Enter');
     expect(text()).toBe('UC 254x254x89');
     expect(harness.options).toEqual([]);
+  });
+
+  it('asks for the shapes that it is to offer, and for no others', async () => {
+    const sections = jest.fn().mockResolvedValue(lines);
+    await picker(sections, ['I']).type('uc254');
+    expect(sections.mock.calls).toEqual([['uc254', 'I']]);
+  });
+
+  it('says of a section what its name does not', async () => {
+    const found = [
+      {
+        designation: 'SHS 150x150x8',
+        shape: 'RHS',
+        forming: 'hot-finished',
+        mass: { value: 35.1 },
+      },
+      { designation: 'UPN 200', shape: 'channel', mass: { value: 25.3 }, ...upn },
+      { designation: 'L 150x100x12', shape: 'angle', mass: { value: 22.5 } },
+      { designation: 'timber 47x150', shape: 'rectangle', mass: null },
+    ];
+    const { harness, type } = picker(jest.fn().mockResolvedValue(found));
+    await type('150');
+    expect(harness.options).toEqual([
+      'SHS 150x150x8 35.1 kg/m, hot-finished',
+      'UPN 200 25.3 kg/m, 200 × 75',
+      'L 150x100x12 22.5 kg/m',
+      'timber 47x150',
+    ]);
   });
 
   it('says so while what is typed does not count yet', async () => {

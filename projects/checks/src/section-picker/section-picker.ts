@@ -15,7 +15,7 @@ import {
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { catchError, debounceTime, from, of, Subject, switchMap } from 'rxjs';
 import type { ApiClient } from '../api/api-client';
-import type { SectionLine } from '../contract';
+import type { CatalogueShape, SectionLine } from '../contract';
 import { FaultNote } from '../fields/fault-note';
 import type { FieldFault } from '../form/field-reader';
 import { uniqueId } from '../look/unique-id';
@@ -40,6 +40,8 @@ export class SectionPicker {
   readonly text = model('');
   /** Where the catalogue is searched. */
   readonly client = input.required<ApiClient>();
+  /** The shapes that are offered; none named, all are. */
+  readonly shapes = input<readonly CatalogueShape[]>([]);
   readonly readonly = input(false);
   readonly fault = input<FieldFault>();
 
@@ -69,7 +71,7 @@ export class SectionPicker {
         switchMap((text) =>
           text.trim() === ''
             ? of(none)
-            : from(this.client().sections(text.trim())).pipe(catchError(() => of(none))),
+            : from(this.search(text.trim())).pipe(catchError(() => of(none))),
         ),
         takeUntilDestroyed(),
       )
@@ -123,13 +125,21 @@ export class SectionPicker {
     this.searched.next('');
   }
 
-  /** "67.1 kg/m, 453.4 × 189.9": what is known of a section besides its name. */
-  protected facts({ mass, dimensions }: SectionLine): string {
-    const sizes = [dimensions?.h, dimensions?.b]
+  /** "67.1 kg/m, 453.4 × 189.9": what is known of a section that its name does not say. */
+  protected facts({ shape, forming, mass, dimensions }: SectionLine): string {
+    const named = shape !== undefined && shape !== 'I' && shape !== 'channel';
+    const sizes = (named ? [] : [dimensions?.h, dimensions?.b])
       .filter((size) => size !== undefined)
       .map(({ value }) => readable(value));
     const weight = mass ? `${readable(mass.value)} kg/m` : '';
-    return [weight, sizes.join(' × ')].filter(Boolean).join(', ');
+    return [weight, sizes.join(' × '), forming].filter(Boolean).join(', ');
+  }
+
+  private async search(text: string): Promise<readonly SectionLine[]> {
+    const shapes = this.shapes();
+    if (shapes.length === 0) return this.client().sections(text);
+    const found = await Promise.all(shapes.map((shape) => this.client().sections(text, shape)));
+    return found.flat();
   }
 
   private show(found: readonly SectionLine[] | null): void {
