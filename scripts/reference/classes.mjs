@@ -1,5 +1,4 @@
 /** Classification: EN 1993-1-1 5.5 and Table 5.2, as clauses.md has it. N in newtons. */
-import { cornerRadii } from './sections.mjs';
 
 /** @typedef {import('./outline.mjs').Axis} Axis */
 /** @typedef {import('./sections.mjs').Section} Section */
@@ -41,7 +40,7 @@ export function websOf(section, axis) {
   if (section.shape === 'RHS') {
     const { t } = section;
     const side = axis === 'y' ? section.h : section.b;
-    return { c: side - 2 * t - 2 * cornerRadii(section).inner, t, count: 2 };
+    return { c: side - 3 * t, t, count: 2 };
   }
   if (axis === 'z') return undefined;
   return { c: section.h - 2 * section.tf - 2 * section.r, t: section.tw, count: 1 };
@@ -79,7 +78,8 @@ export function classAbout(loaded, axis) {
   const classes = [];
   const outstand = outstandOf(section);
   if (outstand) classes.push(classBy(outstand.c / outstand.t / epsilon, OUTSTAND));
-  const webs = websOf(section, axis);
+  // The web of an I counts about both axes.
+  const webs = websOf(section, section.shape === 'I' ? 'y' : axis);
   if (webs) classes.push(classBy(webs.c / webs.t / epsilon, webLimits(webs, loaded)));
   const squashed = squashedBy(section, axis);
   if (squashed) classes.push(classBy(squashed.c / squashed.t / epsilon, SQUASHED));
@@ -97,14 +97,21 @@ export function worst(classes) {
   return classes.reduce((one, other) => (one > other ? one : other), 1);
 }
 
+/** Whether a flange is of class 4 where it is compressed. @param {Section} section @param {number} fy */
+export function hasSlenderFlange(section, fy) {
+  const epsilon = epsilonOf(fy);
+  const outstand = outstandOf(section);
+  if (outstand) return outstand.c / outstand.t > OUTSTAND[2] * epsilon;
+  const wall = websOf(section, 'z');
+  return wall !== undefined && wall.c / wall.t > SQUASHED[2] * epsilon;
+}
+
 /** Whether any part is of class 4 under compression alone. @param {Section} section @param {number} fy */
 export function isSlender(section, fy) {
   const epsilon = epsilonOf(fy);
   if (section.shape === 'CHS') return section.d / section.t > TUBE[2] * epsilon ** 2;
-  const outstand = outstandOf(section);
-  const walls = [websOf(section, 'y'), websOf(section, 'z')].filter((wall) => wall !== undefined);
+  const web = websOf(section, 'y');
   return (
-    (outstand !== undefined && outstand.c / outstand.t > OUTSTAND[2] * epsilon) ||
-    walls.some(({ c, t }) => c / t > SQUASHED[2] * epsilon)
+    hasSlenderFlange(section, fy) || (web !== undefined && web.c / web.t > SQUASHED[2] * epsilon)
   );
 }

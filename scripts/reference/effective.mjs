@@ -1,5 +1,5 @@
 /** Effective areas of class 4: EN 1993-1-5 4.4, as clauses.md has it. */
-import { epsilonOf, isSlender, outstandOf, websOf } from './classes.mjs';
+import { epsilonOf, hasSlenderFlange, isSlender, outstandOf, websOf } from './classes.mjs';
 import { area, centroid, hole } from './outline.mjs';
 import { elasticModulus, extents, outlineOf } from './sections.mjs';
 
@@ -41,7 +41,7 @@ function below({ y, z: [low, high] }) {
 }
 
 /** How thick what carries the flange forces is. @param {Section} section */
-function flangeThickness(section) {
+export function flangeThickness(section) {
   return 'tf' in section ? section.tf : section.t;
 }
 
@@ -65,6 +65,16 @@ function flangeCuts(section, fy) {
     { y: [b / 2 - lost, b / 2], z },
     { y: [-b / 2, lost - b / 2], z },
   ];
+}
+
+/**
+ * The area of one flange, less what buckling takes of one of class 4.
+ * @param {Exclude<Section, { shape: 'CHS' }>} section @param {number} fy
+ */
+export function flangeArea(section, fy) {
+  const gross = section.b * flangeThickness(section);
+  const cuts = hasSlenderFlange(section, fy) ? flangeCuts(section, fy) : [];
+  return cuts.reduce((left, { y, z }) => left - (y[1] - y[0]) * (z[1] - z[0]), gross);
 }
 
 /** A height taken from every web. @param {Section} section @param {Interval} z @returns {Cut[]} */

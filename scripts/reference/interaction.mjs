@@ -1,14 +1,17 @@
 /**
- * Bending with axial force: EN 1993-1-1 6.2.9 and 6.2.10, as clauses.md has them. N and mm.
+ * Bending with axial force: EN 1993-1-1 6.2.9 and 6.2.10, and with the shear of webs that buckle:
+ * EN 1993-1-5 7.1, as clauses.md has them. N and mm.
  */
-import { isSlender } from './classes.mjs';
-import { effectiveArea } from './effective.mjs';
+import { isSlender, worst } from './classes.mjs';
+import { effectiveArea, flangeArea, flangeThickness } from './effective.mjs';
 import {
   bendingResistance,
+  bucklingShear,
   compressionResistance,
   shearAreas,
   shearWith,
   webHeight,
+  websAlong,
 } from './resistances.mjs';
 
 /** @typedef {import('./outline.mjs').Axis} Axis */
@@ -21,11 +24,16 @@ import {
  * @typedef {object} Together
  * @property {Member} member
  * @property {SectionClass} of the class of the section
+ * @property {Record<Axis, SectionClass>} classes about each axis
  * @property {ByDirection} rho
  * @property {number} axial
  * @property {boolean} compressed
  * @property {Record<Axis, number>} moments
+ * @property {ByDirection} shear
  */
+
+/** @type {readonly Axis[]} */
+const AXES = ['y', 'z'];
 
 /** Whether 6.2.9.1 has a formula for the section; the others take linear sums. @param {Together} together */
 export function isPlastic({ member, of }) {
@@ -35,11 +43,13 @@ export function isPlastic({ member, of }) {
 /** The axial resistance that shear leaves: 6.2.10. @param {Together} together */
 function axialWithShear({ member, rho }) {
   const areas = shearAreas(member);
-  return Math.max(0, member.gross.A - rho.z * areas.z - rho.y * areas.y) * member.fy;
+  // The one force on a tube takes its area once.
+  const along = member.section.shape === 'CHS' ? 0 : rho.y * areas.y;
+  return Math.max(0, member.gross.A - rho.z * areas.z - along) * member.fy;
 }
 
-/** @param {Together} together @param {Axis} axis */
-function bendingWithShear({ member, of, rho }, axis) {
+/** @param {Together} together @param {Axis} axis @param {SectionClass} [of] */
+function bendingWithShear({ member, of: section, rho }, axis, of = section) {
   return bendingResistance(member, axis, of, rho[shearWith[axis]]);
 }
 
@@ -68,7 +78,7 @@ function factor(together, axis, n) {
     case 'RHS': {
       const { h, b, t } = section;
       const side = axis === 'y' ? b : h;
-      const a = Math.min(0.5, (gross.A - 2 * side * t) / gross.A);
+      const a = webShare(gross.A, 2 * side * t);
       return (1 - n) / (1 - 0.5 * a);
     }
     case 'CHS':
@@ -78,10 +88,15 @@ function factor(together, axis, n) {
   }
 }
 
+/** The a of 6.2.9.1(5). @param {number} whole area @param {number} flanges */
+function webShare(whole, flanges) {
+  return Math.max(0, Math.min(0.5, (whole - flanges) / whole));
+}
+
 /** @param {Together} together @param {import('./sections.mjs').SectionI} section @param {Axis} axis @param {number} n */
 function factorOfI({ member, rho, axial }, section, axis, n) {
   const reduced = member.gross.A - rho.z * shearAreas(member).z;
-  const a = Math.min(0.5, (reduced - 2 * section.b * section.tf) / reduced);
+  const a = webShare(reduced, 2 * section.b * section.tf);
   const web = webHeight(section) * section.tw * member.fy * (1 - rho.z);
   if (axis === 'y') {
     return n <= 0.25 && axial <= 0.5 * web ? 1 : (1 - n) / (1 - 0.5 * a);
@@ -111,27 +126,63 @@ function exponents(section, n) {
 }
 
 /**
- * The linear sum over the axial force and the moments about the given axes, or nothing where a
- * resistance is zero.
+ * The eccentricities that compression has of the effective area; only a channel's is not zero.
+ * @param {Together} together @returns {Record<Axis, number>}
+ */
+function shiftsOf({ member: { section, fy }, compressed }) {
+  return compressed && isSlender(section, fy) ? effectiveArea(section, fy).e : { y: 0, z: 0 };
+}
+
+/** Whether the axial force bends about an axis by itself. @param {Together} together @param {Axis} axis */
+export function isShifted(together, axis) {
+  return shiftsOf(together)[axis] > 0;
+}
+
+/** The axial force over what shear and buckling leave for it. @param {Together} together */
+export function axialSum(together) {
+  const { member, of, axial, compressed } = together;
+  if (axial === 0) return 0;
+  const withShear = axialWithShear(together);
+  const resistance =
+    of >= 3 && compressed ? Math.min(withShear, compressionResistance(member)) : withShear;
+  return resistance > 0 ? axial / resistance : null;
+}
+
+/**
+ * The linear sum over the axial force, what it bends by its eccentricity, and the moments about the
+ * given axes, or nothing where a resistance is zero.
  * @param {Together} together @param {readonly Axis[]} axes
  */
 export function linearSum(together, axes) {
-  const { member, of, axial, compressed, moments } = together;
-  const elastic = of >= 3;
-  const withShear = axialWithShear(together);
-  const resistance =
-    elastic && compressed ? Math.min(withShear, compressionResistance(member)) : withShear;
-  const shifts =
-    elastic && compressed && isSlender(member.section, member.fy)
-      ? effectiveArea(member.section, member.fy).e
-      : { y: 0, z: 0 };
+  const { of, classes, axial, moments } = together;
+  const shifts = shiftsOf(together);
+  let sum = axialSum(together);
+  for (const axis of AXES) {
+    const moment = (axes.includes(axis) ? moments[axis] : 0) + axial * shifts[axis];
+    if (moment === 0) continue;
+    // Where the eccentricity alone bends about an axis, the section's class may not know of it.
+    const known = moments[axis] > 0 ? of : worst([of, classes[axis]]);
+    const resistance = bendingWithShear(together, axis, known);
+    if (sum === null || resistance <= 0) return null;
+    sum += moment / resistance;
+  }
+  return sum;
+}
 
-  /** @type {[effect: number, resistance: number][]} */
-  const terms = axes.map((axis) => [
-    moments[axis] + axial * shifts[axis],
-    bendingWithShear(together, axis),
-  ]);
-  if (axial > 0) terms.push([axial, resistance]);
-  if (terms.some(([, right]) => right <= 0)) return null;
-  return terms.reduce((sum, [left, right]) => sum + left / right, 0);
+/**
+ * EN 1993-1-5 7.1: the sum for bending about y-y with the shear of webs that buckle, or nothing where
+ * it does not apply.
+ * @param {Together} together
+ */
+export function bucklingSum({ member, axial, moments, shear }) {
+  const { section, fy } = member;
+  const resistance = bucklingShear(member, 'z');
+  if (section.shape === 'CHS' || resistance === undefined) return undefined;
+  if (shear.z <= 0.5 * resistance) return undefined;
+  const one = flangeArea(section, fy);
+  const arm = section.h - flangeThickness(section);
+  const { thickness, webs } = websAlong(section);
+  const flanges = one * arm * fy * Math.max(0, 1 - axial / (2 * one * fy));
+  const plastic = (one * arm + (webs * thickness * webHeight(section) ** 2) / 4) * fy;
+  return moments.y / plastic + (1 - flanges / plastic) * ((2 * shear.z) / resistance - 1) ** 2;
 }

@@ -1,6 +1,14 @@
 /** What `POST /v1/checks/section` owes for a request, calculated apart from the engine. */
 import { classAbout, worst } from './classes.mjs';
-import { isPlastic, linearSum, momentWithAxial, plasticBiaxial } from './interaction.mjs';
+import {
+  axialSum,
+  bucklingSum,
+  isPlastic,
+  isShifted,
+  linearSum,
+  momentWithAxial,
+  plasticBiaxial,
+} from './interaction.mjs';
 import {
   bendingResistance,
   bucklingShear,
@@ -25,7 +33,7 @@ import {
 /** @typedef {{ refused: false, section_class: SectionClass, verifications: Record<string, Expected> }} Answered */
 /** @typedef {{ refused: true, why: string }} Refused */
 
-/** @typedef {import('./interaction.mjs').Together & { shear: Record<Axis, number>, classes: Record<Axis, SectionClass> }} Case */
+/** @typedef {import('./interaction.mjs').Together} Case */
 
 /** @type {readonly Axis[]} */
 const AXES = ['y', 'z'];
@@ -65,13 +73,20 @@ function caseOf({ material: { fy }, section, effects }) {
     y: Math.abs(effects.My ?? 0) * MEGA,
     z: Math.abs(effects.Mz ?? 0) * MEGA,
   };
-  const shear = { y: Math.abs(effects.Vy ?? 0) * KILO, z: Math.abs(effects.Vz ?? 0) * KILO };
+  const shear = shearOf(section, effects);
   const loaded = { section, fy, A: member.gross.A, compression };
   const classes = { y: classAbout(loaded, 'y'), z: classAbout(loaded, 'z') };
   const acting = AXES.filter((axis) => moments[axis] > 0);
   const of = worst((acting.length === 1 ? acting : AXES).map((axis) => classes[axis]));
   const rho = shearReductions(member, shear);
-  return { member, of, rho, axial, compressed: compression > 0, moments, shear, classes };
+  return { member, of, classes, rho, axial, compressed: compression > 0, moments, shear };
+}
+
+/** Two forces on a tube are one, which goes as that along z. @param {Section} section @param {Effects} effects */
+function shearOf({ shape }, effects) {
+  const shear = { y: Math.abs(effects.Vy ?? 0) * KILO, z: Math.abs(effects.Vz ?? 0) * KILO };
+  if (shape !== 'CHS' || shear.y === 0 || shear.z === 0) return shear;
+  return { y: 0, z: Math.hypot(shear.y, shear.z) };
 }
 
 /** Each effect by itself. @param {Case} given */
@@ -91,18 +106,32 @@ function alone({ member, axial, compressed, moments, shear, classes }) {
       made[`shear-${axis}`] = against(shear[axis], plasticShear(member, axis), KILO);
     }
   }
-  const buckling = shear.z > 0 ? bucklingShear(member) : undefined;
-  if (buckling !== undefined) made['web-buckling-shear'] = against(shear.z, buckling, KILO);
+  const buckling = webBuckling({ member, shear });
+  if (buckling) made['web-buckling-shear'] = buckling;
   return made;
 }
 
+/** The worse of the directions in which webs buckle. @param {Pick<Case, 'member' | 'shear'>} given */
+function webBuckling({ member, shear }) {
+  return AXES.flatMap((axis) => {
+    const resistance = shear[axis] > 0 ? bucklingShear(member, axis) : undefined;
+    return resistance === undefined ? [] : [against(shear[axis], resistance, KILO)];
+  })
+    .sort((one, other) => (other.utilisation ?? 0) - (one.utilisation ?? 0))
+    .at(0);
+}
+
 /** @param {Case} given */
-function bendingWithShear({ member, moments, rho, classes }) {
+function bendingWithShear(given) {
+  const { member, moments, rho, classes } = given;
   /** @type {Record<string, Expected>} */
   const made = {};
   for (const axis of AXES) {
     const lost = rho[shearWith[axis]];
-    if (moments[axis] === 0 || lost === 0) continue;
+    if (moments[axis] === 0) continue;
+    const sum = axis === 'y' ? bucklingSum(given) : undefined;
+    if (sum !== undefined) made['bending-shear-y'] = summed(sum);
+    if (sum !== undefined || lost === 0) continue;
     const resistance = bendingResistance(member, axis, classes[axis], lost);
     made[`bending-shear-${axis}`] = against(moments[axis], resistance, MEGA);
   }
@@ -111,14 +140,18 @@ function bendingWithShear({ member, moments, rho, classes }) {
 
 /** @param {Case} given */
 function withAxial(given) {
-  const { axial, moments } = given;
+  const { axial, moments, rho } = given;
   /** @type {Record<string, Expected>} */
   const made = {};
   for (const axis of AXES) {
-    if (axial === 0 || moments[axis] === 0) continue;
+    if (axial === 0 || (moments[axis] === 0 && !isShifted(given, axis))) continue;
     made[`bending-axial-${axis}`] = isPlastic(given)
       ? against(moments[axis], momentWithAxial(given, axis), MEGA)
       : summed(linearSum(given, [axis]));
+  }
+  const isBent = moments.y > 0 || moments.z > 0;
+  if (axial > 0 && !isBent && (rho.y > 0 || rho.z > 0)) {
+    made['bending-axial-y'] = summed(axialSum(given));
   }
   if (moments.y > 0 && moments.z > 0) {
     made['biaxial'] = summed(isPlastic(given) ? plasticBiaxial(given) : linearSum(given, AXES));

@@ -34,14 +34,14 @@ export function compressionResistance({ section, fy, gross }) {
   return (isSlender(section, fy) ? effectiveArea(section, fy).A : gross.A) * fy;
 }
 
-/** @param {Section} section */
-export function webHeight(section) {
+/** Clear height of the webs along a direction. @param {Section} section @param {Axis} [direction] */
+export function webHeight(section, direction = 'z') {
   switch (section.shape) {
     case 'I':
     case 'channel':
       return section.h - 2 * section.tf;
     case 'RHS':
-      return section.h - 2 * section.t;
+      return (direction === 'z' ? section.h : section.b) - 2 * section.t;
     case 'CHS':
       return 0;
   }
@@ -74,14 +74,22 @@ export function plasticShear(member, direction) {
   return (shearAreas(member)[direction] * member.fy) / Math.sqrt(3);
 }
 
+/** How many webs there are, and how thick. @param {Exclude<Section, { shape: 'CHS' }>} section */
+export function websAlong(section) {
+  return section.shape === 'RHS'
+    ? { thickness: section.t, webs: 2 }
+    : { thickness: section.tw, webs: 1 };
+}
+
 /**
- * The resistance of the webs to shear buckling, where they are slender enough for it to count.
- * @param {Member} member
+ * The resistance of the webs along a direction to shear buckling, where they are slender enough for
+ * it to count; only a hollow section has any along y.
+ * @param {Member} member @param {Axis} direction
  */
-export function bucklingShear({ section, fy }) {
-  if (section.shape === 'CHS') return undefined;
-  const [thickness, webs] = section.shape === 'RHS' ? [section.t, 2] : [section.tw, 1];
-  const height = webHeight(section);
+export function bucklingShear({ section, fy }, direction) {
+  if (section.shape === 'CHS' || (direction === 'y' && section.shape !== 'RHS')) return undefined;
+  const { thickness, webs } = websAlong(section);
+  const height = webHeight(section, direction);
   const epsilon = epsilonOf(fy);
   if (height / thickness <= (72 * epsilon) / ETA) return undefined;
   const lambda = height / (86.4 * thickness * epsilon);
@@ -90,13 +98,19 @@ export function bucklingShear({ section, fy }) {
 }
 
 /**
- * By how much shear lowers the yield strength of its area: 6.2.8(3).
+ * By how much shear lowers the yield strength of its area: 6.2.8(3), by the lesser of the plastic
+ * resistance and that to buckling. On a tube both forces are one, and take from bending about both axes.
  * @param {Member} member @param {ByDirection} shear @returns {ByDirection}
  */
 export function shearReductions(member, shear) {
   /** @param {Axis} direction */
   const one = (direction) => {
-    const ratio = shear[direction] / plasticShear(member, direction);
+    const resistance = Math.min(
+      plasticShear(member, direction),
+      bucklingShear(member, direction) ?? Infinity,
+    );
+    const isTube = member.section.shape === 'CHS';
+    const ratio = (isTube ? Math.hypot(shear.y, shear.z) : shear[direction]) / resistance;
     return ratio > 0.5 ? Math.min(1, (2 * ratio - 1) ** 2) : 0;
   };
   return { y: one('y'), z: one('z') };
