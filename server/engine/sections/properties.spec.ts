@@ -136,6 +136,17 @@ test('every section of the tables is in the catalogue, and nothing else but timb
   expect(steel).toHaveLength(names.length);
 });
 
+test('every size of timber is in the catalogue once, whichever regions saw it', () => {
+  const sizes = readTable('timber').map((row) => [numberIn(row, 'b_mm'), numberIn(row, 'h_mm')]);
+  const timber = catalogue.filter(({ family }) => family === 'timber');
+  const missing = sizes.filter(([b = NaN, h = NaN]) => {
+    const entry = findSection(`timber ${b}x${h}`);
+    return entry?.shape !== 'rectangle' || entry.b !== b || entry.h !== h;
+  });
+  expect(missing).toEqual([]);
+  expect(timber).toHaveLength(new Set(sizes.map(String)).size);
+});
+
 test('every section of the catalogue can be, but two whose toes are printed too round', () => {
   const impossible = catalogue.filter((entry) => impossibilityOf(entry) !== undefined);
   expect(impossible.map(({ designation }) => designation)).toEqual(['L 45x45x3', 'L 50x50x3']);

@@ -1,9 +1,11 @@
 import { silentSheet } from '../../formula/sheet';
 import { numberIn, worstOf, type TableRow } from '../../../../test/support/section-tables';
+import { propertiesOf } from '../properties';
 import { angleProperties } from './angle';
 import { channelProperties } from './channel';
 import { chsProperties, cornerRadii, rhsProperties } from './hollow';
 import { rectangleProperties, roundProperties } from './solid';
+import { taperedChannelProperties, taperedIProperties } from './tapered';
 
 const rhs = (row: TableRow) =>
   rhsProperties(
@@ -125,6 +127,34 @@ describe('solids', () => {
     expect(round.A).toBeCloseTo(tube.A, 6);
     expect(round.W_pl_y).toBeCloseTo(tube.W_pl_y, 6);
     expect(round.I_t).toBeCloseTo(tube.I_t, 3);
+  });
+});
+
+describe('flanges that taper by nothing are parallel ones', () => {
+  const taper = { slope: 0, at: 0, r_2: 0 };
+  const same = (tapered: object, parallel: object, names: readonly string[]): void => {
+    for (const name of names) {
+      const [a, b] = [tapered, parallel].map((of) => (of as Record<string, number>)[name] ?? NaN);
+      expect([name, (a ?? NaN) / (b ?? NaN)]).toEqual([name, expect.closeTo(1, 9)]);
+    }
+  };
+
+  test.each([
+    ['the plastic axis in the flanges', { h: 200, b: 90, t_w: 7, t_f: 14, r: 12 }],
+    ['the plastic axis in the web', { h: 430, b: 100, t_w: 16, t_f: 19, r: 15 }],
+  ])('a channel, %s', (_, dimensions) => {
+    const section = { shape: 'channel', ...dimensions } as const;
+    const tapered = taperedChannelProperties(section, taper, silentSheet);
+    const names = ['A', 'y_c', 'I_y', 'I_z', 'W_el_z', 'W_pl_y', 'W_pl_z', 'e_0', 'I_w'];
+    same(tapered, channelProperties(dimensions, silentSheet), names);
+  });
+
+  test('an I section', () => {
+    const dimensions = { h: 453.4, b: 189.9, t_w: 8.5, t_f: 12.7, r: 10.2 };
+    const shape = { shape: 'I', fabrication: 'rolled', ...dimensions } as const;
+    const names = ['A', 'I_y', 'I_z', 'W_el_y', 'W_el_z', 'W_pl_y', 'W_pl_z'];
+    const parallel = propertiesOf(shape, silentSheet);
+    same(taperedIProperties(shape, taper, silentSheet), parallel, names);
   });
 });
 
