@@ -1,7 +1,7 @@
 import { barTone, type BarTone } from '../utilisation-bar/utilisation-bar';
-import type { CheckAnswer } from '../contract';
+import type { CheckAnswer, Verification } from '../contract';
 import { utilisationText } from '../quantity/format';
-import { capital, placeText, verificationName } from './words';
+import { capital, placeText, pointText, verificationName } from './words';
 
 /** A verification that was made, as the answer lists it. */
 export interface AnswerLine {
@@ -25,7 +25,7 @@ export function answerLines(answer: CheckAnswer, spans: number): AnswerLine[] {
         id: one.id,
         title: one.title,
         clause: one.clause,
-        place: placeText(one.at, spans),
+        place: whereText(one, answer, spans),
         number: utilisationText(one.utilisation),
         utilisation: one.utilisation,
         holds,
@@ -44,8 +44,15 @@ export function governingText(answer: CheckAnswer, spans: number) {
   const combination = answer.combinations?.find(({ id }) => id === found.combination) ?? null;
   return {
     title: `${found.title || capital(verificationName(found.id))} governs`,
-    where: placeText(found.at, spans) + (found.combination ? ', combination ' : ''),
+    where: whereText(found, answer, spans) + (found.combination ? ', combination ' : ''),
     combinationId: found.combination,
     combination,
   };
+}
+
+/** Along the member, or on the one cross-section that there is. */
+function whereText(one: Verification, answer: CheckAnswer, spans: number): string {
+  return ['section', 'stress'].includes(answer.check)
+    ? pointText(one, answer)
+    : placeText(one.at, spans);
 }

@@ -48,6 +48,12 @@ export function placeText(at: Verification['at'], spans: number): string {
   return `${where}, x = ${fixed(at.x, 2)} m`;
 }
 
+/** Where on the section a verification governs: the words of its point; '' where it is all of it. */
+export function pointText(one: Verification, { points = [] }: CheckAnswer): string {
+  if (one.point === undefined) return '';
+  return points.find(({ id }) => id === one.point)?.title ?? one.point.replaceAll('-', ' ');
+}
+
 /** The terms of a combination: "1.35 earth", "1.50 surcharge". */
 export function combinationTerms({ factors }: CombinationLine): string[] {
   return Object.entries(factors).map(([name, factor]) => `${fixed(factor, 2)} ${name}`);

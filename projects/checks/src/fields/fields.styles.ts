@@ -27,6 +27,8 @@ export const fieldStyles = `
 }
 .ht-tick { display: flex; gap: 8px; align-items: center; font-size: 14px; min-height: 28px; }
 .ht-tick input { accent-color: var(--ht-timber); width: 16px; height: 16px; margin: 0; flex: none; }
+.ht-ways { border: 0; margin: 0; padding: 0; min-width: 0; display: flex; flex-wrap: wrap; gap: 0 24px; }
+.ht-ways legend { padding: 0; }
 .ht-row { display: grid; grid-template-columns: 2fr 1fr 1.7fr 1.1fr; gap: 18px 20px; align-items: start; }
 .ht-form { display: grid; grid-template-columns: minmax(0, 1fr); gap: 18px; min-width: 0; }
 .ht-more-fields { display: grid; gap: 18px; padding-top: 12px; }

@@ -3,13 +3,7 @@ import type { WalerDraft } from './draft';
 import { FieldReader, type DraftReading } from './field-reader';
 import { readMaterial } from './material';
 import { readRows } from './read-rows';
-import {
-  writeCount,
-  writeDraft,
-  writeLimit,
-  writeSection,
-  writeStiffness,
-} from './write-draft';
+import { writeCount, writeDraft, writeLimit, writeSection, writeStiffness } from './write-draft';
 
 /** Reads the form; what it does not show is taken from the request it was filled from. */
 export function readDraft(draft: WalerDraft): DraftReading<WalerRequest> {

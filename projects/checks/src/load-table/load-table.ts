@@ -1,20 +1,11 @@
 import { NgTemplateOutlet } from '@angular/common';
-import {
-  afterNextRender,
-  ChangeDetectionStrategy,
-  Component,
-  ElementRef,
-  inject,
-  Injector,
-  input,
-  model,
-  ViewEncapsulation,
-} from '@angular/core';
+import { ChangeDetectionStrategy, Component, input, model, ViewEncapsulation } from '@angular/core';
 import { ChoiceField } from '../fields/choice-field';
 import { TextField } from '../fields/text-field';
 import { emptyRow, rowPointer, type LoadRow } from '../form/draft';
 import type { FieldFault } from '../form/field-reader';
 import { shapeUnit } from '../form/read-rows';
+import { RowFocus } from '../form/row-focus';
 import { categoryOptions, natures, shapes } from './load-words';
 
 /** The loads, one a row; Enter goes down, and on the last row writes a new one. */
@@ -33,8 +24,7 @@ export class LoadTable {
   readonly faults = input.required<ReadonlyMap<string, FieldFault>>();
   readonly readonly = input(false);
 
-  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
-  private readonly injector = inject(Injector);
+  private readonly keyboard = new RowFocus('.ht-load', 'name');
   protected readonly natures = natures;
   protected readonly shapes = shapes;
   protected readonly shapeUnit = shapeUnit;
@@ -44,14 +34,13 @@ export class LoadTable {
   add(): void {
     const rows = [...this.rows(), emptyRow()];
     this.rows.set(rows);
-    this.focus(rows.length - 1, 'input');
+    this.keyboard.to(rows.length - 1, 'input');
   }
 
   protected remove(row: LoadRow): void {
     const index = this.rows().indexOf(row);
     this.rows.set(this.rows().filter((one) => one.id !== row.id));
-    if (this.rows().length > 0) this.focus(Math.max(0, index - 1), '.ht-load-remove');
-    else this.focus(-1, '.ht-acts button');
+    this.keyboard.afterRemoval(index, this.rows().length);
   }
 
   protected change(row: LoadRow, change: Partial<LoadRow>): void {
@@ -69,24 +58,8 @@ export class LoadTable {
 
   /** Enter goes to the same field one row down, Shift with it one up. */
   protected press(event: Event, index: number): void {
-    const { target } = event;
-    if (!(event instanceof KeyboardEvent) || !(target instanceof HTMLInputElement)) return;
-    event.preventDefault();
-    const to = index + (event.shiftKey ? -1 : 1);
-    if (to < 0) return;
-    if (to >= this.rows().length) {
+    this.keyboard.press(event, index, this.rows().length, () => {
       if (!this.readonly()) this.add();
-      return;
-    }
-    const cell = target.closest('[data-cell]')?.getAttribute('data-cell');
-    this.focus(to, `[data-cell="${cell ?? 'name'}"] input`);
-  }
-
-  private focus(index: number, selector: string): void {
-    const go = () => {
-      const row = index < 0 ? this.host : this.host.querySelectorAll('.ht-load')[index];
-      row?.querySelector<HTMLElement>(selector)?.focus();
-    };
-    afterNextRender(go, { injector: this.injector });
+    });
   }
 }

@@ -12,6 +12,11 @@ import { loadTableStyles } from '../load-table/load-table.styles';
 import { drawingStyles } from '../member-drawing/member-drawing.styles';
 import { sectionPickerStyles } from '../section-picker/section-picker.styles';
 import { statusMarkStyles } from '../status-mark/status-mark.styles';
+import { interactionStyles } from '../interaction-diagram/interaction-diagram.styles';
+import { pointsTableStyles } from '../points-table/points-table.styles';
+import { sectionDrawingStyles } from '../section-drawing/section-drawing.styles';
+import { stateTableStyles } from '../state-table/state-table.styles';
+import { stressDrawingStyles } from '../stress-drawing/stress-drawing.styles';
 import { titleBlockStyles } from '../title-block/title-block.styles';
 import { barStyles } from '../utilisation-bar/utilisation-bar.styles';
 import { workingStyles } from '../working/working.styles';
@@ -31,6 +36,11 @@ export const sheetStyles = [
   barStyles,
   answerStyles,
   diagramStyles,
+  sectionDrawingStyles,
+  stressDrawingStyles,
+  interactionStyles,
+  pointsTableStyles,
+  stateTableStyles,
   workingStyles,
   titleBlockStyles,
   sheet,

@@ -1,5 +1,6 @@
 /** The default units that fields of a check are written in. */
-export type FieldUnit = 'm' | 'mm' | 'kN' | 'kN/m' | 'kN/m^2' | 'kN m' | 'kN/mm' | 'N/mm^2';
+export type FieldUnit =
+  'm' | 'mm' | 'mm^2' | 'kN' | 'kN/m' | 'kN/m^2' | 'kN m' | 'kN m^2' | 'kN/mm' | 'N/mm^2';
 
 interface WrittenUnit {
   /** As the service reads it. */
@@ -20,6 +21,7 @@ function kind(dimension: string, scales: Readonly<Record<string, number>>): Writ
 
 const units: readonly WrittenUnit[] = [
   ...kind('length', { mm: 1, cm: 10, m: 1e3, in: INCH, ft: FOOT }),
+  ...kind('area', { mm2: 1, cm2: 100, m2: 1e6, in2: INCH ** 2, ft2: FOOT ** 2 }),
   ...kind('force', { N: 1, kN: 1e3, MN: 1e6, lbf: POUND_FORCE, kip: KIP }),
   ...kind('force per length', {
     'N/mm': 1,
@@ -59,11 +61,17 @@ const units: readonly WrittenUnit[] = [
     'kip ft': KIP * FOOT,
     'kip in': KIP * INCH,
   }),
+  ...kind('bimoment', {
+    'N mm2': 1,
+    'kN m2': 1e9,
+    'kip ft2': KIP * FOOT ** 2,
+    'kip in2': KIP * INCH ** 2,
+  }),
 ];
 
 const byName = new Map(units.map((unit) => [unit.name.toLowerCase(), unit]));
 const superscripts: Readonly<Record<string, string>> = { '²': '2', '³': '3', '⁴': '4', '⁶': '6' };
-const joined = /^(kn|n|mn|lbf|kip)-?(mm|m|ft|in)$/;
+const joined = /^(kn|n|mn|lbf|kip)-?((?:mm|m|ft|in)2?)$/;
 
 /** A unit in any spelling (`kNm`, `KN/M`, `kN·m`, `N/mm²`); undefined where it is not on the list. */
 function findUnit(text: string): WrittenUnit | undefined {

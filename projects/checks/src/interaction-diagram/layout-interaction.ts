@@ -1,0 +1,90 @@
+import type { InteractionCurve } from '../contract';
+import { decimalsOf } from '../envelope-diagram/layout-diagram';
+import { textWidth } from '../member-drawing/scale';
+import { fixed } from '../quantity/format';
+
+type Point = InteractionCurve['point'];
+
+/** A number at its tick. */
+interface Tick {
+  readonly at: number;
+  readonly text: string;
+}
+
+/** An interaction curve in px, for one width. */
+export interface InteractionLayout {
+  readonly height: number;
+  readonly left: number;
+  readonly right: number;
+  readonly top: number;
+  readonly bottom: number;
+  readonly across: readonly Tick[];
+  readonly up: readonly Tick[];
+  readonly area: string;
+  readonly curve: string;
+  readonly point: { readonly x: number; readonly y: number };
+}
+
+const PLOT = 190;
+const TOP = 30;
+const UNDER = 44;
+
+/** Puts the curve and its point between two axes that begin at nothing. */
+export function layoutInteraction(
+  { curve, point }: InteractionCurve,
+  width: number,
+): InteractionLayout {
+  const all = [...curve, size(point)];
+  const xs = ticksTo(Math.max(...all.map(({ x }) => x)));
+  const ys = ticksTo(Math.max(...all.map(({ y }) => y)));
+  const left = Math.max(...ys.map((value) => textWidth(fixed(value, decimals(ys))))) + 12;
+  const right = width - 20;
+  const bottom = TOP + PLOT;
+  const [mostX, mostY] = [xs.at(-1) ?? 1, ys.at(-1) ?? 1];
+  const px = (value: number): number => Math.round(value * 10) / 10;
+  const x = (value: number): number => px(left + (value / mostX) * (right - left));
+  const y = (value: number): number => px(bottom - (value / mostY) * PLOT);
+  const line = curve.map((one, index) => `${index === 0 ? 'M' : 'L'}${x(one.x)} ${y(one.y)}`);
+  const shown = size(point);
+  return {
+    height: bottom + UNDER,
+    left,
+    right,
+    top: TOP,
+    bottom,
+    across: xs.map((value) => ({ at: x(value), text: fixed(value, decimals(xs)) })),
+    up: ys.map((value) => ({ at: y(value), text: fixed(value, decimals(ys)) })),
+    area: `${line.join('')}L${x(0)} ${y(0)}Z`,
+    curve: line.join(''),
+    point: { x: x(shown.x), y: y(shown.y) },
+  };
+}
+
+/** Both effects act either way; the curve is drawn for their sizes. */
+const size = ({ x, y }: Point): Point => ({ x: Math.abs(x), y: Math.abs(y) });
+
+const decimals = (ticks: readonly number[]): number =>
+  (ticks[1] ?? 1) % 1 === 0 ? 0 : decimalsOf((ticks.at(-1) ?? 1) / 10);
+
+/** Round numbers from nothing to just beyond the greatest. */
+function ticksTo(greatest: number): number[] {
+  const rough = Math.max(greatest, 1e-9) / 4;
+  const power = 10 ** Math.floor(Math.log10(rough));
+  const step = ([1, 2, 2.5, 5, 10].find((one) => one * power >= rough) ?? 10) * power;
+  const count = Math.ceil(greatest / step + 1e-9);
+  return Array.from({ length: count + 1 }, (_, index) => index * step);
+}
+
+/** Whether what acts lies within the curve and the axes. */
+export function isInside({ curve, point }: InteractionCurve): boolean {
+  const { x, y } = size(point);
+  const outline = [{ x: 0, y: 0 }, ...curve];
+  // On the curve itself it still holds.
+  const [px, py] = [x * (1 - 1e-9), y * (1 - 1e-9)];
+  return outline.reduce((inside, one, index) => {
+    const next = outline[(index + 1) % outline.length] ?? one;
+    const spans = one.y > py !== next.y > py;
+    const at = one.x + ((py - one.y) / (next.y - one.y)) * (next.x - one.x);
+    return spans && px < at ? !inside : inside;
+  }, false);
+}

@@ -1,0 +1,121 @@
+import { textWidth } from '../member-drawing/scale';
+import { fitSection, type Fit } from './fit-section';
+import type { SectionModel } from './section-model';
+
+/** A text with its place and, where it stands apart from what it names, a line to it. */
+export interface Label {
+  readonly x: number;
+  readonly y: number;
+  readonly text: string;
+  readonly line?: string;
+}
+
+/** A section in px, for one width. */
+export interface SectionLayout {
+  readonly width: number;
+  readonly height: number;
+  readonly outline: string;
+  readonly hatches: readonly { readonly edge: string; readonly lines: string }[];
+  /** Lines of the axes and the heads that say where they run. */
+  readonly axes: string;
+  readonly heads: string;
+  readonly letters: readonly Label[];
+  readonly dimensions: string;
+  readonly sizes: readonly Label[];
+  readonly marks: readonly Label[];
+}
+
+const AXIS = 16;
+const LINE = 17;
+
+/** Draws the section for a width: to scale, texts always 12 px. */
+export function layoutSection(model: SectionModel, width: number): SectionLayout {
+  const { bounds, marks, depth } = model;
+  const markWidth = Math.max(0, ...marks.map(({ text }) => textWidth(text)));
+  const gutters = {
+    left: textWidth(depth) + 18,
+    right: (markWidth > 0 ? markWidth + 22 : 0) + AXIS + 14,
+    top: model.width ? 32 : 14,
+    bottom: AXIS + 22,
+  };
+  const fit = fitSection(bounds, width, gutters);
+  return {
+    width,
+    height: fit.height,
+    outline: model.outlines.map((outline) => fit.path(outline)).join(''),
+    hatches: model.ineffective.map((strip) => hatch(fit, strip)),
+    ...axesOf(fit, model),
+    ...dimensionsOf(fit, model),
+    marks: marksBeside(fit, model),
+  };
+}
+
+function axesOf(fit: Fit, { bounds }: SectionModel) {
+  const [x, y] = [fit.x(0), fit.y(0)];
+  const [left, right] = [fit.x(bounds.left) - 8, fit.x(bounds.right) + AXIS];
+  const [top, bottom] = [fit.y(bounds.top) - 8, fit.y(bounds.bottom) + AXIS];
+  return {
+    axes: `M${left} ${y}H${right}M${x} ${top}V${bottom}`,
+    heads:
+      `M${right - 7} ${y - 3.5}L${right} ${y}L${right - 7} ${y + 3.5}Z` +
+      `M${x - 3.5} ${bottom - 7}L${x} ${bottom}L${x + 3.5} ${bottom - 7}Z`,
+    letters: [
+      { x: right + 8, y: y + 4, text: 'y' },
+      { x, y: bottom + 14, text: 'z' },
+    ],
+  };
+}
+
+/** Depth at the left and width above, each between its ticks. */
+function dimensionsOf(fit: Fit, { bounds, depth, width }: SectionModel) {
+  const [left, right] = [fit.x(bounds.left), fit.x(bounds.right)];
+  const [top, bottom] = [fit.y(bounds.top), fit.y(bounds.bottom)];
+  const beside = left - 14;
+  const above = top - 14;
+  const down = `M${beside} ${top}V${bottom}M${beside - 4} ${top}h8M${beside - 4} ${bottom}h8`;
+  const across = `M${left} ${above}H${right}M${left} ${above - 4}v8M${right} ${above - 4}v8`;
+  const middle = (left + right) / 2;
+  // Beside the depth's own middle runs the axis.
+  const sizes = [
+    { x: beside - 6 - textWidth(depth) / 2, y: (top + bottom) / 2 + 4, text: depth },
+    ...(width ? [{ x: middle, y: above - 6, text: width }] : []),
+  ];
+  return { dimensions: width ? down + across : down, sizes };
+}
+
+/** The marks in a column at the right, each with a line to its place, clear of the axis. */
+function marksBeside(fit: Fit, { bounds, marks }: SectionModel): Label[] {
+  const x = fit.x(bounds.right) + AXIS + 8;
+  const axis = fit.y(0);
+  let free = fit.y(bounds.top) - 8;
+  return marks.map(({ text, y, z }) => {
+    let at = Math.max(free, fit.y(z));
+    if (Math.abs(at - axis) < 14) at = axis + 16;
+    free = at + LINE;
+    const elbow = x - 8;
+    const line = `M${fit.x(y)} ${fit.y(z)}L${elbow} ${at}H${x - 3}`;
+    return { x, y: at + 4, text, line };
+  });
+}
+
+/** A strip with lines at 45° every few px, so that it shows without any colour. */
+function hatch(
+  fit: Fit,
+  strip: {
+    readonly y: number;
+    readonly z: number;
+    readonly width: number;
+    readonly height: number;
+  },
+) {
+  const [left, right] = [fit.x(strip.y - strip.width / 2), fit.x(strip.y + strip.width / 2)];
+  const [top, bottom] = [fit.y(strip.z - strip.height / 2), fit.y(strip.z + strip.height / 2)];
+  const parts: string[] = [];
+  for (let sum = left + top + 4; sum < right + bottom; sum += 4) {
+    const [x1, x2] = [Math.max(left, sum - bottom), Math.min(right, sum - top)];
+    parts.push(`M${round(x1)} ${round(sum - x1)}L${round(x2)} ${round(sum - x2)}`);
+  }
+  return { edge: `M${left} ${top}H${right}V${bottom}H${left}Z`, lines: parts.join('') };
+}
+
+const round = (value: number): number => Math.round(value * 10) / 10;
