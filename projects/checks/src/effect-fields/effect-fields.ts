@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -13,25 +14,22 @@ import { effectUnits, showsParts, type EffectsDraft } from './effects-draft';
 
 type Name = keyof EffectsDraft['texts'];
 
-const FIELDS: readonly { readonly name: Name; readonly label: string }[] = [
-  { name: 'My', label: 'My, about y-y' },
-  { name: 'Mz', label: 'Mz, about z-z' },
-  { name: 'Vz', label: 'Vz, along z' },
-  { name: 'Vy', label: 'Vy, along y' },
-  { name: 'T', label: 'T, torsion' },
-];
-
-const PARTS: typeof FIELDS = [
-  { name: 'stVenant', label: 'of T, St Venant' },
-  { name: 'warping', label: 'of T, warping' },
-  { name: 'bimoment', label: 'B, bimoment' },
-];
+const LABELS: Readonly<Record<Name, string>> = {
+  My: 'My, about y-y',
+  Mz: 'Mz, about z-z',
+  Vz: 'Vz, along z',
+  Vy: 'Vy, along y',
+  T: 'T, torsion',
+  stVenant: 'T, St Venant part',
+  warping: 'T, warping part',
+  bimoment: 'B, bimoment',
+};
 
 /** Design effects that act together at one cross-section. */
 @Component({
   selector: 'htc-effect-fields',
   templateUrl: './effect-fields.html',
-  imports: [ChoiceField, TextField],
+  imports: [ChoiceField, NgTemplateOutlet, TextField],
   host: { class: 'ht-form', role: 'group', 'aria-label': 'Design effects' },
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,
@@ -45,14 +43,17 @@ export class EffectFields {
   readonly isOpen = input(true);
   readonly readonly = input(false);
 
-  protected readonly units = effectUnits;
   protected readonly axials: readonly Option[] = [
     { value: 'compression', label: 'compression' },
     { value: 'tension', label: 'tension' },
   ];
-  protected readonly shown = computed(() =>
-    showsParts(this.draft(), this.isOpen()) ? [...FIELDS, ...PARTS] : FIELDS,
+  protected readonly torsion = computed((): readonly Name[] =>
+    showsParts(this.draft(), this.isOpen()) ? ['T', 'stVenant', 'warping', 'bimoment'] : ['T'],
   );
+
+  protected fieldsOf(names: readonly Name[]) {
+    return names.map((name) => ({ name, label: LABELS[name], unit: effectUnits[name] }));
+  }
 
   protected set(change: Partial<EffectsDraft>): void {
     this.draft.update((draft) => ({ ...draft, ...change }));

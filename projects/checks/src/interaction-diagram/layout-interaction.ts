@@ -68,7 +68,7 @@ const decimals = (ticks: readonly number[]): number =>
 
 /** Round numbers from nothing to just beyond the greatest. */
 function ticksTo(greatest: number): number[] {
-  const rough = Math.max(greatest, 1e-9) / 4;
+  const rough = Math.max(greatest, 1e-9) / 5;
   const power = 10 ** Math.floor(Math.log10(rough));
   const step = ([1, 2, 2.5, 5, 10].find((one) => one * power >= rough) ?? 10) * power;
   const count = Math.ceil(greatest / step + 1e-9);

@@ -98,6 +98,9 @@ function marksBeside(fit: Fit, { bounds, marks }: SectionModel): Label[] {
   });
 }
 
+/** A thin plate's strip is drawn no thinner, or its lines could not be seen. */
+const THINNEST = 9;
+
 /** A strip with lines at 45° every few px, so that it shows without any colour. */
 function hatch(
   fit: Fit,
@@ -108,14 +111,19 @@ function hatch(
     readonly height: number;
   },
 ) {
-  const [left, right] = [fit.x(strip.y - strip.width / 2), fit.x(strip.y + strip.width / 2)];
-  const [top, bottom] = [fit.y(strip.z - strip.height / 2), fit.y(strip.z + strip.height / 2)];
+  const half = (size: number): number => Math.max(size * fit.scale, THINNEST) / 2;
+  const [x, y] = [fit.x(strip.y), fit.y(strip.z)];
+  const [left, right] = [x - half(strip.width), x + half(strip.width)];
+  const [top, bottom] = [y - half(strip.height), y + half(strip.height)];
   const parts: string[] = [];
   for (let sum = left + top + 4; sum < right + bottom; sum += 4) {
     const [x1, x2] = [Math.max(left, sum - bottom), Math.min(right, sum - top)];
     parts.push(`M${round(x1)} ${round(sum - x1)}L${round(x2)} ${round(sum - x2)}`);
   }
-  return { edge: `M${left} ${top}H${right}V${bottom}H${left}Z`, lines: parts.join('') };
+  return {
+    edge: `M${round(left)} ${round(top)}H${round(right)}V${round(bottom)}H${round(left)}Z`,
+    lines: parts.join(''),
+  };
 }
 
 const round = (value: number): number => Math.round(value * 10) / 10;

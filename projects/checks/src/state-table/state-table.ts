@@ -21,6 +21,11 @@ export class StateTable {
   readonly readonly = input(false);
 
   private readonly keyboard = new RowFocus('.ht-state', 'sigmaX');
+  protected readonly heads = [
+    { symbol: 'σ', index: 'x', words: 'along' },
+    { symbol: 'σ', index: 'z', words: 'across' },
+    { symbol: 'τ', index: '', words: 'shear' },
+  ] as const;
   protected readonly fields: readonly {
     readonly name: StressComponent;
     readonly label: string;

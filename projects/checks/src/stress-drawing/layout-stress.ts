@@ -199,8 +199,12 @@ function labelsOf(
     const wide = textWidth(text);
     const reach = (near.t / 2) * fit.scale + (Math.abs(point[of]) / most) * REACH + 4;
     const x = fit.x(near.station.y) + out.y * reach;
-    const at = fit.y(near.station.z) + out.z * (reach + 6) + 4;
     const flat = Math.abs(out.y) < 0.4;
+    // Beside the end of an upright wall the next wall runs: the value stands a line nearer the middle.
+    const middle = fit.y(0);
+    const foot = fit.y(near.station.z);
+    const inwards = flat || Math.abs(foot - middle) < 24 ? 0 : Math.sign(middle - foot) * 10;
+    const at = foot + out.z * (reach + 6) + 4 + inwards;
     const left = flat ? x - wide / 2 : out.y > 0 ? x : x - wide;
     const begin = Math.max(0, Math.min(left, width - wide));
     const clash = placed.some(
