@@ -139,7 +139,7 @@ export function isShifted(together, axis) {
 }
 
 /** The axial force over what shear and buckling leave for it. @param {Together} together */
-export function axialSum(together) {
+function axialSum(together) {
   const { member, of, axial, compressed } = together;
   if (axial === 0) return 0;
   const withShear = axialWithShear(together);

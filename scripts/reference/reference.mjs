@@ -1,7 +1,6 @@
 /** What `POST /v1/checks/section` owes for a request, calculated apart from the engine. */
 import { classAbout, worst } from './classes.mjs';
 import {
-  axialSum,
   bucklingSum,
   isPlastic,
   isShifted,
@@ -9,6 +8,7 @@ import {
   momentWithAxial,
   plasticBiaxial,
 } from './interaction.mjs';
+import { randomRequests } from './random.mjs';
 import {
   bendingResistance,
   bucklingShear,
@@ -52,6 +52,11 @@ function against(effect, resistance, unit) {
 /** @param {number | null} sum @returns {Expected} */
 function summed(sum) {
   return { effect: sum, resistance: 1, utilisation: sum };
+}
+
+/** Requests at random with what is expected of each. @param {number} [count] */
+export function casesAtRandom(count) {
+  return randomRequests(count).map((request) => ({ request, expected: expectedOf(request) }));
 }
 
 /** @param {SectionRequest} request @returns {Answered | Refused} */
@@ -151,7 +156,7 @@ function withAxial(given) {
   }
   const isBent = moments.y > 0 || moments.z > 0;
   if (axial > 0 && !isBent && (rho.y > 0 || rho.z > 0)) {
-    made['bending-axial-y'] = summed(axialSum(given));
+    made['bending-axial-y'] = summed(linearSum(given, []));
   }
   if (moments.y > 0 && moments.z > 0) {
     made['biaxial'] = summed(isPlastic(given) ? plasticBiaxial(given) : linearSum(given, AXES));

@@ -26,10 +26,10 @@ export async function callScript(
       outcome = { stopped: error.message };
     }
     console.log(JSON.stringify(outcome));`;
-  const { stdout } = await promisify(execFile)(process.execPath, [
-    '--input-type=module',
-    '--eval',
-    code,
-  ]);
+  const { stdout } = await promisify(execFile)(
+    process.execPath,
+    ['--input-type=module', '--eval', code],
+    { maxBuffer: 2 ** 28 },
+  );
   return JSON.parse(stdout.trim().split('\n').at(-1) ?? '') as Outcome;
 }

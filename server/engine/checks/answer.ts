@@ -29,6 +29,12 @@ export interface Findings {
   readonly notCovered: readonly string[];
   readonly advisories: readonly AdvisoryAnswer[];
   readonly standards: readonly string[];
+  /** Of a member under loads. */
+  readonly member?: MemberFindings;
+}
+
+/** What only a member under loads has. */
+export interface MemberFindings {
   readonly reactions: ReactionAnswer[];
   /** Made only for a full answer. */
   readonly combinations: () => CombinationLine[];
@@ -48,7 +54,7 @@ export function assemble(findings: Findings): CheckAnswer {
     notCovered: [...findings.notCovered],
     verifications: [...verifications],
     values: { ...findings.common.values, ...governing?.values },
-    reactions: findings.reactions,
+    ...(findings.member && { reactions: findings.member.reactions }),
     profile: stampOf(profile),
     advisories: [...findings.advisories],
     basis: { standards: [...findings.standards], engine: ENGINE_VERSION },
@@ -59,15 +65,20 @@ export function assemble(findings: Findings): CheckAnswer {
   return {
     ...answer,
     steps: [...findings.common.steps, ...findings.steps],
-    combinations: listed(findings),
-    diagrams: findings.diagrams(),
+    ...(findings.member && {
+      combinations: listed(findings.member, verifications),
+      diagrams: findings.member.diagrams(),
+    }),
   };
 }
 
 /** More combinations than anyone reads: then only those that the answer names are listed. */
 const MOST_LISTED = 500;
 
-function listed({ combinations, verifications, reactions }: Findings): CombinationLine[] {
+function listed(
+  { combinations, reactions }: MemberFindings,
+  verifications: Findings['verifications'],
+): CombinationLine[] {
   const all = combinations();
   if (all.length <= MOST_LISTED) return all;
   const named = new Set<string | null | undefined>(

@@ -20,6 +20,8 @@ export interface Finding {
   /** x in mm from the first support; null where the whole member is meant. */
   readonly place: { readonly span: number; readonly x: number } | null;
   readonly sheet: WorkingSheet;
+  /** Named point of the section or state of stress where it governs. */
+  readonly point?: string;
   /** Why there is no utilisation. */
   readonly reason?: string;
 }
@@ -45,7 +47,9 @@ export function verificationAnswer(
     at: place && placeAnswer(place, supports),
     values: sheet.values,
   };
-  return reason === undefined ? base : { ...base, reason };
+  const { point } = finding;
+  const placed = point === undefined ? base : { ...base, point };
+  return reason === undefined ? placed : { ...placed, reason };
 }
 
 function utilisationOf({ effect, resistance, reason }: Finding): number | null {

@@ -77,7 +77,8 @@ export const channelShift = formula({
   title: 'Shift of the centroid under compression alone',
   unit: 'mm',
   clause: 'EN 1993-1-1 6.2.2.5(4)',
-  expression: 'abs(y_c - (A * y_c - A_lost_f * y_f - A_lost_w * t_w / 2) / (A - A_lost_f - A_lost_w))',
+  expression:
+    'abs(y_c - (A * y_c - A_lost_f * y_f - A_lost_w * t_w / 2) / (A - A_lost_f - A_lost_w))',
   where: {
     y_c: 'mm',
     A: 'mm^2',
@@ -161,19 +162,26 @@ export const effectiveInertiaZ = formula({
   title: 'Effective second moment of area about z-z',
   unit: 'mm^4',
   clause: SECTION,
-  expression:
-    'I_z - A_lost_f * (y_f^2 + l_f^2 / 12) - (A_lost_f * y_f)^2 / (A - A_lost_f)',
+  expression: 'I_z - A_lost_f * (y_f^2 + l_f^2 / 12) - (A_lost_f * y_f)^2 / (A - A_lost_f)',
   where: { I_z: 'mm^4', A_lost_f: 'mm^2', y_f: 'mm', l_f: 'mm', A: 'mm^2' },
 });
 
-/** At the toe as it is, whose stress the plate's slenderness stands for. */
+/** At the end of what counts of the compressed flange, or at the other side, y_other from the centroid. */
 export const effectiveModulusZ = formula({
   symbol: 'W_eff_z',
   title: 'Effective section modulus about z-z',
   unit: 'mm^3',
   clause: SECTION,
-  expression: 'I_eff_z / (y_max + A_lost_f * y_f / (A - A_lost_f))',
-  where: { I_eff_z: 'mm^4', y_max: 'mm', A_lost_f: 'mm^2', y_f: 'mm', A: 'mm^2' },
+  expression:
+    'I_eff_z / max(y_f - l_f / 2 + A_lost_f * y_f / (A - A_lost_f), y_other - A_lost_f * y_f / (A - A_lost_f))',
+  where: {
+    I_eff_z: 'mm^4',
+    y_f: 'mm',
+    l_f: 'mm',
+    A_lost_f: 'mm^2',
+    A: 'mm^2',
+    y_other: 'mm',
+  },
 });
 
 /** Of a channel with its web compressed: the web's strip is lost at y_w from the centroid. */

@@ -42,12 +42,12 @@ export const webBucklingResistance = formula({
 });
 
 export const webBucklingCriterion = formula({
-  symbol: 'eta_3',
+  symbol: 'eta_3_bar',
   title: 'Shear buckling of the web',
   unit: '1',
   clause: 'EN 1993-1-5 5.5(1) (5.10)',
-  expression: 'V_z_Ed / V_bw_Rd',
-  where: { V_z_Ed: 'kN', V_bw_Rd: 'kN' },
+  expression: 'V_Ed / V_bw_Rd',
+  where: { V_Ed: 'kN', V_bw_Rd: 'kN' },
 });
 
 /** The flanges alone, less what axial force takes of them (5.4(2)). */
@@ -56,8 +56,7 @@ export const flangesAlone = formula({
   title: 'Bending resistance of the flanges alone',
   unit: 'kN m',
   clause: 'EN 1993-1-5 7.1(1) and 5.4(2)',
-  expression:
-    'A_f * (h - t_f) * f_y / gamma_M0 * max(1 - N_Ed * gamma_M0 / (2 * A_f * f_y), 0)',
+  expression: 'A_f * (h - t_f) * f_y / gamma_M0 * max(1 - N_Ed * gamma_M0 / (2 * A_f * f_y), 0)',
   where: { A_f: 'mm^2', h: 'mm', t_f: 'mm', f_y: 'N/mm^2', gamma_M0: '1', N_Ed: 'kN' },
 });
 
@@ -86,7 +85,6 @@ export const bendingWithWebBuckling = formula({
   title: 'Bending about y-y with shear buckling',
   unit: '1',
   clause: 'EN 1993-1-5 7.1(1) (7.1)',
-  expression:
-    'M_y_Ed / M_pl_Rd + (1 - M_f_Rd / M_pl_Rd) * (2 * V_z_Ed / V_bw_Rd - 1)^2',
+  expression: 'M_y_Ed / M_pl_Rd + (1 - M_f_Rd / M_pl_Rd) * (2 * V_z_Ed / V_bw_Rd - 1)^2',
   where: { M_y_Ed: 'kN m', M_pl_Rd: 'kN m', M_f_Rd: 'kN m', V_z_Ed: 'kN', V_bw_Rd: 'kN' },
 });

@@ -101,7 +101,8 @@ export const sectorialMomentOfChannel = formula({
   title: 'Greatest sectorial moment of the flange over its thickness',
   unit: 'mm^3',
   clause: 'Vlasov, thin-walled bars',
-  expression: '(h - t_f) / 4 * max((b - t_w / 2 - e_0)^2, abs((b - t_w / 2) * (b - t_w / 2 - 2 * e_0)))',
+  expression:
+    '(h - t_f) / 4 * max((b - t_w / 2 - e_0)^2, abs((b - t_w / 2) * (b - t_w / 2 - 2 * e_0)))',
   where: { h: 'mm', t_f: 'mm', b: 'mm', t_w: 'mm', e_0: 'mm' },
 });
 

@@ -13,14 +13,14 @@ export function flowPerForce(
 }
 
 /** Greatest elastic shear stress in the legs of an angle over the force along one axis, 1/mm². */
-export function greatestShear(
-  shape: ShapeOf<'angle'>,
-  gross: Gross,
-  direction: 'z' | 'y',
-): number {
+export function greatestShear(shape: ShapeOf<'angle'>, gross: Gross, direction: 'z' | 'y'): number {
   const plane = sectionPlane(shape, gross);
   const peaks = angleStresses(shape, gross).walls.map(({ stations }) => {
-    const [start, middle, end] = [stations[0], stations[stations.length / 2 - 0.5], stations.at(-1)];
+    const [start, middle, end] = [
+      stations[0],
+      stations[stations.length / 2 - 0.5],
+      stations.at(-1),
+    ];
     if (!start || !middle || !end) throw new Error('a wall has two ends and a middle');
     return peakOfParabola(
       ...([start, middle, end].map((one) => flowPerForce(one, plane, direction)) as [

@@ -62,7 +62,9 @@ export function platesOf(shape: Plated, axis: 'y' | 'z', sheet: Sheet): Plates {
     return {
       flange: {
         ...wall,
-        c: aboutY ? sheet.evaluate(wallAsFlange.b, { b, t }) : sheet.evaluate(wallAsFlange.h, { h, t }),
+        c: aboutY
+          ? sheet.evaluate(wallAsFlange.b, { b, t })
+          : sheet.evaluate(wallAsFlange.h, { h, t }),
       },
       web: {
         ...wall,

@@ -48,10 +48,16 @@ export function effectiveInCompression(
   const plates = sheet.evaluate(effectiveArea, { A: gross.A, A_lost_f, A_lost_w });
   const A_eff =
     properties.A < plates
-      ? sheet.given('A_eff', properties.A, 'mm^2', 'The caller’s area is the lesser', 'Given by the caller')
+      ? sheet.given(
+          'A_eff',
+          properties.A,
+          'mm^2',
+          'The caller’s area is the lesser',
+          'Given by the caller',
+        )
       : plates;
   if (shape.shape !== 'channel') return { A_eff, e_N_z: 0 };
-  const y_f = shape.b - (flangeLost.length / 2);
+  const y_f = shape.b - flangeLost.length / 2;
   const e_N_z = sheet.evaluate(channelShift, {
     y_c: gross.y_c ?? 0,
     A: gross.A,
@@ -61,6 +67,23 @@ export function effectiveInCompression(
     t_w: shape.t_w,
   });
   return { A_eff, e_N_z };
+}
+
+/** Area of one flange in bending about y-y, mm², less what class 4 takes of it in compression. */
+export function effectiveFlange(section: SteelSection, sheet: Sheet): number {
+  const shape = reducible(section);
+  const { flange } = platesOf(shape, 'y', sheet);
+  const epsilon = sheet.evaluate(epsilonFactor, { f_y: section.f_y });
+  const limit = (flange.kind === 'outstand' ? 14 : 42) * epsilon;
+  const slender = flange.c / flange.t > limit;
+  const lost = slender ? lostOf(flange, flange.count / 2, 1, epsilon, sheet).area : 0;
+  return sheet.given(
+    'A_f',
+    shape.b * flange.t - lost,
+    'mm^2',
+    'Area of one flange that counts',
+    'EN 1993-1-5 7.1(1)',
+  );
 }
 
 /** W_eff_y or W_eff_z in mm³ under that moment alone. */
@@ -81,7 +104,7 @@ function reducible(section: SteelSection) {
   );
 }
 
-interface Lost {
+export interface Lost {
   readonly area: number;
   /** Length of one strip, mm. */
   readonly length: number;
@@ -89,7 +112,7 @@ interface Lost {
 }
 
 /** What a plate loses under a stress ratio psi; outstands always as uniformly compressed. */
-function lostOf(plate: Plate, n: number, psi: number, epsilon: number, sheet: Sheet): Lost {
+export function lostOf(plate: Plate, n: number, psi: number, epsilon: number, sheet: Sheet): Lost {
   const rho = reductionOf(plate, psi, epsilon, sheet);
   const { c, t } = plate;
   return {
@@ -125,26 +148,42 @@ function bucklingFactor(kind: Plate['kind'], psi: number, sheet: Sheet): number 
     : sheet.evaluate(bucklingFactorOfBentWeb, { psi });
 }
 
+/** What bending about an axis leaves out of flange and web. */
+export interface LostInBending {
+  readonly flange: Plate;
+  readonly web: Plate;
+  /** Area lost of the compressed flange, its middle from the centroid. */
+  readonly A_lost_f: number;
+  readonly z_f: number;
+  /** Length lost of each web, its middle from mid-depth towards the compressed flange. */
+  readonly l_w: number;
+  readonly z_w: number;
+}
+
 /** The compressed flange first, then the web with the axis that leaves; not repeated (4.4(3)). */
+export function lostInBending(section: SteelSection, axis: 'y' | 'z', sheet: Sheet): LostInBending {
+  const shape = reducible(section);
+  const { flange, web } = platesOf(shape, axis, sheet);
+  const epsilon = sheet.evaluate(epsilonFactor, { f_y: section.f_y });
+  const z_f = ((axis === 'y' ? shape.h : shape.b) - flange.t) / 2;
+  const { A } = section.gross;
+  const A_lost_f = lostOf(flange, flange.count / 2, 1, epsilon, sheet).area;
+  const psi = sheet.evaluate(stressRatioOfReducedWeb, { c_w: web.c, A_lost_f, z_f, A });
+  const rho_p = reductionOf(web, psi, epsilon, sheet);
+  const l_w = sheet.evaluate(lostLengthOfWeb, { rho_p, c_w: web.c, psi });
+  const z_w = sheet.evaluate(lostPlaceOfWeb, { c_w: web.c, rho_p, psi, l_w });
+  return { flange, web, A_lost_f, z_f, l_w, z_w };
+}
+
 function bentPlates(
   section: SteelSection,
   shape: ShapeOf<'I'> | ShapeOf<'channel'> | ShapeOf<'RHS'>,
   axis: 'y' | 'z',
   sheet: Sheet,
 ): number {
-  const { gross, properties, f_y } = section;
-  const { flange, web } = platesOf(shape, axis, sheet);
-  const epsilon = sheet.evaluate(epsilonFactor, { f_y });
-  const h = axis === 'y' ? shape.h : shape.b;
-  const z_f = (h - flange.t) / 2;
-  const { A } = gross;
-  const A_lost_f = lostOf(flange, flange.count / 2, 1, epsilon, sheet).area;
-  const psi = sheet.evaluate(stressRatioOfReducedWeb, { c_w: web.c, A_lost_f, z_f, A });
-  const rho_p = reductionOf(web, psi, epsilon, sheet);
-  const l_w = sheet.evaluate(lostLengthOfWeb, { rho_p, c_w: web.c, psi });
-  const z_w = sheet.evaluate(lostPlaceOfWeb, { c_w: web.c, rho_p, psi, l_w });
-  const A_lost_w = web.count * web.t * l_w;
-  const holes = { A, A_lost_f, z_f, A_lost_w, z_w };
+  const { gross, properties } = section;
+  const { flange, web, A_lost_f, z_f, l_w, z_w } = lostInBending(section, axis, sheet);
+  const holes = { A: gross.A, A_lost_f, z_f, A_lost_w: web.count * web.t * l_w, z_w };
   const e_M = sheet.evaluate(shiftUnderBending, holes);
   const I_eff = sheet.evaluate(effectiveInertia, {
     ...holes,
@@ -153,6 +192,7 @@ function bentPlates(
     l_w,
     e_M,
   });
+  const h = axis === 'y' ? shape.h : shape.b;
   const W_eff = sheet.evaluate(modulusOfPlates, { I_eff, h, e_M });
   const symbol = axis === 'y' ? 'W_eff_y' : 'W_eff_z';
   return lesser(symbol, W_eff, axis === 'y' ? properties.W_el_y : properties.W_el_z, sheet);
@@ -171,8 +211,10 @@ function compressedToes(
   const lost = lostOf(flange, 2, 1, epsilon, sheet);
   const y_max = shape.shape === 'I' ? shape.b / 2 : shape.b - y_c;
   const strip = { A_lost_f: lost.area, y_f: y_max - lost.length / 2, A };
-  const I_eff_z = sheet.evaluate(effectiveInertiaZ, { ...strip, I_z, l_f: lost.length });
-  const toes = sheet.evaluate(effectiveModulusZ, { ...strip, I_eff_z, y_max });
+  const l_f = lost.length;
+  const I_eff_z = sheet.evaluate(effectiveInertiaZ, { ...strip, I_z, l_f });
+  const y_other = shape.b - y_max;
+  const toes = sheet.evaluate(effectiveModulusZ, { ...strip, I_eff_z, l_f, y_other });
   if (shape.shape === 'I') return lesser('W_eff_z', toes, properties.W_el_z, sheet);
   const A_lost_w = lostOf(web, 1, 1, epsilon, sheet).area;
   const { b, t_w } = shape;

@@ -5,9 +5,7 @@ import type { UnitName } from '../../units/units';
 import type { SectionInput } from '../contract';
 import { refuse } from '../refuse';
 
-export type Overrides = NonNullable<
-  Extract<SectionInput, { properties?: unknown }>['properties']
->;
+export type Overrides = NonNullable<Extract<SectionInput, { properties?: unknown }>['properties']>;
 
 /** The contract's names of properties, the symbol and unit of each. */
 const overridable = {
@@ -47,7 +45,10 @@ export function overridden(
 }
 
 /** Shear areas that the caller set in place of the formulas'. */
-export function shearAreasOf({ Avz, Avy }: Overrides): { readonly z?: number; readonly y?: number } {
+export function shearAreasOf({ Avz, Avy }: Overrides): {
+  readonly z?: number;
+  readonly y?: number;
+} {
   return {
     ...(Avz === undefined ? {} : { z: readQuantity(Avz, 'mm^2') }),
     ...(Avy === undefined ? {} : { y: readQuantity(Avy, 'mm^2') }),

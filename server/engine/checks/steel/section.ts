@@ -22,6 +22,8 @@ export interface SteelSection extends SteelStrength {
   readonly shearAreas: { readonly z?: number; readonly y?: number };
   readonly gamma_M0: number;
   readonly eta: number;
+  /** Partial factors that only some verifications use, read when they are. */
+  factor(name: 'gamma_M1' | 'gamma_M2'): { readonly value: number; readonly clause: string };
   /** Members side by side, and the part of loads and effects that one of them carries. */
   readonly count: number;
   readonly share: number;
@@ -49,7 +51,10 @@ export function readSteelSection(
   profile: ProfileReader,
   sheet: Sheet,
 ): SteelSection {
-  const { name, shape, entry } = readShape(section);
+  const { name, shape, entry, formingAssumed } = readShape(section);
+  if (entry?.family === 'timber') {
+    refuse('contradiction', '/section', `${name} is a size of timber, and the material is steel.`);
+  }
   const input: SetOfMembers = typeof section === 'string' ? {} : section;
   const given = input.properties ?? {};
   const gross = propertiesOf(shape, sheet);
@@ -68,11 +73,15 @@ export function readSteelSection(
     shearAreas: shearAreasOf(given),
     gamma_M0,
     eta: profile.number('steel.eta'),
+    factor: (factorName) => {
+      const path = `steel.${factorName}`;
+      return { value: profile.number(path), clause: profile.leaf(path).clause };
+    },
     count,
     share: shareOf(input.share, count),
     connected: input.connected ?? false,
     overridden: Object.keys(given),
-    formingAssumed: false,
+    formingAssumed,
     weight: (entry?.mass ?? gross.A * STEEL_DENSITY * 1e3) * GRAVITY * 1e-3,
   };
 }

@@ -1,4 +1,9 @@
-import { findSection, similarSections, type CatalogueEntry } from '../../sections/catalogue';
+import {
+  findSection,
+  formingIsSaid,
+  similarSections,
+  type CatalogueEntry,
+} from '../../sections/catalogue';
 import { cornerRadii } from '../../sections/shapes/hollow';
 import { impossibilityOf } from '../../sections/shapes/possible';
 import type { SectionShape } from '../../sections/shapes/shape';
@@ -16,6 +21,8 @@ export interface NamedShape {
   readonly shape: SectionShape;
   /** Undefined for a section by its dimensions. */
   readonly entry?: CatalogueEntry;
+  /** Hot-finished and cold-formed ones of this size exist, and the name does not say which. */
+  readonly formingAssumed: boolean;
 }
 
 /** @throws {Refusal} `unknown-section`, `impossible-section` */
@@ -27,7 +34,10 @@ export function readShape(section: SectionInput): NamedShape {
 
 function ofCatalogue({ designation }: Named, pointer: string): NamedShape {
   const entry = findSection(designation);
-  if (entry) return { name: entry.designation, shape: entry, entry };
+  if (entry) {
+    const formingAssumed = !formingIsSaid(designation);
+    return { name: entry.designation, shape: entry, entry, formingAssumed };
+  }
   const similar = similarSections(designation).join(', ');
   return refuse(
     'unknown-section',
@@ -42,7 +52,7 @@ function drawn(section: Drawn): NamedShape {
   if (impossible) {
     refuse('impossible-section', `/section/${impossible.dimension}`, impossible.message);
   }
-  return { name: nameOf(section), shape };
+  return { name: nameOf(section), shape, formingAssumed: false };
 }
 
 const mm = (value: number | string | undefined): number =>

@@ -81,11 +81,7 @@ function areaOfWhole(section: SteelSection, direction: Direction, sheet: Sheet):
 }
 
 /** N, by yield of the shear area. */
-export function shearResistance(
-  section: SteelSection,
-  direction: Direction,
-  sheet: Sheet,
-): number {
+export function shearResistance(section: SteelSection, direction: Direction, sheet: Sheet): number {
   const { f_y, gamma_M0 } = section;
   return direction === 'z'
     ? sheet.evaluate(shearResistanceZ, { A_v_z: shearArea(section, 'z', sheet), f_y, gamma_M0 })

@@ -1,5 +1,6 @@
 import type { AdvisoryAnswer, WalerRequest } from '../contract';
 import type { SolvedCase } from '../continuous/solve';
+import { sectionAdvisories } from '../steel/advisories';
 import type { SteelSection } from '../steel/section';
 
 /** What a competent reader of the answer will want to know. */
@@ -8,15 +9,7 @@ export function advisoriesOf(
   section: SteelSection,
   cases: readonly SolvedCase[],
 ): AdvisoryAnswer[] {
-  const list: AdvisoryAnswer[] = [];
-  if (section.gamma_M0 < 1.1) {
-    list.push({
-      code: 'material-factor-below-1.10',
-      severity: 'caution',
-      message: `The profile takes gamma_M0 = ${section.gamma_M0}. For steel temporary works, other than single-use, BS 5975 asks for at least 1.10.`,
-      clause: 'BS 5975:2019 13.3.9',
-    });
-  }
+  const list = sectionAdvisories(section);
   if (section.count > 1 && !section.connected) {
     list.push({
       code: 'unequal-sharing',
@@ -44,13 +37,6 @@ export function advisoriesOf(
       message:
         'Variable loads are taken on all spans or on none, as asked. Span by span they may do more.',
       clause: 'EN 1990 6.4.3.1(4)',
-    });
-  }
-  if (section.overridden.length > 0) {
-    list.push({
-      code: 'properties-given',
-      severity: 'caution',
-      message: `Properties are the caller's own: ${section.overridden.join(', ')}.`,
     });
   }
   list.push(...setsByOne(request, cases), ...settlement(cases));

@@ -77,9 +77,11 @@ function run(request: WalerRequest, { profile: revision, detail }: CheckContext)
     notCovered: NOT_COVERED,
     advisories: advisoriesOf(request, section, cases),
     standards: ['EN 1990:2002+A1:2005', 'EN 1993-1-1:2005+A1:2014'],
-    reactions: frame ? reactionsOf(frame, cases) : [],
-    combinations: () => cases.map(combinationLine),
-    diagrams: () => diagramsOf(cases, section.share),
+    member: {
+      reactions: frame ? reactionsOf(frame, cases) : [],
+      combinations: () => cases.map(combinationLine),
+      diagrams: () => diagramsOf(cases, section.share),
+    },
   });
 }
 

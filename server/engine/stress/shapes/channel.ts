@@ -1,5 +1,13 @@
 import type { ShapeOf } from '../../sections/shapes/shape';
-import { plain, SIDES, steps, type Gross, type NamedStation, type Station, type StressShape } from '../station';
+import {
+  plain,
+  SIDES,
+  steps,
+  type Gross,
+  type NamedStation,
+  type Station,
+  type StressShape,
+} from '../station';
 
 /** Toes, back corners, junctions at the end of the root, and the web's centre; web at the left. */
 export function channelStresses(shape: ShapeOf<'channel'>, gross: Gross): StressShape {

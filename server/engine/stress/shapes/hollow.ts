@@ -1,5 +1,13 @@
 import type { ShapeOf } from '../../sections/shapes/shape';
-import { plain, SIDES, steps, type Gross, type NamedStation, type Station, type StressShape } from '../station';
+import {
+  plain,
+  SIDES,
+  steps,
+  type Gross,
+  type NamedStation,
+  type Station,
+  type StressShape,
+} from '../station';
 
 /**
  * Corners and the middles of the walls. The flow runs clockwise as drawn: down on the right, up on

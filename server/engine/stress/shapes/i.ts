@@ -1,5 +1,14 @@
 import type { ShapeOf } from '../../sections/shapes/shape';
-import { plain, SIDES, steps, type Gross, type StressShape, type Station, type NamedStation, type Wall } from '../station';
+import {
+  plain,
+  SIDES,
+  steps,
+  type Gross,
+  type StressShape,
+  type Station,
+  type NamedStation,
+  type Wall,
+} from '../station';
 
 /** Flange tips, junctions at the end of the root, flange centres and the web's centre. */
 export function iStresses(shape: ShapeOf<'I'>, gross: Gross): StressShape {

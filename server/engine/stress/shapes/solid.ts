@@ -24,7 +24,11 @@ export function rectangleStresses({ h, b }: ShapeOf<'rectangle'>): StressShape {
     })),
   );
   const middles = SIDES.flatMap(({ sign, vertical, horizontal }): NamedStation[] => [
-    { ...at(0, (sign * h) / 2), id: `mid-side-${vertical}`, title: `Middle of the ${vertical} side` },
+    {
+      ...at(0, (sign * h) / 2),
+      id: `mid-side-${vertical}`,
+      title: `Middle of the ${vertical} side`,
+    },
     {
       ...at((sign * b) / 2, 0),
       id: `mid-side-${horizontal}`,

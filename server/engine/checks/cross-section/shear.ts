@@ -1,0 +1,110 @@
+import type { Sheet } from '../../formula/sheet';
+import { shearReduction } from '../../steel/bending-shear';
+import { epsilonFactor } from '../../steel/classification';
+import {
+  slenderWebFactor,
+  stockyWebFactor,
+  webBucklingResistance,
+  webSlendernessInShear,
+} from '../../steel/shear-buckling';
+import { shearWithTorsion } from '../../steel/torsion';
+import type { SteelSection } from '../steel/section';
+import { buckles, shearResistance, websOf, type Direction } from '../steel/shear';
+import type { CrossEffects } from './effects';
+import { stVenantStress, warpingShearStress } from './torsion';
+
+/** Whether any axis is as good as any other. */
+export function isRound({ shape }: SteelSection): boolean {
+  return shape.shape === 'CHS' || shape.shape === 'round';
+}
+
+/** The shear force along an axis; of a round section the resultant, whichever axis is asked for. */
+export function shearAlong(
+  section: SteelSection,
+  { V_z, V_y }: CrossEffects,
+  direction: Direction,
+): number {
+  if (isRound(section)) return Math.hypot(V_z, V_y);
+  return direction === 'z' ? V_z : V_y;
+}
+
+/** V_pl_Rd less what torsion takes first (6.2.7(9)), N. */
+export function shearLeftByTorsion(
+  section: SteelSection,
+  effects: CrossEffects,
+  direction: Direction,
+  sheet: Sheet,
+): number {
+  const V_pl_Rd = shearResistance(section, direction, sheet);
+  if (effects.T_t === 0 && effects.T_w === 0) return V_pl_Rd;
+  const { shape, f_y, gamma_M0 } = section;
+  const tau_t_Ed = stVenantStress(section, effects, sheet);
+  const formulas = shearWithTorsion[direction];
+  const values = { V_pl_Rd, tau_t_Ed, f_y, gamma_M0 };
+  if (shape.shape === 'I' && direction === 'z') return sheet.evaluate(formulas.flanged, values);
+  if (shape.shape === 'I' || shape.shape === 'channel') {
+    const tau_w_Ed = warpingShearStress(section, effects, sheet);
+    return sheet.evaluate(formulas.warped, { ...values, tau_w_Ed });
+  }
+  return sheet.evaluate(formulas.hollow, values);
+}
+
+/** V_bw_Rd in N; undefined where no web is so slender that it buckles in shear. */
+export function webBuckling(
+  section: SteelSection,
+  direction: Direction,
+  sheet: Sheet,
+): number | undefined {
+  const webs = websOf(section, direction, sheet);
+  if (!webs || !buckles(section, webs, sheet)) return undefined;
+  const { f_y, eta } = section;
+  const { value, clause } = section.factor('gamma_M1');
+  const { h_w, t_w, n_w } = webs;
+  const epsilon = sheet.evaluate(epsilonFactor, { f_y });
+  const lambda_bar_w = sheet.evaluate(webSlendernessInShear, { h_w, t_w, epsilon });
+  const chi_w =
+    lambda_bar_w <= 0.83 / eta
+      ? sheet.evaluate(stockyWebFactor, { eta })
+      : sheet.evaluate(slenderWebFactor, { lambda_bar_w });
+  const gamma_M1 = sheet.given('gamma_M1', value, '1', 'Partial factor of instability', clause);
+  return sheet.evaluate(webBucklingResistance, { chi_w, n_w, h_w, t_w, f_y, gamma_M1 });
+}
+
+/**
+ * Reduction of the yield of the shear area along an axis (6.2.8(3), (4)), 0 up to half of what shear
+ * may be: of yield, of what torsion leaves, or of a web that buckles.
+ */
+export function reductionByShear(
+  section: SteelSection,
+  effects: CrossEffects,
+  direction: Direction,
+  sheet: Sheet,
+): number {
+  const V_Ed = shearAlong(section, effects, direction);
+  if (V_Ed === 0) return 0;
+  const V_pl_Rd = shearLimit(section, effects, direction, sheet);
+  if (V_Ed <= 0.5 * V_pl_Rd) return 0;
+  sheet.given(`V_${direction}_Ed`, V_Ed, 'kN', 'Design shear force', 'Given by the caller');
+  if (V_pl_Rd === 0) {
+    return sheet.given('rho', 1, '1', 'Torsion leaves nothing to shear', 'EN 1993-1-1 6.2.7(9)');
+  }
+  return sheet.evaluate(shearReduction, { V_Ed, V_pl_Rd });
+}
+
+function shearLimit(
+  section: SteelSection,
+  effects: CrossEffects,
+  direction: Direction,
+  sheet: Sheet,
+): number {
+  const left = shearLeftByTorsion(section, effects, direction, sheet);
+  const buckling = webBuckling(section, direction, sheet);
+  if (buckling === undefined || buckling >= left) return left;
+  return sheet.given(
+    'V_pl_Rd',
+    buckling,
+    'kN',
+    'The web buckles first: its resistance stands in place of yield',
+    'EN 1993-1-1 6.2.8(2)',
+  );
+}

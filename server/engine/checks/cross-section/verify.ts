@@ -1,0 +1,48 @@
+import type { SteelSection } from '../steel/section';
+import type { Finding } from '../verification';
+import { bendingAxial, bendingShear, biaxial } from './combined';
+import type { CrossEffects } from './effects';
+import { isRound } from './shear';
+import {
+  bending,
+  compression,
+  shear,
+  shearBuckling,
+  shearTorsion,
+  tension,
+  torsion,
+} from './single';
+
+/** Options of one cross-section. */
+export interface CrossOptions {
+  /** mm² at holes for fasteners. */
+  readonly netArea?: number;
+  readonly withSteps: boolean;
+}
+
+/** Every verification of EN 1993-1-1 6.2 that the effects at one cross-section ask for. */
+export function verifyCrossSection(
+  section: SteelSection,
+  effects: CrossEffects,
+  { netArea, withSteps }: CrossOptions,
+): Finding[] {
+  const { compression: C, tension: N, M_y, M_z, V_z, V_y, T_t, T_w } = effects;
+  const twisted = T_t > 0 || T_w > 0;
+  return [
+    ...(N > 0 ? [tension(section, effects, netArea, withSteps)] : []),
+    ...(C > 0 ? [compression(section, effects, withSteps)] : []),
+    ...(M_y > 0 ? [bending(section, effects, 'y', withSteps)] : []),
+    ...(M_z > 0 ? [bending(section, effects, 'z', withSteps)] : []),
+    ...(V_z > 0 ? [shear(section, effects, 'z', withSteps)] : []),
+    // Of a round section shear along z-z is the resultant already.
+    ...(V_y > 0 && !(isRound(section) && V_z > 0) ? [shear(section, effects, 'y', withSteps)] : []),
+    ...shearBuckling(section, effects, withSteps),
+    ...(twisted ? [torsion(section, effects, withSteps)] : []),
+    ...(twisted ? shearTorsion(section, effects, withSteps) : []),
+    ...bendingShear(section, effects, 'y', withSteps),
+    ...bendingShear(section, effects, 'z', withSteps),
+    ...bendingAxial(section, effects, 'y', withSteps),
+    ...bendingAxial(section, effects, 'z', withSteps),
+    ...biaxial(section, effects, withSteps),
+  ];
+}
