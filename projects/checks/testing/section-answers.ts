@@ -1,4 +1,5 @@
-import type { CheckAnswer, StressPoint, StressWall } from '../src/contract';
+import type { CheckAnswer, SectionSketch, StressPoint, StressWall } from '../src/contract';
+import { answeredSection, type SectionModel } from '../src/section-drawing/section-model';
 import { answerOf, verification } from './answers';
 
 const point = (
@@ -117,4 +118,11 @@ export function statesAnswerOf(change: Partial<CheckAnswer> = {}): CheckAnswer {
     ],
     ...change,
   };
+}
+
+/** The section of an answer as it is drawn. */
+export function modelOf(sketch: SectionSketch | undefined): SectionModel {
+  const model = sketch ? answeredSection(sketch) : null;
+  if (!model) throw new Error('The answer has no section that can be drawn.');
+  return model;
 }

@@ -178,7 +178,8 @@ describe('the runner', () => {
 
   it('does not ask again what was refused', async () => {
     const problem = json({ detail: 'no', errors: [] }, 422);
-    const refuse = () => new ApiClient(access, () => Promise.resolve(problem)).check('waler', request);
+    const refuse = () =>
+      new ApiClient(access, () => Promise.resolve(problem)).check('waler', request);
     const { runner, call } = withAnswers(refuse);
     await Promise.all([runner.ask(request, true), settle()]);
     await jest.advanceTimersByTimeAsync(60_000);

@@ -55,7 +55,10 @@ export const sectionKind: CheckKind<SectionRequest, SectionCheckDraft> = {
       material,
       section: readSectionDraft(section, reader),
       effects: readEffects(effects, reader),
-      netArea: reader.quantity('/netArea', netArea, 'mm^2'),
+      netArea:
+        netArea === writeQuantity(kept.netArea)
+          ? kept.netArea
+          : reader.quantity('/netArea', netArea, 'mm^2'),
       vonMises: vonMises === (kept.vonMises ?? false) ? kept.vonMises : vonMises,
     };
     const wanting = [

@@ -1,8 +1,7 @@
-import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { answerOf } from '../../testing/answers';
-import { HEADTREE_FETCH } from '../api/api-client';
+import { CheckBench, type Reply } from '../../testing/check-bench';
 import type { ApiError } from '../api/api-error';
-import type { CheckAnswer, ProblemItem, WalerRequest } from '../contract';
+import type { WalerRequest } from '../contract';
 import { WalerCheckHarness } from './testing/waler-check-harness';
 import { WalerCheck } from './waler-check';
 
@@ -16,65 +15,35 @@ const northFace: WalerRequest = {
   lossOfProp: [1],
 };
 
-type Reply = { answer: CheckAnswer } | { problem: ProblemItem[] } | 'away';
-
 describe('the waler check', () => {
   beforeEach(() => jest.useFakeTimers());
   afterEach(() => jest.useRealTimers());
 
   let reply: Reply;
-  let sent: WalerRequest[];
-  let fixture: ComponentFixture<WalerCheck>;
+  let bench: CheckBench<WalerRequest, WalerCheck>;
+  const pass = (ms?: number) => {
+    bench.reply = reply;
+    return bench.pass(ms);
+  };
 
-  const response = (body: unknown, status = 200) =>
-    ({
-      ok: status < 300,
-      status,
-      headers: new Headers(),
-      json: () => Promise.resolve(body),
-    }) as Response;
-
-  function respond(url: string, init: RequestInit): Promise<Response> {
-    if (url.includes('/v1/formulas/')) return Promise.resolve(response({}, 404));
-    if (!url.includes('/v1/checks/'))
-      return Promise.resolve(response({ items: [], nextPageToken: null }));
-    sent.push(JSON.parse(init.body as string) as WalerRequest);
-    if (reply === 'away') return Promise.reject(new TypeError('network'));
-    if ('answer' in reply) return Promise.resolve(response(reply.answer));
-    return Promise.resolve(
-      response({ code: 'not-valid', detail: 'Not valid.', errors: reply.problem }, 422),
-    );
-  }
-
-  async function shown(value: WalerRequest | null, inputs: Record<string, unknown> = {}) {
-    sent = [];
-    TestBed.configureTestingModule({ providers: [{ provide: HEADTREE_FETCH, useValue: respond }] });
-    fixture = TestBed.createComponent(WalerCheck);
-    fixture.componentRef.setInput('value', value);
-    fixture.componentRef.setInput('apiKey', 'htp_x');
-    for (const [name, input] of Object.entries(inputs)) fixture.componentRef.setInput(name, input);
-    await pass(300);
-    return new WalerCheckHarness(fixture.nativeElement as Element);
-  }
-
-  async function pass(ms = 300): Promise<void> {
-    fixture.detectChanges();
-    await jest.advanceTimersByTimeAsync(ms);
-    fixture.detectChanges();
+  async function shown(value: WalerRequest | null, inputs: object = {}) {
+    bench = new CheckBench<WalerRequest, WalerCheck>(WalerCheck, value, inputs);
+    await pass();
+    return new WalerCheckHarness(bench.host);
   }
 
   it('says what it wants while it is empty, and sends nothing', async () => {
     const sheet = await shown(null);
     expect(sheet.answer.status).toBe('Not checked yet');
     expect(sheet.answer.text).toContain('Give a section, a steel grade, spans and a load.');
-    expect(sent).toEqual([]);
+    expect(bench.sent).toEqual([]);
     expect(sheet.text).toContain('For competent persons');
   });
 
   it('checks what it is given and shows the answer', async () => {
     reply = { answer: answerOf() };
     const sheet = await shown(northFace);
-    expect(sent).toEqual([northFace]);
+    expect(bench.sent).toEqual([northFace]);
     expect(sheet.answer.status).toBe('Pass');
     expect(sheet.answer.text).toContain('0.87');
     expect(sheet.text).toContain('uk-na@2');
@@ -91,23 +60,23 @@ describe('the waler check', () => {
     reply = { answer: answerOf() };
     const sheet = await shown(northFace);
     const given: WalerRequest[] = [];
-    fixture.componentInstance.valueChange.subscribe((value) => given.push(value));
+    bench.check.valueChange.subscribe((value) => given.push(value));
     sheet.write('Spans', '3,5 m + 2400 mm');
     await pass();
     expect(given).toEqual([{ ...northFace, spans: [3.5, '2400 mm'] }]);
-    expect(sent.at(-1)).toEqual(given[0]);
+    expect(bench.sent.at(-1)).toEqual(given[0]);
   });
 
   it('leaves what is typed alone when its own value comes back', async () => {
     reply = { answer: answerOf() };
     const sheet = await shown(northFace);
-    fixture.componentInstance.valueChange.subscribe((value) =>
-      fixture.componentRef.setInput('value', value),
+    bench.check.valueChange.subscribe((value) =>
+      bench.fixture.componentRef.setInput('value', value),
     );
     sheet.write('Spans', '3,50+2,40');
     await pass();
     expect(sheet.field('Spans').value).toBe('3,50+2,40');
-    fixture.componentRef.setInput('value', northFace);
+    bench.fixture.componentRef.setInput('value', northFace);
     await pass();
     expect(sheet.field('Spans').value).toBe('3.0 + 3.0');
   });
@@ -122,7 +91,7 @@ describe('the waler check', () => {
     sheet.press('1.234 m');
     await pass();
     expect(sheet.fault('Bearing at props')).toBe('');
-    expect(sent.at(-1)?.bearing).toEqual({ length: 1.234 });
+    expect(bench.sent.at(-1)?.bearing).toEqual({ length: 1.234 });
   });
 
   it('puts what the service refuses beside its field, and the rest at the top of the answer', async () => {
@@ -150,7 +119,7 @@ describe('the waler check', () => {
     reply = { answer: answerOf() };
     await pass(2000);
     expect(sheet.answer.status).toBe('Pass');
-    expect(sent.at(-1)?.spans).toEqual([4, 4]);
+    expect(bench.sent.at(-1)?.spans).toEqual([4, 4]);
   });
 
   it('never shows an old answer as that of the form', async () => {
@@ -158,9 +127,9 @@ describe('the waler check', () => {
     const sheet = await shown(northFace);
     expect(sheet.answer.tones).toContain('pass');
     sheet.write('Spans', '9 + 9');
-    fixture.detectChanges();
+    bench.fixture.detectChanges();
     await jest.advanceTimersByTimeAsync(10);
-    fixture.detectChanges();
+    bench.fixture.detectChanges();
     expect(sheet.answer.status).toBe('Checking…');
     expect(sheet.answer.tones).not.toContain('pass');
   });
@@ -168,10 +137,10 @@ describe('the waler check', () => {
   it('refuses a secret key and sends nothing', async () => {
     const errors: ApiError[] = [];
     const sheet = await shown(northFace, { apiKey: 'htk_secret' });
-    fixture.componentInstance.failed.subscribe((error) => errors.push(error));
-    void fixture.componentInstance.check();
+    bench.check.failed.subscribe((error) => errors.push(error));
+    void bench.check.check();
     await pass();
-    expect(sent).toEqual([]);
+    expect(bench.sent).toEqual([]);
     expect(errors[0]?.kind).toBe('secret-key');
     expect(sheet.answer.text).toContain('nothing was sent');
   });
@@ -179,12 +148,12 @@ describe('the waler check', () => {
   it('checks when told to, and goes back to what it was given', async () => {
     reply = { answer: answerOf({ utilisation: 0.5 }) };
     const sheet = await shown(northFace);
-    const checked = fixture.componentInstance.check();
+    const checked = bench.check.check();
     await pass(1);
     await expect(checked).resolves.toMatchObject({ utilisation: 0.5 });
     sheet.write('Spans', '9 + 9');
     await pass();
-    fixture.componentInstance.reset();
+    bench.check.reset();
     await pass();
     expect(sheet.field('Spans').value).toBe('3.0 + 3.0');
   });
@@ -206,7 +175,7 @@ describe('the waler check', () => {
     await pass(0);
     row.write('Place', '1,5');
     await pass();
-    expect(sent.at(-1)?.loads?.[1]).toEqual({
+    expect(bench.sent.at(-1)?.loads?.[1]).toEqual({
       name: 'crane',
       nature: 'variable',
       category: 'construction',

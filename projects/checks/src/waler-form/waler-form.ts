@@ -49,7 +49,9 @@ export class WalerForm {
     source: this.faultBehind,
     computation: (behind, before) => behind || (before?.value ?? false),
   });
-  protected readonly grades = computed(() => gradeOptions(this.draft().kept.material, this.draft().grade));
+  protected readonly grades = computed(() =>
+    gradeOptions(this.draft().kept.material, this.draft().grade),
+  );
   protected readonly restraints = computed(() => options.restraintOptions(this.draft()));
   /** What the request holds and the form does not show. */
   protected readonly keptWords = computed(() => keptFields(this.draft()));

@@ -1,0 +1,42 @@
+import { TestBed } from '@angular/core/testing';
+import { sectionAnswerOf } from '../../testing/section-answers';
+import { ElementHarness } from '../../testing/element-harness';
+import { InteractionDiagram } from './interaction-diagram';
+import { isInside, layoutInteraction } from './layout-interaction';
+
+const curve = sectionAnswerOf().interaction?.[0];
+if (!curve) throw new Error('The answer has no curve.');
+const acting = (x: number, y: number) => ({ ...curve, point: { x, y } });
+
+describe('an interaction curve', () => {
+  it.each([
+    [180, 250, true],
+    [-180, 250, true],
+    [404.5, 370, true],
+    [404.6, 100, false],
+    [300, 1500, false],
+    [0, 2351, true],
+    [0, 2352, false],
+  ])('holds M = %d, N = %d: %s', (x, y, inside) => expect(isInside(acting(x, y))).toBe(inside));
+
+  it('has its point and its curve between the axes, even where the point is far outside', () => {
+    const { left, right, top, bottom, point } = layoutInteraction(acting(4000, 9000), 300);
+    expect(point.x).toBeGreaterThan(left);
+    expect(point.x).toBeLessThanOrEqual(right);
+    expect(point.y).toBeGreaterThanOrEqual(top);
+    expect(point.y).toBeLessThan(bottom);
+  });
+
+  it('says in words whether what acts is inside, as its verification has it', () => {
+    const fixture = TestBed.createComponent(InteractionDiagram);
+    fixture.componentRef.setInput('curve', acting(500, 250));
+    fixture.detectChanges();
+    const shown = new ElementHarness(fixture.nativeElement as Element);
+    expect(shown.text).toContain('what acts is outside the curve');
+    expect(shown.images[0]).toContain('what acts is outside the curve');
+    fixture.componentRef.setInput('verifications', sectionAnswerOf().verifications);
+    fixture.detectChanges();
+    expect(shown.text).toContain('what acts is inside the curve');
+    expect(shown.text).toContain('M y,Ed, kN m');
+  });
+});
