@@ -1,5 +1,6 @@
 import { readFileSync } from 'node:fs';
 import type { Page } from 'playwright-core';
+import { anyCheck } from './element';
 
 const source = readFileSync(require.resolve('axe-core/axe.min.js'), 'utf8');
 
@@ -22,14 +23,14 @@ export const axeColours = (page: Page): Promise<string[]> =>
 async function run(page: Page, options: object): Promise<string[]> {
   if (!(await page.evaluate(() => 'axe' in window))) await page.evaluate(source);
   const found = await page.evaluate(
-    async (given) => {
+    async ({ context, given }) => {
       const { axe: runner } = window as unknown as {
         axe: { run(context: string, options: object): Promise<{ violations: Found[] }> };
       };
-      const { violations } = await runner.run('headtree-waler', given);
+      const { violations } = await runner.run(context, given);
       return violations;
     },
-    { ...options, resultTypes: ['violations'] },
+    { context: anyCheck, given: { ...options, resultTypes: ['violations'] } },
   );
   return found.flatMap(({ id, nodes }) =>
     nodes.map(({ target, failureSummary = '' }) =>

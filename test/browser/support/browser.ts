@@ -25,6 +25,8 @@ export interface Bench {
 }
 
 export interface OpenOptions {
+  /** Which element the page holds; a waler's unless said. */
+  readonly element?: 'headtree-waler' | 'headtree-section' | 'headtree-stress';
   readonly value?: object;
   /** Another site than the one that the page key lists. */
   readonly site?: Site;
@@ -92,13 +94,21 @@ const escaped = (text: string): string =>
 
 /** A page as a firm would write it. */
 export function htmlOf(service: string, options: OpenOptions): string {
-  const { key = '', value, attributes = '', head = '', before = '', after = '' } = options;
+  const {
+    element = 'headtree-waler',
+    key = '',
+    value,
+    attributes = '',
+    head = '',
+    before = '',
+    after = '',
+  } = options;
   const given = value ? ` value="${escaped(JSON.stringify(value))}"` : '';
   return `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Temporary works</title>
 <meta name="viewport" content="width=device-width, initial-scale=1">
 <meta name="color-scheme" content="light dark">${head}
 <script src="${service}/elements/v1/headtree-elements.js" async></script></head>
 <body>${before}<main><h1>Design aids</h1>
-<headtree-waler key="${key}" profile="${profile}"${given} ${attributes}></headtree-waler>
+<${element} key="${key}" profile="${profile}"${given} ${attributes}></${element}>
 </main>${after}</body></html>`;
 }

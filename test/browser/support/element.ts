@@ -1,5 +1,8 @@
 import type { Locator, Page } from 'playwright-core';
 
+/** The element of any check. */
+export const anyCheck = 'headtree-waler, headtree-section, headtree-stress';
+
 /** The element as a page's script sees it. */
 export interface WalerElement extends HTMLElement {
   key: string;
@@ -11,12 +14,15 @@ export interface WalerElement extends HTMLElement {
 
 export const waler = (page: Page): Locator => page.locator('headtree-waler');
 
+/** The one element of a page, of whichever check it is. */
+export const check = (page: Page): Locator => page.locator(anyCheck);
+
 /** Waits for the answer to what the fields hold; gives its status. */
 export async function answerOf(page: Page): Promise<string> {
-  const status = await page.waitForFunction(() => {
-    const element = document.querySelector<WalerElement>('headtree-waler');
-    return element?.result?.status;
-  });
+  const status = await page.waitForFunction(
+    (any) => document.querySelector<WalerElement>(any)?.result?.status,
+    anyCheck,
+  );
   return String(await status.jsonValue());
 }
 
@@ -53,4 +59,4 @@ export const told = (page: Page): Promise<Told[]> =>
 
 /** The field of a label, in the shadow root. */
 export const field = (page: Page, label: string | RegExp): Locator =>
-  waler(page).getByLabel(label, { exact: true });
+  check(page).getByLabel(label, { exact: true });

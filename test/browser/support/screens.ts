@@ -1,7 +1,10 @@
 import { mkdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { startBench, type Bench } from './browser';
-import { states } from './states';
+import { sectionStates } from './section-states';
+import { states as walerStates } from './states';
+
+const states = { ...walerStates, ...sectionStates };
 
 const folder = join(process.cwd(), '.headtree/screens');
 const sizes = [

@@ -1,19 +1,21 @@
 import type { Page, Route } from 'playwright-core';
 import type { OpenOptions } from './browser';
-import { answerOf, field } from './element';
+import { answerOf, check, field } from './element';
 import { failing, incomplete, passing } from './waler';
 
 /** A state of the element: how it is reached and how one knows that it is there. */
 export interface State {
   readonly options: OpenOptions;
+  /** The status that it is told by, where there is an answer. */
+  readonly status?: 'pass' | 'fail' | 'incomplete' | 'provisional';
   /** After the page is open. */
   readonly reach: (page: Page) => Promise<unknown>;
 }
 
-const checks = '**/v1/checks/waler*';
+const checks = '**/v1/checks/*';
 
 /** The real answer with its status changed, as if the factors were not settled. */
-async function unsettled(route: Route): Promise<void> {
+export async function unsettled(route: Route): Promise<void> {
   const response = await route.fetch();
   const answer = (await response.json()) as { profile: object };
   await route.fulfill({
@@ -32,16 +34,30 @@ async function away(page: Page): Promise<void> {
     await page.route(path, (route) => route.abort());
 }
 
+/** Opens everything that can be opened. */
+export async function openAll(page: Page): Promise<void> {
+  await answerOf(page);
+  await check(page).evaluate((node) => {
+    for (const details of node.shadowRoot?.querySelectorAll('details') ?? []) details.open = true;
+  });
+  await page.waitForTimeout(300);
+}
+
 const says = (text: string | RegExp) => (page: Page) => page.getByText(text).first().waitFor();
 
 /** Every state that a person can meet. */
 export const states: Readonly<Record<string, State>> = {
   empty: { options: {}, reach: (page) => field(page, 'Spans').waitFor() },
-  pass: { options: { value: passing, attributes: 'label="north face, level 2"' }, reach: answerOf },
-  fail: { options: { value: failing }, reach: answerOf },
-  incomplete: { options: { value: incomplete }, reach: answerOf },
+  pass: {
+    options: { value: passing, attributes: 'label="north face, level 2"' },
+    status: 'pass',
+    reach: answerOf,
+  },
+  fail: { options: { value: failing }, status: 'fail', reach: answerOf },
+  incomplete: { options: { value: incomplete }, status: 'incomplete', reach: answerOf },
   provisional: {
     options: { value: passing, prepare: (page) => page.route(checks, unsettled) },
+    status: 'provisional',
     reach: answerOf,
   },
   'fault beside a field': {
@@ -75,16 +91,13 @@ export const states: Readonly<Record<string, State>> = {
     options: { value: passing, prepare: away },
     reach: says('The service does not answer'),
   },
-  readonly: { options: { value: passing, attributes: 'readonly' }, reach: answerOf },
+  readonly: {
+    options: { value: passing, attributes: 'readonly' },
+    status: 'pass',
+    reach: answerOf,
+  },
   'everything open': {
     options: { value: { ...failing, restraint: 'at-supports' } },
-    reach: async (page) => {
-      await answerOf(page);
-      await page.locator('headtree-waler').evaluate((node) => {
-        for (const details of node.shadowRoot?.querySelectorAll('details') ?? [])
-          details.open = true;
-      });
-      await page.waitForTimeout(300);
-    },
+    reach: openAll,
   },
 };

@@ -1,3 +1,4 @@
+import type { IneffectiveStrip } from '../contract';
 import { textWidth } from '../member-drawing/scale';
 import { fitSection, type Fit } from './fit-section';
 import type { SectionModel } from './section-model';
@@ -101,29 +102,35 @@ function marksBeside(fit: Fit, { bounds, marks }: SectionModel): Label[] {
 /** A thin plate's strip is drawn no thinner, or its lines could not be seen. */
 const THINNEST = 9;
 
-/** A strip with lines at 45° every few px, so that it shows without any colour. */
-function hatch(
-  fit: Fit,
-  strip: {
-    readonly y: number;
-    readonly z: number;
-    readonly width: number;
-    readonly height: number;
-  },
-) {
+/** A strip with lines across it every few px, so that it shows without any colour. */
+function hatch(fit: Fit, strip: IneffectiveStrip) {
   const half = (size: number): number => Math.max(size * fit.scale, THINNEST) / 2;
   const [x, y] = [fit.x(strip.y), fit.y(strip.z)];
   const [left, right] = [x - half(strip.width), x + half(strip.width)];
   const [top, bottom] = [y - half(strip.height), y + half(strip.height)];
+  // Lines x + lean · y = sum; level ones are drawn apart.
+  const lean = strip.under === 'My' ? -1 : 1;
   const parts: string[] = [];
-  for (let sum = left + top + 4; sum < right + bottom; sum += 4) {
-    const [x1, x2] = [Math.max(left, sum - bottom), Math.min(right, sum - top)];
-    parts.push(`M${round(x1)} ${round(sum - x1)}L${round(x2)} ${round(sum - x2)}`);
+  if (strip.under === 'Mz') {
+    for (let at = top + 3; at < bottom; at += 4)
+      parts.push(`M${round(left)} ${round(at)}H${round(right)}`);
+  } else {
+    const ends = [
+      left + lean * top,
+      left + lean * bottom,
+      right + lean * top,
+      right + lean * bottom,
+    ];
+    for (let sum = Math.min(...ends) + 4; sum < Math.max(...ends); sum += 5) {
+      const [a, b] = [sum - lean * top, sum - lean * bottom];
+      const from = Math.max(left, Math.min(a, b));
+      const to = Math.min(right, Math.max(a, b));
+      const at = (x: number): number => lean * (sum - x);
+      parts.push(`M${round(from)} ${round(at(from))}L${round(to)} ${round(at(to))}`);
+    }
   }
-  return {
-    edge: `M${round(left)} ${round(top)}H${round(right)}V${round(bottom)}H${round(left)}Z`,
-    lines: parts.join(''),
-  };
+  const edge = `M${round(left)} ${round(top)}H${round(right)}V${round(bottom)}H${round(left)}Z`;
+  return { edge, lines: parts.join('') };
 }
 
 const round = (value: number): number => Math.round(value * 10) / 10;

@@ -67,7 +67,9 @@ function factsOf(facts: object = {}): Sizes {
 /** The section of an answer, with what class 4 leaves out. */
 export function answeredSection(sketch: SectionSketch): SectionModel | null {
   const { name, shape, dimensions, ineffective } = sketch;
-  return modelOf({ shape, sizes: dimensions }, name, ineffective);
+  // The sketch says it by the name alone.
+  const welded = /\bwelded\b/i.test(name);
+  return modelOf({ shape, sizes: dimensions, welded }, name, ineffective);
 }
 
 function modelOf(
@@ -148,8 +150,15 @@ export function sectionText({ name, depth, width, marks, ineffective }: SectionM
   return `${name} to scale, in mm: ${sizes.join(', ')}. ${axes}${lost ? ` ${lost}` : ''}`;
 }
 
+/** How each effect's strips are hatched, so that those of two can be told apart where they overlap. */
+const HATCHES = { N: 'to the right', My: 'to the left', Mz: 'level' } as const;
+
 /** What the hatched strips mean: "Hatched: not effective under N." */
 export function ineffectiveText(strips: readonly IneffectiveStrip[]): string {
   const effects = [...new Set(strips.map(({ under }) => under))];
-  return effects.length > 0 ? `Hatched: not effective under ${effects.join(' and ')}.` : '';
+  const [only, ...others] = effects;
+  if (only === undefined) return '';
+  if (others.length === 0) return `Hatched: not effective under ${only}.`;
+  const said = effects.map((effect) => `${effect} hatched ${HATCHES[effect]}`);
+  return `Not effective: under ${said.join(', under ')}.`;
 }

@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -16,7 +17,7 @@ import { governingPoint } from './governing-point';
 @Component({
   selector: 'htc-section-figures',
   templateUrl: './section-figures.html',
-  imports: [InteractionDiagram, PointsTable, StressDrawing],
+  imports: [InteractionDiagram, NgTemplateOutlet, PointsTable, StressDrawing],
   host: { class: 'ht-figures' },
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,
@@ -29,12 +30,13 @@ export class SectionFigures {
   protected readonly governing = computed(() => governingPoint(this.answer()));
   protected readonly walls = computed(() => this.answer().walls ?? []);
   protected readonly curves = computed(() => this.answer().interaction ?? []);
-  /** Whether there is shear that can be drawn. */
-  protected readonly shear = computed(
-    () =>
-      this.model() !== null &&
-      this.walls().some(({ points }) => points.some(({ tau }) => Math.abs(tau) > 1e-9)),
-  );
+  /** The section, where there is shear along it that can be drawn. */
+  protected readonly shear = computed(() => {
+    const sheared = this.walls().some(({ points }) =>
+      points.some(({ tau }) => Math.abs(tau) > 1e-9),
+    );
+    return sheared ? this.model() : null;
+  });
   /** The curves that do not stand beside the shear. */
   protected readonly others = computed(() => this.curves().slice(this.shear() ? 1 : 0));
 }

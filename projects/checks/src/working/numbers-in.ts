@@ -46,8 +46,10 @@ export function numbersIn(
   if (!element.children) return element;
   const children = element.children.map((child, index) => {
     if (element.tag === 'msup' && index === 0) return numbersIn(child, inputs, 'always');
-    const alone = element.tag !== 'mrow' || index === 0;
-    return numbersIn(child, inputs, alone ? 'never' : 'negative');
+    if (element.tag !== 'mrow') return numbersIn(child, inputs, 'never');
+    // What begins a group has before it what the group has.
+    const first = bracket === 'always' ? 'never' : bracket;
+    return numbersIn(child, inputs, index === 0 ? first : 'negative');
   });
   return { ...element, children };
 }

@@ -39,6 +39,9 @@ describe('numbers in a formula', () => {
     );
     const sum = row(symbol('a'), mo('+'), symbol('a'));
     expect(textOf(numbersIn(sum, { a: { value: -2, unit: '1' } }))).toBe('−2+(−2)');
+    const lessProduct = row(symbol('b'), mo('−'), row(symbol('a'), mo('·'), symbol('b')));
+    const inputs = { a: { value: -2, unit: '1' }, b: { value: 3, unit: '1' } };
+    expect(textOf(numbersIn(lessProduct, inputs))).toBe('3−(−2)·3');
   });
 
   it('show the exact number on hover', () => {
