@@ -9,7 +9,6 @@ import {
   bucklingShear,
   compressionResistance,
   shearAreas,
-  shearWith,
   webHeight,
   websAlong,
 } from './resistances.mjs';
@@ -50,7 +49,7 @@ function axialWithShear({ member, rho }) {
 
 /** @param {Together} together @param {Axis} axis @param {SectionClass} [of] */
 function bendingWithShear({ member, of: section, rho }, axis, of = section) {
-  return bendingResistance(member, axis, of, rho[shearWith[axis]]);
+  return bendingResistance(member, axis, of, rho);
 }
 
 /** @param {Together} together */
@@ -174,15 +173,15 @@ export function linearSum(together, axes) {
  * it does not apply.
  * @param {Together} together
  */
-export function bucklingSum({ member, axial, moments, shear }) {
+export function bucklingSum({ member, axial, moments, shear, rho }) {
   const { section, fy } = member;
   const resistance = bucklingShear(member, 'z');
   if (section.shape === 'CHS' || resistance === undefined) return undefined;
   if (shear.z <= 0.5 * resistance) return undefined;
-  const one = flangeArea(section, fy);
+  const one = flangeArea(section, fy) * (1 - rho.y);
   const arm = section.h - flangeThickness(section);
   const { thickness, webs } = websAlong(section);
-  const flanges = one * arm * fy * Math.max(0, 1 - axial / (2 * one * fy));
+  const flanges = one > 0 ? one * arm * fy * Math.max(0, 1 - axial / (2 * one * fy)) : 0;
   const plastic = (one * arm + (webs * thickness * webHeight(section) ** 2) / 4) * fy;
   return moments.y / plastic + (1 - flanges / plastic) * ((2 * shear.z) / resistance - 1) ** 2;
 }

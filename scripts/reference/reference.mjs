@@ -16,8 +16,8 @@ import {
   memberOf,
   plasticShear,
   shearReductions,
-  shearWith,
   tensionResistance,
+  unsheared,
 } from './resistances.mjs';
 
 /** @typedef {import('./outline.mjs').Axis} Axis */
@@ -104,7 +104,7 @@ function alone({ member, axial, compressed, moments, shear, classes }) {
   }
   for (const axis of AXES) {
     if (moments[axis] > 0) {
-      const resistance = bendingResistance(member, axis, classes[axis], 0);
+      const resistance = bendingResistance(member, axis, classes[axis], unsheared);
       made[`bending-${axis}`] = against(moments[axis], resistance, MEGA);
     }
     if (shear[axis] > 0) {
@@ -132,12 +132,11 @@ function bendingWithShear(given) {
   /** @type {Record<string, Expected>} */
   const made = {};
   for (const axis of AXES) {
-    const lost = rho[shearWith[axis]];
     if (moments[axis] === 0) continue;
     const sum = axis === 'y' ? bucklingSum(given) : undefined;
     if (sum !== undefined) made['bending-shear-y'] = summed(sum);
-    if (sum !== undefined || lost === 0) continue;
-    const resistance = bendingResistance(member, axis, classes[axis], lost);
+    if (sum !== undefined || (rho.y === 0 && rho.z === 0)) continue;
+    const resistance = bendingResistance(member, axis, classes[axis], rho);
     made[`bending-shear-${axis}`] = against(moments[axis], resistance, MEGA);
   }
   return made;

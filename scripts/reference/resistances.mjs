@@ -116,40 +116,52 @@ export function shearReductions(member, shear) {
   return { y: one('y'), z: one('z') };
 }
 
+/** No shear that takes from bending. @type {ByDirection} */
+export const unsheared = { y: 0, z: 0 };
+
 /**
- * Bending about an axis, lowered by the shear that goes with it.
- * @param {Member} member @param {Axis} axis @param {SectionClass} of @param {number} rho
+ * Bending about an axis, lowered by the shear that acts along either.
+ * @param {Member} member @param {Axis} axis @param {SectionClass} of @param {ByDirection} rho
  */
 export function bendingResistance(member, axis, of, rho) {
-  return modulus(member, axis, of, rho) * member.fy;
+  return Math.max(0, modulus(member, axis, of, rho)) * member.fy;
 }
 
-/** @param {Member} member @param {Axis} axis @param {SectionClass} of @param {number} rho */
+/** @param {Member} member @param {Axis} axis @param {SectionClass} of @param {ByDirection} rho */
 function modulus(member, axis, of, rho) {
   const { section, fy, gross } = member;
+  const left = 1 - (section.shape === 'I' && axis === 'z' ? rho.y : Math.max(rho.y, rho.z));
   switch (of) {
     case 1:
     case 2:
-      return plasticModulus(member, axis, rho);
+      return plasticModulus(member, axis, rho, left);
     case 3:
       if (axis === 'z' || section.shape === 'RHS' || section.shape === 'CHS') {
-        return gross.Wel[axis] * (1 - rho);
+        return gross.Wel[axis] * left;
       }
-      return Math.min(gross.Wel.y, ((1 - rho) * 2 * gross.I.y) / webHeight(section));
+      return Math.min(
+        (1 - rho.y) * gross.Wel.y,
+        ((1 - rho.z) * 2 * gross.I.y) / webHeight(section),
+      );
     case 4:
-      return effectiveModulus(section, fy, axis) * (1 - rho);
+      return effectiveModulus(section, fy, axis) * left;
   }
 }
 
-/** @param {Member} member @param {Axis} axis @param {number} rho */
-function plasticModulus(member, axis, rho) {
+/** @param {Member} member @param {Axis} axis @param {ByDirection} rho @param {number} left */
+function plasticModulus(member, axis, rho, left) {
   const { section, gross } = member;
   const whole = gross.Wpl[axis];
   if (section.shape === 'RHS') {
-    const shearArea = shearAreas(member)[shearWith[axis]];
-    return whole - (rho * shearArea ** 2) / (8 * section.t);
+    const across = shearWith[axis];
+    const areas = shearAreas(member);
+    const depth = axis === 'y' ? section.h : section.b;
+    const { t } = section;
+    const webs = (rho[across] * areas[across] ** 2) / (8 * t);
+    return whole - webs - (rho[axis] * areas[axis] * (depth - t)) / 2;
   }
-  if (section.shape === 'CHS' || axis === 'z') return whole * (1 - rho);
-  const web = webHeight(section) * section.tw;
-  return whole - (rho * web ** 2) / (4 * section.tw);
+  if (section.shape === 'CHS' || axis === 'z') return whole * left;
+  const { h, b, tf, tw } = section;
+  const web = webHeight(section) * tw;
+  return whole - (rho.z * web ** 2) / (4 * tw) - rho.y * b * tf * (h - tf);
 }

@@ -38,25 +38,69 @@ export const plasticBendingWithShear = formula({
   where: { ...strength, W_pl_y: 'mm^3', A_w: 'mm^2', t_w: 'mm', M_c_y_Rd: 'kN m' },
 });
 
-/** Elastic sections: first yield at the web's edge, where the reduced strength holds. */
+/** Shear along both axes: the flanges, too, have less left for bending. */
+export const plasticBendingWithShears = formula({
+  symbol: 'M_V_y_Rd',
+  title: 'Bending resistance about y-y reduced by shear along both axes',
+  unit: 'kN m',
+  clause: SHEAR_REDUCTION,
+  expression:
+    'max(W_pl_y - rho_z * h_w^2 * t_w / 4 - rho_y * b * t_f * (h - t_f), 0 * W_pl_y) * f_y / gamma_M0',
+  where: {
+    W_pl_y: 'mm^3',
+    rho_z: '1',
+    h_w: 'mm',
+    t_w: 'mm',
+    rho_y: '1',
+    b: 'mm',
+    t_f: 'mm',
+    h: 'mm',
+    f_y: 'N/mm^2',
+    gamma_M0: '1',
+  },
+});
+
+/** Elastic sections: first yield at the web's edge or in the flanges, at the strength left there. */
 export const elasticBendingWithShear = formula({
   symbol: 'M_V_y_Rd',
   title: 'Bending resistance about y-y reduced by shear, elastic',
   unit: 'kN m',
   clause: SHEAR_REDUCTION,
-  expression: 'max(min(W_el_y, (1 - rho) * 2 * I_y / h_w), 0 * W_el_y) * f_y / gamma_M0',
-  where: { ...strength, W_el_y: 'mm^3', I_y: 'mm^4', h_w: 'mm' },
+  expression: 'min((1 - rho_y) * W_el_y, (1 - rho_z) * 2 * I_y / h_w) * f_y / gamma_M0',
+  where: {
+    rho_z: '1',
+    rho_y: '1',
+    f_y: 'N/mm^2',
+    gamma_M0: '1',
+    W_el_y: 'mm^3',
+    I_y: 'mm^4',
+    h_w: 'mm',
+  },
 });
 
-/** Walls of a hollow section whose shear area A_v stands in two plates of thickness t. */
+/**
+ * Walls across the axis hold the shear area A_v in two plates of thickness t, and bend with rho_w;
+ * those along it hold A_f at the arm (d - t)/2, and have lost rho_f.
+ */
 function hollowWithShear(axis: 'y' | 'z') {
   return formula({
     symbol: `M_V_${axis}_Rd`,
     title: `Bending resistance about ${axis}-${axis} reduced by shear`,
     unit: 'kN m',
     clause: SHEAR_REDUCTION,
-    expression: 'max(W_pl - rho * A_v^2 / (8 * t), 0 * W_pl) * f_y / gamma_M0',
-    where: { ...strength, W_pl: 'mm^3', A_v: 'mm^2', t: 'mm' },
+    expression:
+      'max(W_pl - rho_w * A_v^2 / (8 * t) - rho_f * A_f * (d - t) / 2, 0 * W_pl) * f_y / gamma_M0',
+    where: {
+      W_pl: 'mm^3',
+      rho_w: '1',
+      A_v: 'mm^2',
+      t: 'mm',
+      rho_f: '1',
+      A_f: 'mm^2',
+      d: 'mm',
+      f_y: 'N/mm^2',
+      gamma_M0: '1',
+    },
   });
 }
 

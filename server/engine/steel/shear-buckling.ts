@@ -56,7 +56,7 @@ export const flangesAlone = formula({
   title: 'Bending resistance of the flanges alone',
   unit: 'kN m',
   clause: 'EN 1993-1-5 7.1(1) and 5.4(2)',
-  expression: 'A_f * (h - t_f) * f_y / gamma_M0 * max(1 - N_Ed * gamma_M0 / (2 * A_f * f_y), 0)',
+  expression: 'max(A_f - N_Ed * gamma_M0 / (2 * f_y), 0 * A_f) * (h - t_f) * f_y / gamma_M0',
   where: { A_f: 'mm^2', h: 'mm', t_f: 'mm', f_y: 'N/mm^2', gamma_M0: '1', N_Ed: 'kN' },
 });
 

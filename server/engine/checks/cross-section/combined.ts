@@ -27,7 +27,7 @@ import { reductionByShear, webBuckling } from './shear';
 
 const GIVEN = 'Given by the caller';
 
-/** Bending about an axis with the shear across it, where that takes from it (6.2.8). */
+/** Bending about an axis with shear, where that takes from it (6.2.8). */
 export function bendingShear(
   section: SteelSection,
   effects: CrossEffects,
@@ -35,8 +35,7 @@ export function bendingShear(
   withSteps: boolean,
 ): Finding[] {
   const M = axis === 'y' ? effects.M_y : effects.M_z;
-  const direction = axis === 'y' ? 'z' : 'y';
-  if (M === 0 || reductionByShear(section, effects, direction, silentSheet) === 0) return [];
+  if (M === 0 || !isSheared(section, effects)) return [];
   const V_bw_Rd = axis === 'y' ? webBuckling(section, 'z', silentSheet) : undefined;
   if (V_bw_Rd !== undefined && effects.V_z > 0.5 * V_bw_Rd) {
     return [withWebBuckling(section, effects, withSteps)];
@@ -73,7 +72,8 @@ function withWebBuckling(
     const { h_w, t_w, n_w } = webs;
     const { h } = shape;
     const t_f = platesOf(shape, 'y', silentSheet).flange.t;
-    const A_f = effectiveFlange(section, sheet);
+    const A_f =
+      effectiveFlange(section, sheet) * (1 - reductionByShear(section, effects, 'y', sheet));
     const M_y_Ed = sheet.given('M_y_Ed', effects.M_y, 'kN m', 'Design moment about y-y', GIVEN);
     const V_z_Ed = sheet.given('V_z_Ed', effects.V_z, 'kN', 'Design shear along z-z', GIVEN);
     const N_Ed = axialOf(effects);
@@ -152,10 +152,14 @@ function isOwed(section: SteelSection, effects: CrossEffects, axis: Axis): boole
     return effects.compression > 0 && compressionOf(section, silentSheet).e_N_z > 0;
   }
   if (effects.M_y > 0) return true;
-  const sheared = (['z', 'y'] as const).some(
+  return effects.M_z === 0 && isSheared(section, effects);
+}
+
+/** Whether shear along either axis takes from the yield of its area. */
+function isSheared(section: SteelSection, effects: CrossEffects): boolean {
+  return (['z', 'y'] as const).some(
     (direction) => reductionByShear(section, effects, direction, silentSheet) > 0,
   );
-  return sheared && effects.M_z === 0;
 }
 
 /** Where both moments act, or neither, the worse class of both counts for all of it. */

@@ -73,12 +73,17 @@ export function axialResistance(
   const whole = sheared
     ? sheet.evaluate(axialWithShear, { A, rho_z, A_v_z, rho_y, A_v_y, f_y, gamma_M0 })
     : sheet.evaluate(grossTension, { A, f_y, gamma_M0 });
-  if (plastic || effects.compression === 0) return { N_Rd: whole, rho_z, A_v_z, e_N_z: 0 };
+  if (effects.compression === 0) return { N_Rd: whole, rho_z, A_v_z, e_N_z: 0 };
+  // The gross area may count by class while the plates of a channel shift under compression.
+  if (plastic && section.shape.shape !== 'channel') {
+    return { N_Rd: whole, rho_z, A_v_z, e_N_z: 0 };
+  }
   const { N_c_Rd, e_N_z } = compressionOf(section, sheet);
+  if (plastic) return { N_Rd: whole, rho_z, A_v_z, e_N_z };
   return { N_Rd: Math.min(whole, N_c_Rd), rho_z, A_v_z, e_N_z };
 }
 
-/** Bending resistance about an axis beside the shear across it, N mm. */
+/** Bending resistance about an axis beside the shear that acts, N mm. */
 export function momentResistance(
   section: SteelSection,
   effects: CrossEffects,
@@ -87,8 +92,9 @@ export function momentResistance(
   sheet: Sheet,
 ): number {
   const M_c_Rd = bendingResistance(section, axis, sectionClass, sheet);
-  const rho = reductionByShear(section, effects, axis === 'y' ? 'z' : 'y', sheet);
-  return bendingWithShear(section, axis, sectionClass, { M_c_Rd, rho }, sheet);
+  const rho_z = reductionByShear(section, effects, 'z', sheet);
+  const rho_y = reductionByShear(section, effects, 'y', sheet);
+  return bendingWithShear(section, axis, sectionClass, { M_c_Rd, rho_z, rho_y }, sheet);
 }
 
 /** Shapes whose plastic interaction 6.2.9.1 gives; the rest take the linear sum. */

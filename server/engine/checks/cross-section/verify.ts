@@ -1,3 +1,6 @@
+import { silentSheet } from '../../formula/sheet';
+import { refuse } from '../refuse';
+import { classOf } from '../steel/classes';
 import type { SteelSection } from '../steel/section';
 import type { Finding } from '../verification';
 import { bendingAxial, bendingShear, biaxial } from './combined';
@@ -28,6 +31,7 @@ export function verifyCrossSection(
 ): Finding[] {
   const { compression: C, tension: N, M_y, M_z, V_z, V_y, T_t, T_w } = effects;
   const twisted = T_t > 0 || T_w > 0;
+  refuseSlenderTube(section, effects);
   return [
     ...(N > 0 ? [tension(section, effects, netArea, withSteps)] : []),
     ...(C > 0 ? [compression(section, effects, withSteps)] : []),
@@ -45,4 +49,18 @@ export function verifyCrossSection(
     ...bendingAxial(section, effects, 'z', withSteps),
     ...biaxial(section, effects, withSteps),
   ];
+}
+
+/** A tube of class 4 is a shell, whatever acts but tension alone. */
+function refuseSlenderTube(section: SteelSection, effects: CrossEffects): void {
+  const { tension: _, ...rest } = effects;
+  const onlyTension = Object.values(rest).every((effect) => effect === 0);
+  if (section.shape.shape !== 'CHS' || onlyTension) return;
+  if (classOf(section, 'compression', 0, silentSheet) < 4) return;
+  refuse(
+    'class-4',
+    '/section',
+    `${section.name} is class 4 at f_y ${section.f_y} N/mm²: a tube so thin is verified as a shell.`,
+    'EN 1993-1-6',
+  );
 }

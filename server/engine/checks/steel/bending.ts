@@ -11,9 +11,11 @@ import {
   elasticBendingWithShear,
   hollowBendingWithShear,
   plasticBendingWithShear,
+  plasticBendingWithShears,
   webArea,
   wholeBendingWithShear,
 } from '../../steel/bending-shear';
+import type { ShapeOf } from '../../sections/shapes/shape';
 import type { SectionClass } from '../../steel/classification';
 import { webHeight } from '../../steel/shear';
 import { freeModulus } from '../../stress/elastic-stress';
@@ -78,45 +80,65 @@ function elasticModulus(section: SteelSection, axis: Axis, sheet: Sheet): number
   );
 }
 
+/** Reduction of the yield of each shear area, 0 to 1: along z-z and along y-y. */
+export interface Reductions {
+  readonly rho_z: number;
+  readonly rho_y: number;
+}
+
 /**
- * Bending resistance beside shear, N mm.
+ * Bending resistance beside shear along either axis, N mm: each shear area bends with what yield it
+ * has left (6.2.8(3)). Where its share of the modulus is not told apart the whole is reduced.
  *
  * @param M_c_Rd without shear, N mm
- * @param rho reduction of the yield of the shear area across this axis, 0 to 1
  */
 export function bendingWithShear(
   section: SteelSection,
   axis: Axis,
   sectionClass: SectionClass,
-  { M_c_Rd, rho }: { readonly M_c_Rd: number; readonly rho: number },
+  { M_c_Rd, rho_z, rho_y }: Reductions & { readonly M_c_Rd: number },
   sheet: Sheet,
 ): number {
-  if (rho === 0) return M_c_Rd;
-  const { shape, f_y, gamma_M0, properties } = section;
-  const { W_pl_y, W_pl_z, W_el_y, I_y } = properties;
-  const flanged = shape.shape === 'I' || shape.shape === 'channel';
-  if (flanged && axis === 'y' && sectionClass <= 3) {
-    const { h, t_f, t_w } = shape;
-    const h_w = sheet.evaluate(webHeight, { h, t_f });
-    if (sectionClass === 3 || W_pl_y === undefined) {
-      return sheet.evaluate(elasticBendingWithShear, { W_el_y, rho, I_y, h_w, f_y, gamma_M0 });
-    }
-    const A_w = sheet.evaluate(webArea, { h_w, t_w });
-    return sheet.evaluate(plasticBendingWithShear, {
-      W_pl_y,
-      rho,
-      A_w,
-      t_w,
-      f_y,
-      gamma_M0,
-      M_c_y_Rd: M_c_Rd,
-    });
+  if (rho_z === 0 && rho_y === 0) return M_c_Rd;
+  const { shape } = section;
+  if ((shape.shape === 'I' || shape.shape === 'channel') && axis === 'y' && sectionClass <= 3) {
+    return flangedWithShear(section, shape, sectionClass, { M_c_Rd, rho_z, rho_y }, sheet);
   }
+  const { W_pl_y, W_pl_z } = section.properties;
   const W_pl = axis === 'y' ? W_pl_y : W_pl_z;
   if (shape.shape === 'RHS' && sectionClass <= 2 && W_pl !== undefined) {
-    const A_v = shearArea(section, axis === 'y' ? 'z' : 'y', sheet);
+    const { f_y, gamma_M0 } = section;
+    const along = { z: shearArea(section, 'z', sheet), y: shearArea(section, 'y', sheet) };
+    const [A_v, A_f, d] = axis === 'y' ? [along.z, along.y, shape.h] : [along.y, along.z, shape.b];
+    const [rho_w, rho_f] = axis === 'y' ? [rho_z, rho_y] : [rho_y, rho_z];
     const { t } = shape;
-    return sheet.evaluate(hollowBendingWithShear[axis], { W_pl, rho, A_v, t, f_y, gamma_M0 });
+    const walls = { W_pl, rho_w, A_v, t, rho_f, A_f, d, f_y, gamma_M0 };
+    return sheet.evaluate(hollowBendingWithShear[axis], walls);
   }
-  return sheet.evaluate(wholeBendingWithShear[axis], { rho, M_c_Rd });
+  // Shear along the web of an I section hardly touches what bends about z-z.
+  const rho = shape.shape === 'I' && axis === 'z' ? rho_y : Math.max(rho_z, rho_y);
+  return rho === 0 ? M_c_Rd : sheet.evaluate(wholeBendingWithShear[axis], { rho, M_c_Rd });
+}
+
+function flangedWithShear(
+  section: SteelSection,
+  { h, b, t_f, t_w }: ShapeOf<'I'> | ShapeOf<'channel'>,
+  sectionClass: SectionClass,
+  { M_c_Rd, rho_z, rho_y }: Reductions & { readonly M_c_Rd: number },
+  sheet: Sheet,
+): number {
+  const { f_y, gamma_M0, properties } = section;
+  const { W_pl_y, W_el_y, I_y } = properties;
+  const h_w = sheet.evaluate(webHeight, { h, t_f });
+  if (sectionClass === 3 || W_pl_y === undefined) {
+    const values = { W_el_y, rho_z, rho_y, I_y, h_w, f_y, gamma_M0 };
+    return sheet.evaluate(elasticBendingWithShear, values);
+  }
+  if (rho_y > 0) {
+    const values = { W_pl_y, rho_z, h_w, t_w, rho_y, b, t_f, h, f_y, gamma_M0 };
+    return sheet.evaluate(plasticBendingWithShears, values);
+  }
+  const A_w = sheet.evaluate(webArea, { h_w, t_w });
+  const values = { W_pl_y, rho: rho_z, A_w, t_w, f_y, gamma_M0, M_c_y_Rd: M_c_Rd };
+  return sheet.evaluate(plasticBendingWithShear, values);
 }

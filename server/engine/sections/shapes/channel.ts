@@ -1,6 +1,7 @@
 import { formula } from '../../formula/formula';
 import type { Sheet } from '../../formula/sheet';
 import { GEOMETRY, fillet, lengths } from './fillet';
+import { flangeStrips, plasticModulusZ } from './tapered-flange';
 
 /** A parallel-flange channel in mm; the web at the left, y from the back of the web. */
 export interface ChannelDimensions {
@@ -176,10 +177,17 @@ export function channelProperties(dimensions: ChannelDimensions, sheet: Sheet): 
 }
 
 function plasticZ(dimensions: ChannelDimensions, A: number, y_c: number, sheet: Sheet): number {
-  const { h, b, t_w, t_f } = dimensions;
+  const { h, b, t_w, t_f, r } = dimensions;
   if (h * t_w >= A / 2) {
     const y_p = sheet.evaluate(channelAxisInWeb, { A, h });
     return sheet.evaluate(channelPlasticZInWeb, { A, y_c, y_p, h });
+  }
+  if (b - A / (4 * t_f) < t_w + r) {
+    const taper = { slope: 0, at: 0, r_2: 0 };
+    const flanges = flangeStrips({ h, t_f, r, taper, from: t_w, toe: b });
+    const W_pl_z = plasticModulusZ(h, t_w, flanges, A, y_c);
+    const title = 'Plastic section modulus about z-z, axis through the roots, integrated';
+    return sheet.given('W_pl_z', W_pl_z, 'mm^3', title, GEOMETRY);
   }
   const y_p = sheet.evaluate(channelAxisInFlanges, { b, A, t_f });
   return sheet.evaluate(channelPlasticZInFlanges, { t_f, b, y_p, A, y_c });

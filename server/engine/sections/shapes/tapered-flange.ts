@@ -64,6 +64,36 @@ export function flangeStrips(flange: TaperedFlange): Strips {
   ].flat();
 }
 
+/** Plastic modulus of a channel about z-z in mm³: static moment about the axis that halves the area. */
+export function plasticModulusZ(
+  h: number,
+  t_w: number,
+  flanges: Strips,
+  A: number,
+  y_c: number,
+): number {
+  if (h * t_w >= A / 2) {
+    const inWeb = A / (2 * h);
+    return A * y_c - A * inWeb + h * inWeb ** 2;
+  }
+  const axis = halvingAxis(flanges, A, t_w);
+  const beyond = flanges.flatMap((strip) => strip.beyond(axis));
+  return 2 * integral(beyond, (y, t) => t * (y - axis)) - A * (y_c - axis);
+}
+
+/** Newton from the web outwards: the flanges thin towards the toes, so it never overshoots. */
+function halvingAxis(flanges: Strips, A: number, from: number): number {
+  let axis = from;
+  for (let step = 0; step < 30; step += 1) {
+    const beyond = flanges.flatMap((strip) => strip.beyond(axis));
+    const here = beyond[0]?.thickness(axis) ?? NaN;
+    const next = axis + (integral(beyond, (_, t) => t) - A / 2) / here;
+    if (Math.abs(next - axis) < 1e-9) return next;
+    axis = next;
+  }
+  return axis;
+}
+
 type Thickness = (y: number) => number;
 
 function line(from: number, to: number, thickness: Thickness): Strip[] {

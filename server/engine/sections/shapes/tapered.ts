@@ -10,7 +10,7 @@ import {
 } from './channel';
 import { lengths } from './fillet';
 import type { ChannelShape, FlangeTaper, IShape } from './shape';
-import { flangeStrips, integral, type Strips } from './tapered-flange';
+import { flangeStrips, integral, plasticModulusZ, type Strips } from './tapered-flange';
 
 /**
  * IPN and UPN. Area, centroid, second moments and plastic moduli are integrals over the outline of
@@ -125,7 +125,7 @@ export function taperedChannelProperties(
     W_el_y: (2 * I_y) / h,
     W_el_z: sheet.evaluate(channelElasticZ, { I_z, b, y_c }),
     W_pl_y,
-    W_pl_z: given.W_pl_z(plasticZ(h, t_w, flanges, A, y_c)),
+    W_pl_z: given.W_pl_z(plasticModulusZ(h, t_w, flanges, A, y_c)),
     I_t: sheet.evaluate(channelTorsionConstant, { h, b, t_w, t_f, r }),
     e_0: sheet.evaluate(channelShearCentre, { y_c, t_w, h, t_f, A, I_y }),
     I_w: sheet.evaluate(channelWarpingConstant, { h, t_f, I_z, A, y_c, t_w, I_y }),
@@ -143,30 +143,6 @@ function aboutY(h: number, t_w: number, strips: Strips, count: 1 | 2, given: Rec
       web.W_pl_y + (count / 4) * integral(strips, (_, t) => h ** 2 - inside(t) ** 2),
     ),
   };
-}
-
-/** Static moment about the axis that halves the area. */
-function plasticZ(h: number, t_w: number, flanges: Strips, A: number, y_c: number): number {
-  if (h * t_w >= A / 2) {
-    const inWeb = A / (2 * h);
-    return A * y_c - A * inWeb + h * inWeb ** 2;
-  }
-  const axis = halvingAxis(flanges, A, t_w);
-  const beyond = flanges.flatMap((strip) => strip.beyond(axis));
-  return 2 * integral(beyond, (y, t) => t * (y - axis)) - A * (y_c - axis);
-}
-
-/** Newton from the web outwards: the flanges thin towards the toes, so it never overshoots. */
-function halvingAxis(flanges: Strips, A: number, from: number): number {
-  let axis = from;
-  for (let step = 0; step < 30; step += 1) {
-    const beyond = flanges.flatMap((strip) => strip.beyond(axis));
-    const here = beyond[0]?.thickness(axis) ?? NaN;
-    const next = axis + (integral(beyond, (_, t) => t) - A / 2) / here;
-    if (Math.abs(next - axis) < 1e-9) return next;
-    axis = next;
-  }
-  return axis;
 }
 
 type Recorder = ReturnType<typeof recorder>;
