@@ -53,8 +53,8 @@ export function verifyCrossSection(
 
 /** A tube of class 4 is a shell, whatever acts but tension alone. */
 function refuseSlenderTube(section: SteelSection, effects: CrossEffects): void {
-  const { tension: _, ...rest } = effects;
-  const onlyTension = Object.values(rest).every((effect) => effect === 0);
+  const { compression: C, M_y, M_z, V_z, V_y, T_t, T_w, B } = effects;
+  const onlyTension = [C, M_y, M_z, V_z, V_y, T_t, T_w, B].every((effect) => effect === 0);
   if (section.shape.shape !== 'CHS' || onlyTension) return;
   if (classOf(section, 'compression', 0, silentSheet) < 4) return;
   refuse(
