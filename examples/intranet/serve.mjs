@@ -29,10 +29,12 @@ const POLICY = [
   'trusted-types angular',
 ].join('; ');
 
-/** The waler that the page begins with. */
-const VALUE = {
+const STEEL = { type: 'steel', grade: 'S275' };
+
+/** The waler that its page begins with. */
+const WALER = {
   section: 'UB 457x191x67',
-  material: { type: 'steel', grade: 'S275' },
+  material: STEEL,
   spans: [3, 3, 2.4],
   loadBasis: 'characteristic',
   loads: [
@@ -44,14 +46,39 @@ const VALUE = {
   deflectionLimit: 'span/200',
 };
 
+/** Its cross-section at a prop. */
+const SECTION = {
+  section: 'UB 457x191x67',
+  material: STEEL,
+  effects: { compression: 250, My: 180, Vz: 300 },
+};
+
+/** Stresses that the firm has from elsewhere. */
+const STRESS = {
+  material: STEEL,
+  states: [
+    { sigmaX: 100, tau: 20 },
+    { sigmaX: 180, sigmaZ: -40, tau: 65 },
+  ],
+};
+
 const FILES = {
   '/': ['index.html', 'text/html; charset=utf-8'],
+  '/sections': ['sections.html', 'text/html; charset=utf-8'],
   '/site.js': ['site.js', 'text/javascript; charset=utf-8'],
   '/site.css': ['site.css', 'text/css; charset=utf-8'],
 };
 
 const escaped = (text) => text.replace(/[&<>"]/g, (sign) => `&#${sign.charCodeAt(0)};`);
-const words = { service, key, profile, value: JSON.stringify(VALUE) };
+const values = { waler: WALER, section: SECTION, stress: STRESS };
+const words = {
+  service,
+  key,
+  profile,
+  ...Object.fromEntries(
+    Object.entries(values).map(([name, value]) => [name, JSON.stringify(value)]),
+  ),
+};
 
 const server = createServer(({ url = '/' }, response) => {
   const [name, type] = FILES[url.split('?', 1)[0]] ?? [];

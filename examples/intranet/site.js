@@ -15,10 +15,10 @@ document.addEventListener('headtree-input', ({ detail }) => {
 });
 
 document.addEventListener('headtree-result', ({ detail: { result } }) => {
-  const { status, utilisation, governing, profile } = result;
+  const { check, status, utilisation, governing, profile } = result;
   const used = utilisation === null ? 'no utilisation' : `utilisation ${utilisation.toFixed(2)}`;
   // The word as it came: nothing but "pass" may look like a pass.
-  line.textContent = `${status}, ${used}, ${governing}, ${profile.slug}@${profile.revision}`;
+  line.textContent = `${status}, ${used}, ${check}: ${governing}, ${profile.slug}@${profile.revision}`;
   note('headtree-result', line.textContent);
 });
 

@@ -26,12 +26,22 @@ interface Manifest {
 /** What a form-associated element has of the browser. */
 const ofTheBrowser = ['name'];
 
-it('the manifest names every attribute and every member', async () => {
+const tags = ['headtree-waler', 'headtree-section', 'headtree-stress'] as const;
+
+async function declarations() {
   const response = await fetch(`${bench.service.url}/elements/v1/custom-elements.json`);
   const manifest = (await response.json()) as Manifest;
-  const declared = manifest.modules[0]?.declarations[0];
-  if (!declared) throw new Error('The manifest declares nothing.');
-  const page = await bench.open();
+  return manifest.modules[0]?.declarations ?? [];
+}
+
+it('the manifest declares every element and no other', async () => {
+  expect((await declarations()).map(({ tagName }) => tagName)).toEqual(tags);
+});
+
+it.each(tags)('the manifest names every attribute and every member of %s', async (tag) => {
+  const declared = (await declarations()).find(({ tagName }) => tagName === tag);
+  if (!declared) throw new Error('The manifest does not declare it.');
+  const page = await bench.open({ element: tag });
   const real = await page.evaluate((tag) => {
     const element = customElements.get(tag) as unknown as {
       observedAttributes: string[];
@@ -61,11 +71,12 @@ it('the manifest names every attribute and every member', async () => {
     expect(own.find((one) => one.name === name)).toEqual({ name, kind, readonly });
 });
 
-it('the script stays under 100 KiB as it is sent, and may be loaded and kept by any page', async () => {
+// Three checks; Angular with Material makes 111 KiB of two fields, a select and a button.
+it('the script stays under 110 KiB as it is sent, and may be loaded and kept by any page', async () => {
   const response = await fetch(`${bench.service.url}/elements/v1/headtree-elements.js`, {
     headers: { 'Accept-Encoding': 'gzip' },
   });
-  expect(Number(response.headers.get('content-length'))).toBeLessThan(100 * 1024);
+  expect(Number(response.headers.get('content-length'))).toBeLessThan(110 * 1024);
   expect(Object.fromEntries(response.headers)).toMatchObject({
     'access-control-allow-origin': '*',
     'cross-origin-resource-policy': 'cross-origin',

@@ -16,7 +16,14 @@ export interface PlaceGroup {
 
 /** The navigation, in the order of the work. */
 export const placeGroups: readonly PlaceGroup[] = [
-  { name: 'Work', places: [{ name: 'Checks', path: '/checks', permission: 'checks:run' }] },
+  {
+    name: 'Checks',
+    places: [
+      { name: 'Waler', path: '/checks/waler', permission: 'checks:run' },
+      { name: 'Cross-section', path: '/checks/section', permission: 'checks:run' },
+      { name: 'Stress', path: '/checks/stress', permission: 'checks:run' },
+    ],
+  },
   {
     name: 'Factors',
     places: [{ name: 'Profiles', path: '/profiles', permission: 'profiles:read' }],

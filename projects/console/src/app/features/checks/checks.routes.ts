@@ -7,4 +7,14 @@ export const checksRoutes: Routes = [
     title: 'Waler check',
     loadComponent: () => import('./waler-page').then((m) => m.WalerPage),
   },
+  {
+    path: 'section',
+    title: 'Cross-section check',
+    loadComponent: () => import('./section-page').then((m) => m.SectionPage),
+  },
+  {
+    path: 'stress',
+    title: 'Stress check',
+    loadComponent: () => import('./stress-page').then((m) => m.StressPage),
+  },
 ];

@@ -1,7 +1,7 @@
-import type { WalerRequest } from './request-in-address';
+import type { SectionRequest, StressRequest, WalerRequest } from '@headtree/checks';
 
 /** A waler over four props, as the documentation asks for it. */
-export const exampleRequest: WalerRequest = {
+export const walerExample: WalerRequest = {
   profile: 'en-recommended',
   section: 'UB 457x191x67',
   material: { type: 'steel', grade: 'S275' },
@@ -19,4 +19,21 @@ export const exampleRequest: WalerRequest = {
   ],
   restraint: 'full',
   deflectionLimit: 'span/200',
+};
+
+/** The waler's cross-section at a prop. */
+export const sectionExample: SectionRequest = {
+  profile: 'en-recommended',
+  section: 'UB 457x191x67',
+  material: { type: 'steel', grade: 'S275' },
+  effects: { compression: 250, My: 180, Vz: 300 },
+  vonMises: true,
+};
+
+/** The same cross-section, for its stresses alone. */
+export const stressExample: StressRequest = {
+  profile: 'en-recommended',
+  section: 'UB 457x191x67',
+  material: { type: 'steel', grade: 'S275' },
+  effects: { compression: 250, My: 180, Vz: 300 },
 };

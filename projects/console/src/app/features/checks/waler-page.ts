@@ -1,43 +1,31 @@
-import { ChangeDetectionStrategy, Component, DOCUMENT, inject, signal } from '@angular/core';
-import { Location } from '@angular/common';
-import { adoptSheetStyles, WalerCheck } from '@headtree/checks';
-import { CopyButton } from '../../shared/copy-button';
-import { PageHead } from '../../shared/page-head';
-import { exampleRequest } from './example';
-import { fromFragment, toFragment, type WalerRequest } from './request-in-address';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { WalerCheck, type WalerRequest } from '@headtree/checks';
+import { CheckHead } from './check-head';
+import { walerExample } from './example';
+import { RequestPage } from './request-page';
 
-const path = '/checks/waler';
-
-/** The library's waler check, under the session; the address carries what was asked. */
+/** The library's waler check on a page of the console. */
 @Component({
   selector: 'app-waler-page',
-  imports: [CopyButton, PageHead, WalerCheck],
+  imports: [CheckHead, WalerCheck],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  templateUrl: './waler-page.html',
-  styleUrl: './waler-page.scss',
+  template: `
+    <app-check-head
+      heading="Waler check"
+      [link]="link()"
+      [unreadable]="unreadable"
+      (filledIn)="fillIn()"
+    />
+    <htc-waler
+      class="check"
+      credentials="session"
+      [value]="request()"
+      (valueChange)="keep($event)"
+    />
+  `,
+  styleUrl: './check-page.scss',
 })
-export class WalerPage {
-  private readonly document = inject(DOCUMENT);
-  private readonly location = inject(Location);
-
-  private readonly carried = this.document.location.hash.slice(1);
-  protected readonly request = signal(fromFragment(this.carried));
-  protected readonly unreadable = this.carried.startsWith('r=') && this.request() === null;
-  protected readonly link = signal(this.request() ? this.document.location.href : null);
-
-  constructor() {
-    adoptSheetStyles(this.document);
-  }
-
-  protected fillIn(): void {
-    this.request.set(exampleRequest);
-    this.keep(exampleRequest);
-  }
-
-  protected keep(request: WalerRequest): void {
-    const address = `${path}#${toFragment(request)}`;
-    // Not a navigation: nothing is loaded and the focus stays in its field.
-    this.location.replaceState(address);
-    this.link.set(new URL(address, this.document.location.origin).href);
-  }
+export class WalerPage extends RequestPage<WalerRequest> {
+  protected readonly path = '/checks/waler';
+  protected readonly example = walerExample;
 }
