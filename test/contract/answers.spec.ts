@@ -61,16 +61,22 @@ it('a problem is what the contract says', async () => {
   expect(validateAnswer('Problem', body)).toEqual([]);
 });
 
-it.each(['full', 'summary'])(
-  'a waler answered with detail=%s is what the contract says',
-  async (detail) => {
-    const { body, status } = await answerTo(
-      request(service.server)
-        .post(`/v1/checks/waler?detail=${detail}`)
-        .set('Authorization', `Bearer ${service.keys.good}`)
-        .send(contract.components.examples.Waler?.value as object),
-    );
-    expect(status).toBe(200);
-    expect(validateAnswer('CheckAnswer', body)).toEqual([]);
-  },
-);
+describe.each([
+  ['waler', 'Waler'],
+  ['section', 'Section'],
+  ['stress', 'Stress'],
+])('%s', (check, example) => {
+  it.each(['full', 'summary'])(
+    'answered with detail=%s is what the contract says',
+    async (detail) => {
+      const { body, status } = await answerTo(
+        request(service.server)
+          .post(`/v1/checks/${check}?detail=${detail}`)
+          .set('Authorization', `Bearer ${service.keys.good}`)
+          .send(contract.components.examples[example]?.value as object),
+      );
+      expect(status).toBe(200);
+      expect(validateAnswer('CheckAnswer', body)).toEqual([]);
+    },
+  );
+});
