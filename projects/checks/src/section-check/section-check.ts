@@ -2,19 +2,18 @@ import { ChangeDetectionStrategy, Component, ViewEncapsulation } from '@angular/
 import { CheckBase } from '../check/check-base';
 import { CheckSheet } from '../check/check-sheet';
 import type { SectionRequest } from '../contract';
-import { EffectFields } from '../effect-fields/effect-fields';
 import { TextField } from '../fields/text-field';
-import { SectionFields } from '../section-fields/section-fields';
 import { DrawnSection } from '../section-figures/drawn-section';
 import { SectionAndStress } from '../section-figures/section-and-stress';
 import { SectionFigures } from '../section-figures/section-figures';
+import { SectionForm } from '../section-form/section-form';
 import { sectionKind, type SectionCheckDraft } from './section-request';
 
 /** A cross-section's check: its effects, its drawing, stress and interaction, the answer and the working. */
 @Component({
   selector: 'htc-section',
   templateUrl: './section-check.html',
-  imports: [CheckSheet, EffectFields, SectionAndStress, SectionFields, SectionFigures, TextField],
+  imports: [CheckSheet, SectionAndStress, SectionFigures, SectionForm, TextField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,
 })

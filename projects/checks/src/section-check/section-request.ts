@@ -1,31 +1,18 @@
 import type { CheckKind, Draft } from '../check/check-session';
 import type { SectionRequest } from '../contract';
-import {
-  effectPointers,
-  isEffectGiven,
-  readEffects,
-  writeEffects,
-  type EffectsDraft,
-} from '../effect-fields/effects-draft';
 import { FieldReader } from '../form/field-reader';
-import { readMaterial, writeGrade } from '../form/material';
 import { writeQuantity } from '../quantity/read-quantity';
 import {
-  isSectionGiven,
-  readSectionDraft,
-  sectionPointers,
-  writeSectionDraft,
-  type SectionDraft,
-} from '../section-fields/section-draft';
+  pointersUnderEffects,
+  readUnderEffects,
+  writeUnderEffects,
+  type UnderEffects,
+} from '../section-form/under-effects';
 
 /** The form of a cross-section as it is typed. */
-export interface SectionCheckDraft extends Draft {
+export interface SectionCheckDraft extends Draft, UnderEffects {
   /** What came from outside; what the form does not show stays in it. */
   readonly kept: Partial<SectionRequest>;
-  readonly section: SectionDraft;
-  /** A grade, or `kept` for a material that is no grade of steel. */
-  readonly grade: string;
-  readonly effects: EffectsDraft;
   readonly netArea: string;
   readonly vonMises: boolean;
 }
@@ -38,45 +25,29 @@ export const sectionKind: CheckKind<SectionRequest, SectionCheckDraft> = {
     return {
       kept,
       profile: kept.profile ?? profile,
-      section: writeSectionDraft(kept.section),
-      grade: writeGrade(kept.material),
-      effects: writeEffects(kept.effects),
+      ...writeUnderEffects(kept),
       netArea: writeQuantity(kept.netArea),
       vonMises: kept.vonMises ?? false,
     };
   },
   read: (draft) => {
-    const { kept, profile, section, grade, effects, netArea, vonMises } = draft;
+    const { kept, profile, netArea, vonMises } = draft;
     const reader = new FieldReader();
-    const material = readMaterial(kept.material, grade);
-    const made = {
+    const { made, wanting } = readUnderEffects(draft, kept.material, reader);
+    const all = {
       ...kept,
       profile: profile || undefined,
-      material,
-      section: readSectionDraft(section, reader),
-      effects: readEffects(effects, reader),
+      ...made,
       netArea:
         netArea === writeQuantity(kept.netArea)
           ? kept.netArea
           : reader.quantity('/netArea', netArea, 'mm^2'),
       vonMises: vonMises === (kept.vonMises ?? false) ? kept.vonMises : vonMises,
     };
-    const wanting = [
-      ...(isSectionGiven(section) ? [] : ['a section']),
-      ...(material ? [] : ['a steel grade']),
-      ...(isEffectGiven(effects) ? [] : ['a design effect']),
-    ];
-    return reader.reading(made, wanting);
+    return reader.reading(all, wanting);
   },
-  shown: ({ section, effects }) => ({
-    pointers: new Set([
-      '/profile',
-      '/material/grade',
-      '/netArea',
-      '/vonMises',
-      ...sectionPointers(section),
-      ...effectPointers(effects),
-    ]),
+  shown: (draft) => ({
+    pointers: new Set(['/profile', '/netArea', '/vonMises', ...pointersUnderEffects(draft)]),
     parts: { '/material': '/material/grade' },
   }),
 };

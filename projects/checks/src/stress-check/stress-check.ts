@@ -2,14 +2,13 @@ import { ChangeDetectionStrategy, Component, computed, ViewEncapsulation } from 
 import { CheckBase } from '../check/check-base';
 import { CheckSheet } from '../check/check-sheet';
 import type { StressRequest } from '../contract';
-import { EffectFields } from '../effect-fields/effect-fields';
 import { ChoiceField } from '../fields/choice-field';
 import { gradeOptions } from '../form/material';
 import { uniqueId } from '../look/unique-id';
-import { SectionFields } from '../section-fields/section-fields';
 import { DrawnSection } from '../section-figures/drawn-section';
 import { SectionAndStress } from '../section-figures/section-and-stress';
 import { SectionFigures } from '../section-figures/section-figures';
+import { SectionForm } from '../section-form/section-form';
 import { StateTable } from '../state-table/state-table';
 import { stressKind, type StressDraft, type StressWay } from './stress-request';
 
@@ -17,15 +16,7 @@ import { stressKind, type StressDraft, type StressWay } from './stress-request';
 @Component({
   selector: 'htc-stress',
   templateUrl: './stress-check.html',
-  imports: [
-    CheckSheet,
-    ChoiceField,
-    EffectFields,
-    SectionAndStress,
-    SectionFields,
-    SectionFigures,
-    StateTable,
-  ],
+  imports: [CheckSheet, ChoiceField, SectionAndStress, SectionFigures, SectionForm, StateTable],
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,
 })

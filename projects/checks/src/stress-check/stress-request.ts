@@ -1,21 +1,13 @@
 import type { CheckKind, Draft } from '../check/check-session';
 import type { StressRequest } from '../contract';
-import {
-  effectPointers,
-  isEffectGiven,
-  readEffects,
-  writeEffects,
-  type EffectsDraft,
-} from '../effect-fields/effects-draft';
 import { FieldReader } from '../form/field-reader';
-import { readMaterial, writeGrade } from '../form/material';
+import { readMaterial } from '../form/material';
 import {
-  isSectionGiven,
-  readSectionDraft,
-  sectionPointers,
-  writeSectionDraft,
-  type SectionDraft,
-} from '../section-fields/section-draft';
+  pointersUnderEffects,
+  readUnderEffects,
+  writeUnderEffects,
+  type UnderEffects,
+} from '../section-form/under-effects';
 import {
   isEmptyState,
   readStates,
@@ -29,14 +21,10 @@ import {
 export type StressWay = 'section' | 'states';
 
 /** The form of a stress check as it is typed. */
-export interface StressDraft extends Draft {
+export interface StressDraft extends Draft, UnderEffects {
   /** What came from outside. */
   readonly kept: Partial<StressRequest>;
   readonly way: StressWay;
-  /** A grade, or `kept` for a material that is no grade of steel. */
-  readonly grade: string;
-  readonly section: SectionDraft;
-  readonly effects: EffectsDraft;
   readonly states: readonly StateRow[];
 }
 
@@ -50,46 +38,36 @@ export const stressKind: CheckKind<StressRequest, StressDraft> = {
       kept,
       profile: kept.profile ?? profile,
       way: kept.states ? 'states' : 'section',
-      grade: writeGrade(kept.material),
-      section: writeSectionDraft(kept.section),
-      effects: writeEffects(kept.effects),
+      ...writeUnderEffects(kept),
       states: states.length > 0 ? states : [stateRow()],
     };
   },
   read: (draft) => {
-    const { profile, way, section, effects, states } = draft;
+    const { kept, profile, way, states } = draft;
     const reader = new FieldReader();
-    const material = readMaterial(draft.kept.material, draft.grade);
-    const bySection = way === 'section';
-    const made = {
-      profile: profile || undefined,
-      material,
-      ...(bySection
-        ? { section: readSectionDraft(section, reader), effects: readEffects(effects, reader) }
-        : { states: readStates(states, reader) }),
-    };
-    const wanting = bySection
-      ? [
-          ...(isSectionGiven(section) ? [] : ['a section']),
-          ...(material ? [] : ['a steel grade']),
-          ...(isEffectGiven(effects) ? [] : ['a design effect']),
-        ]
-      : [
-          ...(material ? [] : ['a steel grade']),
-          ...(states.every(isEmptyState) ? ['a state of stress'] : []),
-        ];
+    if (way === 'section') {
+      const { made, wanting } = readUnderEffects(draft, kept.material, reader);
+      return reader.reading({ profile: profile || undefined, ...made }, wanting);
+    }
+    const material = readMaterial(kept.material, draft.grade);
+    const wanting = [
+      ...(material ? [] : ['a steel grade']),
+      ...(states.every(isEmptyState) ? ['a state of stress'] : []),
+    ];
+    const made = { profile: profile || undefined, material, states: readStates(states, reader) };
     return reader.reading(made, wanting);
   },
-  shown: ({ way, section, effects, states }) => ({
-    pointers: new Set([
-      '/profile',
-      '/material/grade',
-      ...(way === 'section'
-        ? [...sectionPointers(section), ...effectPointers(effects)]
-        : ['/states', ...states.flatMap((row) => rowPointers(states, row))]),
-    ]),
-    parts: { '/material': '/material/grade' },
-  }),
+  shown: (draft) => {
+    const { way, states } = draft;
+    const own =
+      way === 'section'
+        ? pointersUnderEffects(draft)
+        : ['/material/grade', '/states', ...states.flatMap((row) => rowPointers(states, row))];
+    return {
+      pointers: new Set(['/profile', ...own]),
+      parts: { '/material': '/material/grade' },
+    };
+  },
 };
 
 function rowPointers(rows: readonly StateRow[], row: StateRow): string[] {

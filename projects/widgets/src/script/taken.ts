@@ -9,10 +9,12 @@ const warned = new Set<string>();
 export function isTaken(name: string): boolean {
   const first = customElements.get(name);
   if (!first) return false;
-  if (!warned.has(name)) {
-    warned.add(name);
+  const maker = makerOf(first);
+  // Another copy has them all: once is enough.
+  if (!warned.has(maker)) {
+    warned.add(maker);
     console.warn(
-      `Headtree elements ${version}: <${name}> is defined already, by ${makerOf(first)}. ` +
+      `Headtree elements ${version}: <${name}> is defined already, by ${maker}. ` +
         'The first stays in use; load the script once.',
     );
   }
