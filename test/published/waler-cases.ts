@@ -1,15 +1,5 @@
-import type { CheckAnswer, WalerRequest } from '../../server/engine/checks/contract';
-
-/** A published example that a waler's request can state, and where its values stand in the answer. */
-export interface WalerCase {
-  readonly id: string;
-  readonly request: WalerRequest;
-  readonly values: Readonly<Record<string, (answer: CheckAnswer) => number>>;
-  /** Values that the source reached through rounded ones, each with the reason. */
-  readonly rounded?: Readonly<Record<string, string>>;
-  /** Published values that the answer does not hold, each with its reason. */
-  readonly without?: Readonly<Record<string, string>>;
-}
+import type { WalerRequest } from '../../server/engine/checks/contract';
+import { of, top, type Pick, type PublishedCase } from './published-case';
 
 const simple = (value: number, nature: 'permanent' | 'variable' = 'permanent') =>
   nature === 'permanent'
@@ -28,21 +18,23 @@ function sectionOnly(section: WalerRequest['section'], fy: number, profile: stri
   };
 }
 
-const of = (id: string, symbol: string) => (answer: CheckAnswer) => {
-  const found = answer.verifications.find((one) => one.id === id)?.values[symbol];
-  return found?.value ?? NaN;
-};
-const top =
-  (symbol: string, per = 1) =>
-  (answer: CheckAnswer) =>
-    (answer.values[symbol]?.value ?? NaN) / per;
+/** What the first support carries of one action. */
+const reaction =
+  (name: string): Pick =>
+  ({ reactions = [] }) =>
+    reactions[0]?.byAction.find((one) => one.name === name)?.max ?? NaN;
 
-const OTHER_CHECK = 'belongs to a check that comes later';
-const LIMIT = 'a limit of Table 5.2 times epsilon; the ratio and the class it gives are compared';
+const support =
+  (index: number, per = 1): Pick =>
+  ({ reactions = [] }) =>
+    (reactions[index]?.design.persistent?.max ?? NaN) / per;
 
-export const walerCases: readonly WalerCase[] = [
+const OTHER_CHECK = 'for the member check';
+
+export const walerCases: readonly PublishedCase[] = [
   {
     id: 'SP-01',
+    check: 'waler',
     request: sectionOnly('HE 300 B', 235, 'en-recommended'),
     values: { A: top('A', 1e2), Iy: top('I_y', 1e4), Iz: top('I_z', 1e4) },
     rounded: {
@@ -52,6 +44,7 @@ export const walerCases: readonly WalerCase[] = [
   },
   {
     id: 'SP-02',
+    check: 'waler',
     request: sectionOnly('IPE 330', 235, 'en-recommended'),
     values: { 'Wpl,y': top('W_pl_y', 1e3), Iz: top('I_z', 1e4), It: top('I_t', 1e4) },
     without: {
@@ -60,6 +53,7 @@ export const walerCases: readonly WalerCase[] = [
   },
   {
     id: 'CL-01',
+    check: 'waler',
     request: sectionOnly('IPE 330', 235, 'en-recommended'),
     values: {
       eps: top('epsilon'),
@@ -67,15 +61,10 @@ export const walerCases: readonly WalerCase[] = [
       'c/tw': top('c_w_t_w'),
       class: top('section_class'),
     },
-    without: {
-      c_flange: 'a length on the way to c/tf',
-      c_web: 'a length on the way to c/tw',
-      flange_limit_cl1: LIMIT,
-      web_limit_cl1: LIMIT,
-    },
   },
   {
     id: 'CL-03',
+    check: 'waler',
     request: sectionOnly('UBP 356x368x174', 345, 'uk-na'),
     values: {
       class: top('section_class'),
@@ -84,31 +73,41 @@ export const walerCases: readonly WalerCase[] = [
       'fyWel,y': (answer) => ((answer.values.W_el_y?.value ?? NaN) * 345) / 1e6,
       'fyWel,z': (answer) => ((answer.values.W_el_z?.value ?? NaN) * 345) / 1e6,
     },
-    without: { 'Npl,Rd': OTHER_CHECK },
   },
   {
     id: 'CL-06',
+    check: 'waler',
     request: sectionOnly('HEB 160', 275, 'en-recommended'),
     values: { eps: top('epsilon'), 'd/tw': top('c_w_t_w'), 'c/tf': top('c_f_t_f') },
-    without: {
-      web_limit_cl1: `${OTHER_CHECK} (compression)`,
-      c: 'a length on the way to c/tf',
-      flange_limit_cl1: LIMIT,
-    },
   },
   {
     id: 'RB-01',
+    check: 'waler',
     request: {
       profile: 'en-recommended',
       section: 'IPE 330',
       material: { type: 'steel', grade: 'S235' },
       loadBasis: 'characteristic',
       spans: [5.7],
-      // The beam's own weight, slab and finishes 2.5 m apart, as the example adds them.
-      loads: [simple(0.482 + 2.5 * (2.88 + 0.75)), simple(2.5 * 2.5, 'variable')],
+      // The beam's own weight, and slab, finishes and imposed load on 2.5 m.
+      loads: [
+        simple(0.482),
+        { name: 'permanent', nature: 'permanent', kind: 'area', value: 2.88, width: 2.5 },
+        { name: 'permanent', nature: 'permanent', kind: 'area', value: 0.75, width: 2.5 },
+        {
+          name: 'imposed',
+          nature: 'variable',
+          category: 'imposed-b',
+          kind: 'area',
+          value: 2.5,
+          width: 2.5,
+        },
+      ],
       selfWeight: false,
     },
     values: {
+      gk: (answer) => (reaction('permanent')(answer) * 2) / 5.7,
+      qk: (answer) => (reaction('imposed')(answer) * 2) / 5.7,
       w_Ed: (answer) => (of('shear-z', 'V_z_Ed')(answer) * 2) / 5.7,
       'My,Ed': of('bending-y', 'M_y_Ed'),
       VEd: of('shear-z', 'V_z_Ed'),
@@ -117,10 +116,11 @@ export const walerCases: readonly WalerCase[] = [
       'My,Ed': 'the source goes on with w_Ed rounded to 22.28 kN/m',
       VEd: 'the source goes on with w_Ed rounded to 22.28 kN/m',
     },
-    without: { gk: 'a sum of inputs', qk: 'a product of inputs' },
   },
   {
     id: 'RB-03',
+    check: 'waler',
+    given: 'Wply',
     request: sectionOnly(
       { designation: 'IPE 450', properties: { Wply: 1702000 } },
       355,
@@ -130,16 +130,19 @@ export const walerCases: readonly WalerCase[] = [
   },
   {
     id: 'RB-04',
+    check: 'waler',
+    given: 'A',
     request: sectionOnly({ designation: 'IPE 450', properties: { A: 9880 } }, 355, 'uk-na'),
     values: {
       Av: of('shear-z', 'A_v_z'),
       'Vpl,Rd': of('shear-z', 'V_pl_z_Rd'),
       '0.5Vpl,Rd': (answer) => 0.5 * of('shear-z', 'V_pl_z_Rd')(answer),
     },
-    without: { eta_hw_tw: 'the lower bound of A_v, inside its formula' },
   },
   {
     id: 'RB-07',
+    check: 'waler',
+    given: 'A_v',
     request: sectionOnly(
       { designation: 'IPE 330', properties: { Avy: 3680 } },
       355,
@@ -149,6 +152,7 @@ export const walerCases: readonly WalerCase[] = [
   },
   {
     id: 'LT-07',
+    check: 'waler',
     request: sectionOnly('610x229x125 UKB', 265, 'uk-na'),
     values: {
       'cf/(tf eps)': (answer) => top('c_f_t_f')(answer) / top('epsilon')(answer),
@@ -165,6 +169,8 @@ export const walerCases: readonly WalerCase[] = [
   },
   {
     id: 'DF-01',
+    check: 'waler',
+    given: 'Iy',
     request: {
       ...sectionOnly(
         { designation: 'IPE 330', properties: { Iy: '9504 cm4' } },
@@ -184,6 +190,8 @@ export const walerCases: readonly WalerCase[] = [
   },
   {
     id: 'DF-03',
+    check: 'waler',
+    given: 'Iy',
     request: {
       ...sectionOnly(
         { designation: 'IPE 330', properties: { Iy: '11770 cm4' } },
@@ -200,10 +208,28 @@ export const walerCases: readonly WalerCase[] = [
       'w_G+Q': of('deflection', 'w_inst'),
       'span/w_G+Q': (answer) => 5700 / of('deflection', 'w_inst')(answer),
     },
-    without: { w_Q: 'a part of the deflection by one action' },
+  },
+  {
+    id: 'DF-03',
+    check: 'waler',
+    given: 'Iy',
+    request: {
+      ...sectionOnly(
+        { designation: 'IPE 330', properties: { Iy: '11770 cm4' } },
+        235,
+        'en-recommended',
+      ),
+      loadBasis: 'characteristic',
+      spans: [5.7],
+      loads: [simple(6.25, 'variable')],
+      selfWeight: false,
+      deflectionLimit: 'span/250',
+    },
+    values: { w_Q: of('deflection', 'w_inst') },
   },
   {
     id: 'EX-01',
+    check: 'waler',
     request: {
       ...sectionOnly('UC 254x254x89', 275, 'en-recommended'),
       spans: [4],
@@ -212,13 +238,48 @@ export const walerCases: readonly WalerCase[] = [
     },
     values: {
       M_waler: of('bending-y', 'M_y_Ed'),
-      P_A: (answer) => 2 * (answer.reactions?.[0]?.design.persistent?.max ?? NaN),
+      P_A: support(0, 0.5),
     },
-    without: Object.fromEntries(
-      ['Ka', 'A', 'B1', 'C', 'B2', 'P_B', 'P_C'].map((key) => [
-        key,
-        'earth pressure and other struts',
-      ]),
-    ),
+    without: { Ka: 'earth pressure', P_B: 'the sum of B1 and B2 of two spans, times the spacing' },
+  },
+  {
+    id: 'EX-01',
+    check: 'waler',
+    // The wall above the middle strut, a metre of it, on the two upper struts.
+    request: {
+      ...sectionOnly('UC 254x254x89', 275, 'en-recommended'),
+      spans: [3],
+      overhangs: { start: 2 },
+      loads: [simple(26.95)],
+      selfWeight: false,
+    },
+    values: { A: support(0), B1: support(1) },
+  },
+  {
+    id: 'EX-01',
+    check: 'waler',
+    // The wall below it.
+    request: {
+      ...sectionOnly('UC 254x254x89', 275, 'en-recommended'),
+      spans: [3],
+      overhangs: { end: 1 },
+      loads: [simple(26.95)],
+      selfWeight: false,
+    },
+    values: { B2: support(0), C: support(1), P_C: support(1, 1 / 4) },
+    rounded: { P_C: 'the source goes on with C rounded to 71.87 kN/m' },
+  },
+  {
+    id: 'EX-04',
+    check: 'waler',
+    given: 'a section, which the example is still to find',
+    request: {
+      ...sectionOnly('UC 254x254x89', 275, 'en-recommended'),
+      spans: [3],
+      loads: [simple(45.2 + 45.2)],
+      selfWeight: false,
+    },
+    values: { M_waler: of('bending-y', 'M_y_Ed') },
+    without: { S_required: 'a section by an allowable stress' },
   },
 ];
