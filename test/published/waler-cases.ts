@@ -46,10 +46,13 @@ export const walerCases: readonly PublishedCase[] = [
     id: 'SP-02',
     check: 'waler',
     request: sectionOnly('IPE 330', 235, 'en-recommended'),
-    values: { 'Wpl,y': top('W_pl_y', 1e3), Iz: top('I_z', 1e4), It: top('I_t', 1e4) },
-    without: {
-      Iw: 'recomputed as I_z h_s²/4; mill catalogues print the flanges alone, as the engine does',
+    values: {
+      'Wpl,y': top('W_pl_y', 1e3),
+      Iz: top('I_z', 1e4),
+      It: top('I_t', 1e4),
+      Iw: top('I_w', 1e6),
     },
+    rounded: { Iw: 'printed to four figures' },
   },
   {
     id: 'CL-01',
