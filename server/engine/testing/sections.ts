@@ -13,7 +13,7 @@ export interface Loaded {
 
 export function runSection(
   request: Omit<SectionRequest, 'profile'>,
-  { profile = 'en-recommended', detail = 'summary' as 'full' | 'summary' } = {},
+  { profile = 'en-recommended', detail = 'summary' } = {},
 ): CheckAnswer {
   return section.run(request, { profile: publishedRevision(profile), detail });
 }

@@ -6,18 +6,8 @@ import { isOpen } from '../cross-section/torsion';
 import { refuse } from '../refuse';
 import type { SteelSection } from '../steel/section';
 
-/** Effects with their signs, N, N mm, N mm²; torsion by its parts. */
-export interface SignedEffects {
-  readonly compression: number;
-  readonly tension: number;
-  readonly M_y: number;
-  readonly M_z: number;
-  readonly V_z: number;
-  readonly V_y: number;
-  readonly T_t: number;
-  readonly T_w: number;
-  readonly B: number;
-}
+/** Effects with their signs: M_y stretches z > 0, M_z y > 0, T turns y towards z. */
+export type SignedEffects = CrossEffects;
 
 /** @throws {Refusal} about torsion whose parts are wanting or do not agree */
 export function readEffects(given: SectionEffects, section: SteelSection): SignedEffects {

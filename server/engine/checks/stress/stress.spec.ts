@@ -92,7 +92,10 @@ describe('named points of a section', () => {
         if (typeof section === 'object' && 'shape' in section && section.shape === 'angle') return;
         const { My = 0, Vy = 0 } = effects;
         const down = check({ section, effects }, one.fy);
-        const up = check({ section, effects: { ...effects, My: -My, Vy: -Vy } }, one.fy);
+        const up = check(
+          { section, effects: { ...effects, My: -Number(My), Vy: -Number(Vy) } },
+          one.fy,
+        );
         for (const point of down.points ?? []) {
           const id = point.id.replace(/top|bottom/, (side) => mirror[side] ?? side);
           const other = pointOf(up, id);

@@ -1,4 +1,4 @@
-import type { SectionShape } from './shape';
+import type { ChannelShape, IShape, SectionShape } from './shape';
 
 /** A dimension that cannot be, by the contract's name of it. */
 export interface Impossibility {
@@ -23,40 +23,10 @@ const rule = (holds: boolean, dimension: string, message: string): Rule => [
 
 function rulesOf(shape: SectionShape): Rule[] {
   switch (shape.shape) {
-    case 'I': {
-      const { h, b, t_w, t_f, r } = shape;
-      return [
-        rule(2 * t_f < h, 'tf', `Two flanges of ${t_f} mm leave no web in a depth of ${h} mm.`),
-        rule(t_w < b, 'tw', `The web of ${t_w} mm is no thinner than the flange is wide, ${b} mm.`),
-        rule(
-          2 * t_f + 2 * r <= h,
-          'r',
-          `There is no room for roots of ${r} mm between the flanges.`,
-        ),
-        rule(
-          t_w + 2 * r <= b,
-          'r',
-          `Roots of ${r} mm beside the web are wider than the flange, ${b} mm.`,
-        ),
-      ];
-    }
-    case 'channel': {
-      const { h, b, t_w, t_f, r } = shape;
-      return [
-        rule(2 * t_f < h, 'tf', `Two flanges of ${t_f} mm leave no web in a depth of ${h} mm.`),
-        rule(t_w < b, 'tw', `The web of ${t_w} mm is no thinner than the flange is wide, ${b} mm.`),
-        rule(
-          2 * t_f + 2 * r <= h,
-          'r',
-          `There is no room for roots of ${r} mm between the flanges.`,
-        ),
-        rule(
-          t_w + r <= b,
-          'r',
-          `A root of ${r} mm beside the web is wider than the flange, ${b} mm.`,
-        ),
-      ];
-    }
+    case 'I':
+      return flangedRules(shape, 2);
+    case 'channel':
+      return flangedRules(shape, 1);
     case 'RHS': {
       const { h, b, t, r_o } = shape;
       const least = Math.min(h, b);
@@ -86,4 +56,18 @@ function rulesOf(shape: SectionShape): Rule[] {
     case 'round':
       return [];
   }
+}
+
+/** @param outstands sides of the web that hold a flange */
+function flangedRules({ h, b, t_w, t_f, r }: IShape | ChannelShape, outstands: 1 | 2): Rule[] {
+  return [
+    rule(2 * t_f < h, 'tf', `Two flanges of ${t_f} mm leave no web in a depth of ${h} mm.`),
+    rule(t_w < b, 'tw', `The web of ${t_w} mm is no thinner than the flange is wide, ${b} mm.`),
+    rule(2 * t_f + 2 * r <= h, 'r', `There is no room for roots of ${r} mm between the flanges.`),
+    rule(
+      t_w + outstands * r <= b,
+      'r',
+      `A root of ${r} mm beside the web is wider than the flange, ${b} mm.`,
+    ),
+  ];
 }
