@@ -92,12 +92,12 @@ describe('published steel examples, through the API with their stated inputs', (
       [...ids].reduce((total, id) => total + Object.keys(exampleOf(id).published).length, 0);
     const leftOut = cases.flatMap(({ without = {} }) => Object.keys(without)).length;
     expect(compared.size).toBe(sum(taken) - leftOut);
-    process.stdout.write(
+    console.info(
       `published steel examples: ${taken.size} of ${examples.size} taken by ${cases.length} requests; ` +
         `${compared.size} of their ${sum(taken)} values compared (${comparisons} comparisons), ` +
         `${roundedOnTheWay.size} of them from a source that rounds on its way, ${leftOut} left out; ` +
         `${inputsMade} stated inputs made anew; ` +
-        `${leftToLater.size} examples with ${sum(leftToLater.keys())} values left to later\n`,
+        `${leftToLater.size} examples with ${sum(leftToLater.keys())} values left to later`,
     );
   });
 });
