@@ -32,7 +32,7 @@ export default tseslint.config(
   },
   {
     files: ['server/engine/**/*.ts'],
-    ignores: ['**/*.spec.ts', 'server/engine/testing/'],
+    ignores: ['**/*.spec.ts', 'server/engine/testing/**'],
     rules: walls([
       outsideEngine,
       wall('The engine knows no feature.', '**/features/**'),
