@@ -34,7 +34,7 @@ export function layoutSection(model: SectionModel, width: number): SectionLayout
   const { bounds, marks, depth } = model;
   const markWidth = Math.max(0, ...marks.map(({ text }) => textWidth(text)));
   const gutters = {
-    left: textWidth(depth) + 18,
+    left: textWidth(depth) + 22,
     right: (markWidth > 0 ? markWidth + 22 : 0) + AXIS + 14,
     top: model.width ? 32 : 14,
     bottom: AXIS + 22,

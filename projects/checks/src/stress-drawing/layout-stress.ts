@@ -193,7 +193,8 @@ function labelsOf(
     const { y, z } = point;
     if (y === null || z === null) continue;
     const near = nearest({ y, z }, walls, stations);
-    if (!near) continue;
+    // The corner of a solid lies on none of its lines: its value stands in the table alone.
+    if (!near || Math.abs(near.station.value - point[of]) > most * 0.06) continue;
     const out = near.station.out;
     const text = stressText(point[of], of);
     const wide = textWidth(text);
