@@ -2,7 +2,7 @@
  * Bending with axial force: EN 1993-1-1 6.2.9 and 6.2.10, and with the shear of webs that buckle:
  * EN 1993-1-5 7.1, as clauses.md has them. N and mm.
  */
-import { isSlender, worst } from './classes.mjs';
+import { isSlender } from './classes.mjs';
 import { effectiveArea, flangeArea, flangeThickness } from './effective.mjs';
 import {
   bendingResistance,
@@ -47,8 +47,8 @@ function axialWithShear({ member, rho }) {
   return Math.max(0, member.gross.A - rho.z * areas.z - along) * member.fy;
 }
 
-/** @param {Together} together @param {Axis} axis @param {SectionClass} [of] */
-function bendingWithShear({ member, of: section, rho }, axis, of = section) {
+/** @param {Together} together @param {Axis} axis */
+function bendingWithShear({ member, of, rho }, axis) {
   return bendingResistance(member, axis, of, rho);
 }
 
@@ -128,8 +128,12 @@ function exponents(section, n) {
  * The eccentricities that compression has of the effective area; only a channel's is not zero.
  * @param {Together} together @returns {Record<Axis, number>}
  */
-function shiftsOf({ member: { section, fy }, compressed }) {
-  return compressed && isSlender(section, fy) ? effectiveArea(section, fy).e : { y: 0, z: 0 };
+function shiftsOf({ member, of, axial, compressed }) {
+  const { section, fy, gross } = member;
+  const none = { y: 0, z: 0 };
+  if (!compressed || of <= 2 || !isSlender(section, fy)) return none;
+  const isSquashed = compressionResistance(member, of, axial) < gross.A * fy;
+  return isSquashed ? effectiveArea(section, fy).e : none;
 }
 
 /** Whether the axial force bends about an axis by itself. @param {Together} together @param {Axis} axis */
@@ -143,7 +147,9 @@ function axialSum(together) {
   if (axial === 0) return 0;
   const withShear = axialWithShear(together);
   const resistance =
-    of >= 3 && compressed ? Math.min(withShear, compressionResistance(member)) : withShear;
+    of >= 3 && compressed
+      ? Math.min(withShear, compressionResistance(member, of, axial))
+      : withShear;
   return resistance > 0 ? axial / resistance : null;
 }
 
@@ -153,15 +159,13 @@ function axialSum(together) {
  * @param {Together} together @param {readonly Axis[]} axes
  */
 export function linearSum(together, axes) {
-  const { of, classes, axial, moments } = together;
+  const { axial, moments } = together;
   const shifts = shiftsOf(together);
   let sum = axialSum(together);
   for (const axis of AXES) {
     const moment = (axes.includes(axis) ? moments[axis] : 0) + axial * shifts[axis];
     if (moment === 0) continue;
-    // Where the eccentricity alone bends about an axis, the section's class may not know of it.
-    const known = moments[axis] > 0 ? of : worst([of, classes[axis]]);
-    const resistance = bendingWithShear(together, axis, known);
+    const resistance = bendingWithShear(together, axis);
     if (sum === null || resistance <= 0) return null;
     sum += moment / resistance;
   }

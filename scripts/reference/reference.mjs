@@ -16,6 +16,7 @@ import {
   memberOf,
   plasticShear,
   shearReductions,
+  shearWith,
   tensionResistance,
   unsheared,
 } from './resistances.mjs';
@@ -99,7 +100,8 @@ function alone({ member, axial, compressed, moments, shear, classes }) {
   /** @type {Record<string, Expected>} */
   const made = {};
   if (axial > 0) {
-    if (compressed) made['compression'] = against(axial, compressionResistance(member), KILO);
+    if (compressed)
+      made['compression'] = against(axial, squashOf({ member, axial, classes }), KILO);
     else made['tension'] = against(axial, tensionResistance(member), KILO);
   }
   for (const axis of AXES) {
@@ -142,16 +144,30 @@ function bendingWithShear(given) {
   return made;
 }
 
+/** Against compression the worse of both classes counts, whatever bends. @param {Pick<Case, 'member' | 'axial' | 'classes'>} given */
+function squashOf({ member, axial, classes }) {
+  return compressionResistance(member, worst([classes.y, classes.z]), axial);
+}
+
+/** The class of one axis where its moment acts alone, else the worse of both. @param {Case} given @param {Axis} axis @returns {Case} */
+function seenFrom(given, axis) {
+  const { moments, classes } = given;
+  const isAlone = moments[axis] > 0 && moments[shearWith[axis]] === 0;
+  return { ...given, of: isAlone ? classes[axis] : worst([classes.y, classes.z]) };
+}
+
 /** @param {Case} given */
 function withAxial(given) {
   const { axial, moments, rho } = given;
   /** @type {Record<string, Expected>} */
   const made = {};
   for (const axis of AXES) {
-    if (axial === 0 || (moments[axis] === 0 && !isShifted(given, axis))) continue;
-    made[`bending-axial-${axis}`] = isPlastic(given)
-      ? against(moments[axis], momentWithAxial(given, axis), MEGA)
-      : summed(linearSum(given, [axis]));
+    const seen = seenFrom(given, axis);
+    if (axial === 0 || (moments[axis] === 0 && !isShifted(seen, axis))) continue;
+    made[`bending-axial-${axis}`] =
+      isPlastic(seen) && moments[axis] > 0
+        ? against(moments[axis], momentWithAxial(seen, axis), MEGA)
+        : summed(linearSum(seen, [axis]));
   }
   const isBent = moments.y > 0 || moments.z > 0;
   if (axial > 0 && !isBent && (rho.y > 0 || rho.z > 0)) {

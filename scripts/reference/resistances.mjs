@@ -29,9 +29,14 @@ export function tensionResistance({ gross, fy }) {
   return gross.A * fy;
 }
 
-/** @param {Member} member */
-export function compressionResistance({ section, fy, gross }) {
-  return (isSlender(section, fy) ? effectiveArea(section, fy).A : gross.A) * fy;
+/**
+ * The whole area up to class 3, what uniform compression leaves of class 4 plates beyond; that is also
+ * the most that any force finds.
+ * @param {Member} member @param {SectionClass} of @param {number} compression
+ */
+export function compressionResistance({ section, fy, gross }, of, compression) {
+  const squashed = isSlender(section, fy) ? effectiveArea(section, fy).A * fy : gross.A * fy;
+  return of === 4 || compression > squashed ? squashed : gross.A * fy;
 }
 
 /** Clear height of the webs along a direction. @param {Section} section @param {Axis} [direction] */

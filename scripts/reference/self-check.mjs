@@ -133,10 +133,8 @@ function checkBuckling() {
   const thin = { shape: 'channel', h: 300, b: 100, tw: 4, tf: 10, r: 0 };
   const shifted = verified(thin, 355, { compression: 100 }, 'bending-axial-z');
   same('channel, N e_N,z alone', shifted?.utilisation, 0.14267);
-  const besides = verified(thin, 355, { compression: 100, My: 10 }, 'bending-axial-y');
-  const alone = verified(thin, 355, { My: 10 }, 'bending-y');
-  const sum = 0.14267 + (alone?.utilisation ?? 0);
-  same('channel, N e_N,z beside M_y', besides?.utilisation, sum);
+  const besides = verified(thin, 355, { compression: 100, My: 10 }, 'bending-axial-z');
+  same('channel, N e_N,z beside M_y', besides?.utilisation, 0.14267);
 }
 
 /** By hand: N_V of the HE 300 B 4686.2 kN at rho 0.36; V_pl of the tube 857.1 kN, rho 0.02778. */

@@ -107,7 +107,7 @@ const classes: readonly SectionCase[] = [
     id: 'C4-01',
     check: 'section',
     request: asked({ shape: 'I', h: 530, b: 305, tw: 5, tf: 15, fabrication: 'welded' }, 355, {
-      compression: ANY,
+      compression: 4000,
     }),
     given: 'an outstand of b/t = 10 on a section whose web makes it class 4: angles are refused',
     values: {
@@ -201,8 +201,7 @@ const together: readonly SectionCase[] = [
     }),
     given: 'A',
     values: {
-      // The source names A f_y/gamma_M0 so; N_c_Rd is of the section under N alone, class 4 here.
-      'Nc,Rd': of('bending-axial-y', 'N_pl_Rd'),
+      'Nc,Rd': of('compression', 'N_c_Rd'),
       '0.25Npl,Rd': of('bending-axial-y', 'N_lim_1'),
       '0.5hw.tw.fy': of('bending-axial-y', 'N_lim_2'),
     },
@@ -210,7 +209,12 @@ const together: readonly SectionCase[] = [
   {
     id: 'NM-04',
     check: 'section',
-    request: asked('IPE 330', 355, { compression: 1477, Mz: 2.86 }),
+    // The source has A_eff for uniform compression and states it; by N_Ed the web is class 3.
+    request: asked({ designation: 'IPE 330', properties: { A: 6095 } }, 355, {
+      compression: 1477,
+      Mz: 2.86,
+    }),
+    given: 'A_eff, as A',
     values: {
       N_ratio: ({ verifications }) =>
         verifications.find(({ id }) => id === 'compression')?.utilisation ?? NaN,
@@ -218,15 +222,8 @@ const together: readonly SectionCase[] = [
         verifications.find(({ id }) => id === 'bending-z')?.utilisation ?? NaN,
       sum: of('bending-axial-z', 'utilisation'),
     },
-    rounded: {
-      N_ratio: 'the source takes A as 6260 mm² and A_eff as 6095 mm²',
-      sum: 'the source adds its rounded ratios',
-      Aeff_mm2: 'the source takes A as 6260 mm²',
-    },
-    made: {
-      Aeff_mm2: { half: 0.5, pick: of('compression', 'A_eff') },
-      Mz_Rd_kNm: { half: 0.005, pick: of('bending-z', 'M_c_z_Rd') },
-    },
+    rounded: { sum: 'the source adds its rounded ratios' },
+    made: { Mz_Rd_kNm: { half: 0.005, pick: of('bending-z', 'M_c_z_Rd') } },
   },
   {
     id: 'GN-6.6',

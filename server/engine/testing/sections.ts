@@ -1,4 +1,5 @@
 import fc from 'fast-check';
+import type { Detail } from '../checks/check';
 import type { CheckAnswer, SectionEffects, SectionInput, SectionRequest } from '../checks/contract';
 import { section } from '../checks/section/section';
 import { Refusal } from '../refusal';
@@ -13,9 +14,9 @@ export interface Loaded {
 
 export function runSection(
   request: Omit<SectionRequest, 'profile'>,
-  { profile = 'en-recommended', detail = 'summary' } = {},
+  { profile = 'en-recommended', detail }: { profile?: string; detail?: Detail } = {},
 ): CheckAnswer {
-  return section.run(request, { profile: publishedRevision(profile), detail });
+  return section.run(request, { profile: publishedRevision(profile), detail: detail ?? 'summary' });
 }
 
 /** The refusal of a request that the engine will not answer. */

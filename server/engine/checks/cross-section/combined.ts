@@ -149,7 +149,9 @@ function plasticSides(
 function isOwed(section: SteelSection, effects: CrossEffects, axis: Axis): boolean {
   if (axis === 'z') {
     if (effects.M_z > 0) return true;
-    return effects.compression > 0 && compressionOf(section, silentSheet).e_N_z > 0;
+    if (effects.compression === 0) return false;
+    const sectionClass = classFor(section, effects, ['y', 'z'], silentSheet);
+    return compressionOf(section, effects, sectionClass, silentSheet).e_N_z > 0;
   }
   if (effects.M_y > 0) return true;
   return effects.M_z === 0 && isSheared(section, effects);
@@ -162,9 +164,10 @@ function isSheared(section: SteelSection, effects: CrossEffects): boolean {
   );
 }
 
-/** Where both moments act, or neither, the worse class of both counts for all of it. */
+/** Where one moment alone acts its axis sets the class, else the worse of both. */
 function axesOf({ M_y, M_z }: CrossEffects, axis: Axis): readonly Axis[] {
-  return M_y > 0 === M_z > 0 ? ['y', 'z'] : [axis];
+  if (M_y > 0 && M_z === 0 && axis === 'y') return ['y'];
+  return M_z > 0 && M_y === 0 && axis === 'z' ? ['z'] : ['y', 'z'];
 }
 
 function only({ M_y, M_z }: CrossEffects, axis: Axis): { M_y: number; M_z: number } {

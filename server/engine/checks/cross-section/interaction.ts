@@ -20,13 +20,7 @@ import { webHeight } from '../../steel/shear';
 import type { Axis } from '../steel/bending';
 import type { SteelSection } from '../steel/section';
 import { axialOf, type CrossEffects } from './effects';
-import {
-  axialResistance,
-  classFor,
-  isPlastic,
-  momentResistance,
-  type AxialResistance,
-} from './resistances';
+import { axialResistance, isPlastic, momentResistance, type AxialResistance } from './resistances';
 import { bimomentLimit } from './torsion';
 
 /** M_N_y_Rd or M_N_z_Rd of class 1 and 2 in N mm (6.2.9.1), shear taken off first (6.2.10). */
@@ -40,7 +34,7 @@ export function reducedByAxial(
   const M_pl_Rd = momentResistance(section, effects, axis, sectionClass, sheet);
   const N_Ed = axialOf(effects);
   if (N_Ed === 0) return M_pl_Rd;
-  const axial = axialResistance(section, effects, true, sheet);
+  const axial = axialResistance(section, effects, 1, sheet);
   if (axial.N_Rd === 0) return 0;
   const n = sheet.evaluate(axialRatio, { N_Ed, N_pl_Rd: axial.N_Rd });
   const { shape, properties } = section;
@@ -144,7 +138,7 @@ function exponents(
   if (shape.shape === 'CHS') return { alpha: given('alpha', 2), beta: given('beta', 2) };
   if (shape.shape === 'rectangle') return { alpha: given('alpha', 1), beta: given('beta', 1) };
   const N_Ed = axialOf(effects);
-  const { N_Rd: N_pl_Rd } = axialResistance(section, effects, true, sheet);
+  const { N_Rd: N_pl_Rd } = axialResistance(section, effects, 1, sheet);
   const n = N_Ed === 0 ? 0 : sheet.evaluate(axialRatio, { N_Ed, N_pl_Rd });
   if (shape.shape === 'RHS') {
     const alpha = sheet.evaluate(exponentOfHollow, { n });
@@ -170,17 +164,12 @@ export function sumOfRatios(
   const graded = effects.B > 0 ? (Math.max(sectionClass, 3) as SectionClass) : sectionClass;
   const N_Ed = axialOf(effects);
   const plastic = graded <= 2;
-  const { N_Rd, e_N_z } = axialResistance(section, effects, plastic, sheet);
+  const { N_Rd, e_N_z } = axialResistance(section, effects, graded, sheet);
   const added =
     e_N_z > 0 ? sheet.evaluate(addedMoment, { N_Ed: effects.compression, e_N: e_N_z }) : 0;
   const M_z_Ed = bent.M_z + added;
   const M_y_Rd = momentResistance(section, effects, 'y', graded, sheet);
-  // Where the shift alone bends about z-z, the class asked for may not know of it.
-  const shifted = added > 0 && bent.M_z === 0;
-  const classZ = shifted
-    ? (Math.max(graded, classFor(section, effects, ['z'], sheet)) as SectionClass)
-    : graded;
-  const M_z_Rd = momentResistance(section, effects, 'z', classZ, sheet);
+  const M_z_Rd = momentResistance(section, effects, 'z', graded, sheet);
   if (N_Ed > 0 && N_Rd === 0) return { value: 1, zero: 'N_Rd' };
   if (bent.M_y > 0 && M_y_Rd === 0) return { value: 1, zero: 'M_y_Rd' };
   if (M_z_Ed > 0 && M_z_Rd === 0) return { value: 1, zero: 'M_z_Rd' };

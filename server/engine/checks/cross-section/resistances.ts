@@ -1,4 +1,4 @@
-import type { Sheet } from '../../formula/sheet';
+import { silentSheet, type Sheet } from '../../formula/sheet';
 import {
   axialWithShear,
   compressionResistance,
@@ -29,21 +29,36 @@ export function classFor(
   ) as SectionClass;
 }
 
-/** What uniform compression leaves: N_c_Rd in N and the shift of the centroid in mm. */
+/** What compression leaves: N_c_Rd in N and the shift of the centroid in mm. */
+export interface CompressionResistance {
+  readonly N_c_Rd: number;
+  readonly e_N_z: number;
+}
+
+/**
+ * By the class that N_Ed gives: the whole area up to class 3. A web that class 3 takes for bent may
+ * be squashed all the same: what uniform compression leaves of class 4 plates is the most that any
+ * N_Ed finds.
+ */
 export function compressionOf(
   section: SteelSection,
+  { compression }: CrossEffects,
+  sectionClass: SectionClass,
   sheet: Sheet,
-): { readonly N_c_Rd: number; readonly e_N_z: number } {
+): CompressionResistance {
   const { f_y, gamma_M0, properties } = section;
-  if (classOf(section, 'compression', 0, sheet) === 4) {
-    const { A_eff, e_N_z } = effectiveInCompression(section, sheet);
-    return {
-      N_c_Rd: sheet.evaluate(effectiveCompressionResistance, { A_eff, f_y, gamma_M0 }),
-      e_N_z,
-    };
-  }
-  const { A } = properties;
-  return { N_c_Rd: sheet.evaluate(compressionResistance, { A, f_y, gamma_M0 }), e_N_z: 0 };
+  const whole = (): CompressionResistance => {
+    const N_c_Rd = sheet.evaluate(compressionResistance, { A: properties.A, f_y, gamma_M0 });
+    return { N_c_Rd, e_N_z: 0 };
+  };
+  const squashed = (to: Sheet): CompressionResistance => {
+    const { A_eff, e_N_z } = effectiveInCompression(section, to);
+    const N_c_Rd = to.evaluate(effectiveCompressionResistance, { A_eff, f_y, gamma_M0 });
+    return { N_c_Rd, e_N_z };
+  };
+  if (sectionClass === 4) return squashed(sheet);
+  if (classOf(section, 'compression', 0, sheet) < 4) return whole();
+  return compression > squashed(silentSheet).N_c_Rd ? squashed(sheet) : whole();
 }
 
 /** The axial resistance that stands in a sum or in n, with what shear takes of it (6.2.10), N. */
@@ -55,11 +70,10 @@ export interface AxialResistance {
   readonly e_N_z: number;
 }
 
-/** @param plastic whether N_pl_Rd counts, class 1 and 2; else N_c_Rd, which class 4 lowers */
 export function axialResistance(
   section: SteelSection,
   effects: CrossEffects,
-  plastic: boolean,
+  sectionClass: SectionClass,
   sheet: Sheet,
 ): AxialResistance {
   const { f_y, gamma_M0, properties } = section;
@@ -73,13 +87,10 @@ export function axialResistance(
   const whole = sheared
     ? sheet.evaluate(axialWithShear, { A, rho_z, A_v_z, rho_y, A_v_y, f_y, gamma_M0 })
     : sheet.evaluate(grossTension, { A, f_y, gamma_M0 });
-  if (effects.compression === 0) return { N_Rd: whole, rho_z, A_v_z, e_N_z: 0 };
-  // The gross area may count by class while the plates of a channel shift under compression.
-  if (plastic && section.shape.shape !== 'channel') {
+  if (effects.compression === 0 || sectionClass <= 2) {
     return { N_Rd: whole, rho_z, A_v_z, e_N_z: 0 };
   }
-  const { N_c_Rd, e_N_z } = compressionOf(section, sheet);
-  if (plastic) return { N_Rd: whole, rho_z, A_v_z, e_N_z };
+  const { N_c_Rd, e_N_z } = compressionOf(section, effects, sectionClass, sheet);
   return { N_Rd: Math.min(whole, N_c_Rd), rho_z, A_v_z, e_N_z };
 }
 

@@ -68,12 +68,14 @@ function netResistance(
 
 export function compression(
   section: SteelSection,
-  { compression: N }: CrossEffects,
+  effects: CrossEffects,
   withSteps: boolean,
 ): Finding {
   return finding('compression', compressionCriterion, withSteps, (sheet) => {
-    const N_Ed = sheet.given('N_Ed', N, 'kN', 'Design compression', GIVEN);
-    const { N_c_Rd } = compressionOf(section, sheet);
+    const N_Ed = effects.compression;
+    // Whatever bends it, so that more moment never makes the class lower.
+    const sectionClass = classFor(section, effects, ['y', 'z'], sheet);
+    const { N_c_Rd } = compressionOf(section, effects, sectionClass, sheet);
     sheet.evaluate(compressionCriterion, { N_Ed, N_c_Rd });
     return { effect: side('N_Ed', N_Ed, 'kN'), resistance: side('N_c_Rd', N_c_Rd, 'kN') };
   });

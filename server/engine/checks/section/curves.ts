@@ -16,7 +16,7 @@ import type { SteelSection } from '../steel/section';
 
 type Curve = NonNullable<CheckAnswer['interaction']>[number];
 
-const STEPS = 40;
+const STEPS = 24;
 const parts = Array.from({ length: STEPS + 1 }, (_, index) => index / STEPS);
 
 /** What the section carries together, shear and torsion as they act, with the point that acts. */
@@ -32,7 +32,7 @@ export function curvesOf(section: SteelSection, effects: CrossEffects): Curve[] 
 
 /** Greatest moment about one axis for each axial force, the other moment absent. */
 function axialCurve(section: SteelSection, effects: CrossEffects, axis: Axis): Curve {
-  const { N_Rd } = axialResistance(section, effects, false, silentSheet);
+  const N_Rd = mostAxial(section, effects);
   const curve = parts.map((part) => {
     const N = N_Rd * part;
     const loaded =
@@ -53,6 +53,15 @@ function axialCurve(section: SteelSection, effects: CrossEffects, axis: Axis): C
   };
 }
 
+/** The axial force that leaves nothing for moments, N. */
+function mostAxial(section: SteelSection, effects: CrossEffects): number {
+  const { N_Rd } = axialResistance(section, effects, 2, silentSheet);
+  if (effects.tension > 0) return N_Rd;
+  const squashed = { ...effects, compression: N_Rd };
+  const sectionClass = classFor(section, squashed, ['y', 'z'], silentSheet);
+  return axialResistance(section, squashed, sectionClass, silentSheet).N_Rd;
+}
+
 /** The moment that a sum of ratios leaves beside the axial force and its shift, N mm. */
 function leftByAxial(
   section: SteelSection,
@@ -60,7 +69,7 @@ function leftByAxial(
   axis: Axis,
   sectionClass: SectionClass,
 ): number {
-  const { N_Rd, e_N_z } = axialResistance(section, effects, sectionClass <= 2, silentSheet);
+  const { N_Rd, e_N_z } = axialResistance(section, effects, sectionClass, silentSheet);
   const M_z_Rd = momentResistance(section, effects, 'z', sectionClass, silentSheet);
   const M_Rd =
     axis === 'z' ? M_z_Rd : momentResistance(section, effects, 'y', sectionClass, silentSheet);
@@ -97,7 +106,7 @@ function plasticCurve(terms: ReturnType<typeof plasticTerms>): { x: number; y: n
       M_z_Ed: M_N_z_Rd * Math.sin((part * Math.PI) / 2),
     };
     let [low, high] = [0, 2];
-    for (let round = 0; round < 40; round += 1) {
+    for (let round = 0; round < 30; round += 1) {
       const middle = (low + high) / 2;
       const { M_y_Ed, M_z_Ed } = ray;
       const scaled = { M_y_Ed: M_y_Ed * middle, M_z_Ed: M_z_Ed * middle };

@@ -2,7 +2,6 @@ import { silentSheet } from '../../formula/sheet';
 import type { SectionShape } from '../../sections/shapes/shape';
 import type { CheckAnswer } from '../contract';
 import { classFor } from '../cross-section/resistances';
-import { classOf } from '../steel/classes';
 import { ineffectiveStrips, type Strip } from '../steel/strips';
 import type { SteelSection } from '../steel/section';
 import { sizes, type SignedEffects } from './effects';
@@ -17,9 +16,8 @@ export function sketchOf(section: SteelSection, signed: SignedEffects): Sketch {
   const { compression, M_y, M_z } = effects;
   const slender = (axis: 'y' | 'z'): boolean =>
     classFor(section, effects, [axis], silentSheet) === 4;
-  if (compression > 0 && classOf(section, 'compression', 0, silentSheet) === 4) {
+  if (compression > 0 && (slender('y') || slender('z')))
     strips.push(...ineffectiveStrips(section, 'N', 1));
-  }
   if (M_y > 0 && slender('y'))
     strips.push(...ineffectiveStrips(section, 'My', Math.sign(signed.M_y)));
   if (M_z > 0 && slender('z'))

@@ -98,15 +98,15 @@ export function classOf(
 ): SectionClass {
   const { shape, f_y } = section;
   if (shape.shape === 'rectangle' || shape.shape === 'round') {
-    return chosen(sheet, 1, 'a solid has no part that could buckle locally');
+    return chosen(sheet, loading, 1, 'a solid has no part that could buckle locally');
   }
   const epsilon = sheet.evaluate(epsilonFactor, { f_y });
   if (shape.shape === 'CHS') {
     const { d, t } = shape;
     const tube = rankOf(sheet.evaluate(tubeSlenderness, { d, t }), tubeLimits, epsilon, sheet);
-    return chosen(sheet, tube, 'by its diameter to thickness');
+    return chosen(sheet, loading, tube, 'by its diameter to thickness');
   }
-  if (shape.shape === 'angle') return angleClass(shape, epsilon, sheet);
+  if (shape.shape === 'angle') return angleClass(shape, loading, epsilon, sheet);
   const { flange, web } = platesOf(shape, loading === 'z' ? 'z' : 'y', sheet);
   const flangeClass = rankOf(
     sheet.evaluate(flangeSlenderness, { c_f: flange.c, t_f: flange.t }),
@@ -123,6 +123,7 @@ export function classOf(
   const worst = Math.max(flangeClass, webClass) as SectionClass;
   return chosen(
     sheet,
+    loading,
     worst,
     `flange class ${flangeClass}, web class ${webClass} ${wordsOf(loading)}; the greater counts`,
   );
@@ -132,10 +133,16 @@ function wordsOf(loading: Loading): string {
   return loading === 'compression' ? 'in compression' : `in bending about ${loading}-${loading}`;
 }
 
-function chosen(sheet: Sheet, value: SectionClass, because: string): SectionClass {
+function chosen(
+  sheet: Sheet,
+  loading: Loading,
+  value: SectionClass,
+  because: string,
+): SectionClass {
+  const squashed = loading === 'compression';
   sheet.choose(() => ({
-    symbol: 'section_class',
-    title: 'Class of the cross-section',
+    symbol: squashed ? 'squash_class' : 'section_class',
+    title: squashed ? 'Class under uniform compression' : 'Class of the cross-section',
     because,
     value,
     clause: 'EN 1993-1-1 5.5.2(6)',
@@ -180,7 +187,12 @@ function bentWebClass(
 }
 
 /** Never below class 3: an angle is not verified plastic here. */
-function angleClass(angle: ShapeOf<'angle'>, epsilon: number, sheet: Sheet): SectionClass {
+function angleClass(
+  angle: ShapeOf<'angle'>,
+  loading: Loading,
+  epsilon: number,
+  sheet: Sheet,
+): SectionClass {
   const { h, b, t, r_1 } = angle;
   const leg = sheet.evaluate(angleLegSlenderness, { h, b, t });
   const legLimit = sheet.evaluate(angleLegLimit, { epsilon });
@@ -191,6 +203,7 @@ function angleClass(angle: ShapeOf<'angle'>, epsilon: number, sheet: Sheet): Sec
     leg > legLimit || sum > sumLimit || rankOf(outstand, outstandLimits, epsilon, sheet) === 4;
   return chosen(
     sheet,
+    loading,
     slender ? 4 : 3,
     slender ? 'a leg is more slender than class 3 allows' : 'both legs are within class 3',
   );
