@@ -106,6 +106,23 @@ it('an engineer’s waler fails on the intranet, is changed and passes', async (
   expect(violations).toEqual([]);
 });
 
+it('the cross-section and the stresses stand on a second page of the intranet', async () => {
+  const page = await browser.newPage();
+  const violations: string[] = [];
+  page.on('console', (said) => {
+    if (/Content Security Policy/i.test(said.text())) violations.push(said.text());
+  });
+  await page.goto(`${origin()}/sections`);
+  for (const element of ['headtree-section', 'headtree-stress'])
+    await page.locator(`${element}:state(pass)`).waitFor();
+  const moment = page.locator('headtree-section').getByLabel('My, about y-y', { exact: true });
+  await moment.fill('900');
+  await page.locator('headtree-section:state(fail)').waitFor();
+  await page.getByText(/^fail, .* section: /).waitFor();
+  expect(violations).toEqual([]);
+  await page.close();
+});
+
 it('the same key is refused on a page of another origin', async () => {
   // An origin that another key lists, so that the page may read why.
   await service.addKey('page', [site.origin]);
@@ -120,7 +137,8 @@ it('the admin sees the calls, opens one, and finds the refused one', async () =>
   const rows = admin.getByRole('table').getByRole('row').filter({ hasText: 'Saltmarsh intranet' });
   for (const answer of ['pass', 'fail', 'origin-not-allowed'])
     await rows.filter({ hasText: answer }).first().waitFor();
-  await rows.filter({ hasText: 'fail' }).first().getByRole('link').last().click();
+  const failed = rows.filter({ hasText: 'fail' }).filter({ hasText: 'waler' });
+  await failed.first().getByRole('link').last().click();
   await admin.getByRole('heading', { name: 'One call' }).waitFor();
   await admin.getByText('From page (Origin)').waitFor();
   const facts = (await admin.getByRole('main').textContent()) ?? '';

@@ -53,6 +53,8 @@ export class AnswerPanel {
 
   protected readonly statusWord = statusWord;
   protected readonly utilisationText = utilisationText;
+  /** As it stands within a sentence, and at the head of a line. */
+  protected readonly nameWithin = verificationName;
   protected readonly verificationName = (id: string) => capital(verificationName(id));
   protected readonly combinationTerms = combinationTerms;
   protected readonly count = count;

@@ -124,6 +124,14 @@ describe('the stress check', () => {
     expect(sheet.rows('named points')[3]).toContain('flange-web junction, top governs');
   });
 
+  it('says by its name what was not verified', async () => {
+    const missing = [
+      { pointer: '/section', verification: 'von-mises', reason: 'Class 4.' },
+    ] as const;
+    const sheet = await shown(section, sectionAnswerOf({ status: 'incomplete', missing }));
+    expect(sheet.answer.text).toContain('Not verified: von Mises’ criterion.');
+  });
+
   it('sends one way or the other, never both', async () => {
     const sheet = await shown(section);
     await choose('states of stress');
