@@ -41,24 +41,6 @@ export const secondMomentZ = formula({
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 
-export const elasticModulusY = formula({
-  symbol: 'W_el_y',
-  title: 'Elastic section modulus about y-y',
-  unit: 'mm^3',
-  clause,
-  expression: '2 * I_y / h',
-  where: { I_y: 'mm^4', h: 'mm' },
-});
-
-export const elasticModulusZ = formula({
-  symbol: 'W_el_z',
-  title: 'Elastic section modulus about z-z',
-  unit: 'mm^3',
-  clause,
-  expression: '2 * I_z / b',
-  where: { I_z: 'mm^4', b: 'mm' },
-});
-
 export const plasticModulusY = formula({
   symbol: 'W_pl_y',
   title: 'Plastic section modulus about y-y',

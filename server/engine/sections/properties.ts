@@ -1,8 +1,6 @@
 import type { Sheet } from '../formula/sheet';
 import {
   area,
-  elasticModulusY,
-  elasticModulusZ,
   plasticModulusY,
   plasticModulusZ,
   secondMomentY,
@@ -17,6 +15,7 @@ import type { SectionProperties } from './properties.types';
 import { angleProperties } from './shapes/angle';
 import { channelProperties } from './shapes/channel';
 import { chsProperties, rhsProperties } from './shapes/hollow';
+import { elasticModulusY, elasticModulusZ } from './shapes/moduli';
 import type { IShape, SectionShape } from './shapes/shape';
 import { rectangleProperties, roundProperties } from './shapes/solid';
 import { taperedChannelProperties, taperedIProperties } from './shapes/tapered';

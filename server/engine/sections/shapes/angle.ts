@@ -104,6 +104,24 @@ export const angleInertiaV = formula({
   where: principalWhere,
 });
 
+export const angleElasticY = formula({
+  symbol: 'W_el_y',
+  title: 'Elastic section modulus about y-y, at the farther edge',
+  unit: 'mm^3',
+  clause: GEOMETRY,
+  expression: 'I_y / max(z_c, h - z_c)',
+  where: { I_y: 'mm^4', z_c: 'mm', h: 'mm' },
+});
+
+export const angleElasticZ = formula({
+  symbol: 'W_el_z',
+  title: 'Elastic section modulus about z-z, at the farther edge',
+  unit: 'mm^3',
+  clause: GEOMETRY,
+  expression: 'I_z / max(y_c, b - y_c)',
+  where: { I_z: 'mm^4', y_c: 'mm', b: 'mm' },
+});
+
 /** From memory, confirmed by the tabulated I_t of equal angles within 0.4 % (spec). */
 export const equalAngleTorsionConstant = formula({
   symbol: 'I_t',
@@ -158,8 +176,8 @@ export function angleProperties(dimensions: AngleDimensions, sheet: Sheet): Angl
     I_yz,
     I_u: sheet.evaluate(angleInertiaU, { I_y, I_z, I_yz }),
     I_v: sheet.evaluate(angleInertiaV, { I_y, I_z, I_yz }),
-    W_el_y: I_y / Math.max(z_c, h - z_c),
-    W_el_z: I_z / Math.max(y_c, b - y_c),
+    W_el_y: sheet.evaluate(angleElasticY, { I_y, z_c, h }),
+    W_el_z: sheet.evaluate(angleElasticZ, { I_z, y_c, b }),
     I_t:
       h === b
         ? sheet.evaluate(equalAngleTorsionConstant, { h, b, t, r_1 })

@@ -1,6 +1,7 @@
 import { formula } from '../../formula/formula';
 import type { Sheet } from '../../formula/sheet';
 import { GEOMETRY, fillet, lengths } from './fillet';
+import { elasticModulusY } from './moduli';
 import { flangeStrips, plasticModulusZ } from './tapered-flange';
 
 /** A parallel-flange channel in mm; the web at the left, y from the back of the web. */
@@ -166,7 +167,7 @@ export function channelProperties(dimensions: ChannelDimensions, sheet: Sheet): 
     y_c,
     I_y,
     I_z,
-    W_el_y: (2 * I_y) / h,
+    W_el_y: sheet.evaluate(elasticModulusY, { I_y, h }),
     W_el_z: sheet.evaluate(channelElasticZ, { I_z, b, y_c }),
     W_pl_y: sheet.evaluate(channelPlasticY, dimensions),
     W_pl_z: plasticZ(dimensions, A, y_c, sheet),

@@ -1,6 +1,7 @@
 import { formula } from '../../formula/formula';
 import type { Sheet } from '../../formula/sheet';
 import { fillet, lengths } from './fillet';
+import { elasticModulusY, elasticModulusZ, polarInertia, polarModulus } from './moduli';
 
 export type Forming = 'hot-finished' | 'cold-formed';
 
@@ -172,8 +173,8 @@ export function rhsProperties(dimensions: RhsDimensions, sheet: Sheet): HollowPr
     A: sheet.evaluate(rhsArea, dimensions),
     I_y,
     I_z,
-    W_el_y: (2 * I_y) / h,
-    W_el_z: (2 * I_z) / b,
+    W_el_y: sheet.evaluate(elasticModulusY, { I_y, h }),
+    W_el_z: sheet.evaluate(elasticModulusZ, { I_z, b }),
     W_pl_y: sheet.evaluate(rhsPlasticY, dimensions),
     W_pl_z: sheet.evaluate(rhsPlasticZ, dimensions),
     I_t,
@@ -182,19 +183,21 @@ export function rhsProperties(dimensions: RhsDimensions, sheet: Sheet): HollowPr
 }
 
 export function chsProperties(dimensions: ChsDimensions, sheet: Sheet): HollowProperties {
+  const { d } = dimensions;
   const I_y = sheet.evaluate(chsInertia, dimensions);
   const W_pl_y = sheet.evaluate(chsPlastic, dimensions);
-  const W_el_y = (2 * I_y) / dimensions.d;
+  const W_el_y = sheet.evaluate(elasticModulusY, { I_y, h: d });
+  const same = 'By symmetry';
   return {
     A: sheet.evaluate(chsArea, dimensions),
     I_y,
-    I_z: I_y,
+    I_z: sheet.given('I_z', I_y, 'mm^4', 'Second moment of area about z-z', same),
     W_el_y,
-    W_el_z: W_el_y,
+    W_el_z: sheet.given('W_el_z', W_el_y, 'mm^3', 'Elastic section modulus about z-z', same),
     W_pl_y,
-    W_pl_z: W_pl_y,
-    I_t: 2 * I_y,
-    W_t: 2 * W_el_y,
+    W_pl_z: sheet.given('W_pl_z', W_pl_y, 'mm^3', 'Plastic section modulus about z-z', same),
+    I_t: sheet.evaluate(polarInertia, { I_y, I_z: I_y }),
+    W_t: sheet.evaluate(polarModulus, { W_el_y, W_el_z: W_el_y }),
   };
 }
 

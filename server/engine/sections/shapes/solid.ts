@@ -1,6 +1,7 @@
 import { formula } from '../../formula/formula';
 import type { Sheet } from '../../formula/sheet';
 import { GEOMETRY, lengths } from './fillet';
+import { elasticModulusY, elasticModulusZ, polarInertia, polarModulus } from './moduli';
 
 /** A solid rectangle in mm, h along z-z. */
 export interface RectangleDimensions {
@@ -37,6 +38,24 @@ export const rectangleInertiaZ = formula({
   unit: 'mm^4',
   clause: GEOMETRY,
   expression: 'h * b^3 / 12',
+  where: lengths('b', 'h'),
+});
+
+export const rectanglePlasticY = formula({
+  symbol: 'W_pl_y',
+  title: 'Plastic section modulus about y-y',
+  unit: 'mm^3',
+  clause: GEOMETRY,
+  expression: 'b * h^2 / 4',
+  where: lengths('b', 'h'),
+});
+
+export const rectanglePlasticZ = formula({
+  symbol: 'W_pl_z',
+  title: 'Plastic section modulus about z-z',
+  unit: 'mm^3',
+  clause: GEOMETRY,
+  expression: 'h * b^2 / 4',
   where: lengths('b', 'h'),
 });
 
@@ -80,6 +99,15 @@ export const roundInertia = formula({
   where: lengths('d'),
 });
 
+export const roundPlastic = formula({
+  symbol: 'W_pl_y',
+  title: 'Plastic section modulus of a round',
+  unit: 'mm^3',
+  clause: GEOMETRY,
+  expression: 'd^3 / 6',
+  where: lengths('d'),
+});
+
 /** mm², mm³, mm⁴. */
 export interface SolidProperties {
   readonly A: number;
@@ -101,10 +129,10 @@ export function rectangleProperties({ b, h }: RectangleDimensions, sheet: Sheet)
     A: sheet.evaluate(rectangleArea, { b, h }),
     I_y,
     I_z,
-    W_el_y: (2 * I_y) / h,
-    W_el_z: (2 * I_z) / b,
-    W_pl_y: (b * h ** 2) / 4,
-    W_pl_z: (h * b ** 2) / 4,
+    W_el_y: sheet.evaluate(elasticModulusY, { I_y, h }),
+    W_el_z: sheet.evaluate(elasticModulusZ, { I_z, b }),
+    W_pl_y: sheet.evaluate(rectanglePlasticY, { b, h }),
+    W_pl_z: sheet.evaluate(rectanglePlasticZ, { b, h }),
     I_t,
     W_t: sheet.evaluate(rectangleTorsionModulus, { I_t, b, h }),
   };
@@ -112,16 +140,18 @@ export function rectangleProperties({ b, h }: RectangleDimensions, sheet: Sheet)
 
 export function roundProperties({ d }: RoundDimensions, sheet: Sheet): SolidProperties {
   const I_y = sheet.evaluate(roundInertia, { d });
-  const W_el_y = (2 * I_y) / d;
+  const W_el_y = sheet.evaluate(elasticModulusY, { I_y, h: d });
+  const W_pl_y = sheet.evaluate(roundPlastic, { d });
+  const same = 'By symmetry';
   return {
     A: sheet.evaluate(roundArea, { d }),
     I_y,
-    I_z: I_y,
+    I_z: sheet.given('I_z', I_y, 'mm^4', 'Second moment of area about z-z', same),
     W_el_y,
-    W_el_z: W_el_y,
-    W_pl_y: d ** 3 / 6,
-    W_pl_z: d ** 3 / 6,
-    I_t: 2 * I_y,
-    W_t: 2 * W_el_y,
+    W_el_z: sheet.given('W_el_z', W_el_y, 'mm^3', 'Elastic section modulus about z-z', same),
+    W_pl_y,
+    W_pl_z: sheet.given('W_pl_z', W_pl_y, 'mm^3', 'Plastic section modulus about z-z', same),
+    I_t: sheet.evaluate(polarInertia, { I_y, I_z: I_y }),
+    W_t: sheet.evaluate(polarModulus, { W_el_y, W_el_z: W_el_y }),
   };
 }

@@ -10,6 +10,7 @@ import {
 } from './channel';
 import { lengths } from './fillet';
 import type { ChannelShape, FlangeTaper, IShape } from './shape';
+import { elasticModulusY, elasticModulusZ } from './moduli';
 import { flangeStrips, integral, plasticModulusZ, type Strips } from './tapered-flange';
 
 /**
@@ -92,8 +93,8 @@ export function taperedIProperties(
     A,
     I_y,
     I_z,
-    W_el_y: (2 * I_y) / h,
-    W_el_z: (2 * I_z) / b,
+    W_el_y: sheet.evaluate(elasticModulusY, { I_y, h }),
+    W_el_z: sheet.evaluate(elasticModulusZ, { I_z, b }),
     W_pl_y,
     W_pl_z: given.W_pl_z((h * t_w ** 2) / 4 + 2 * integral(half, (y, t) => t * y)),
     I_t: sheet.evaluate(taperedTorsionConstantI, { b, t_w, t_1, t_2, h, r, D, s }),
@@ -122,7 +123,7 @@ export function taperedChannelProperties(
     y_c,
     I_y,
     I_z,
-    W_el_y: (2 * I_y) / h,
+    W_el_y: sheet.evaluate(elasticModulusY, { I_y, h }),
     W_el_z: sheet.evaluate(channelElasticZ, { I_z, b, y_c }),
     W_pl_y,
     W_pl_z: given.W_pl_z(plasticModulusZ(h, t_w, flanges, A, y_c)),
