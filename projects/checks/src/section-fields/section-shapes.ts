@@ -54,7 +54,8 @@ export function wayOf(shape: string, making: string | undefined): SectionWay {
   return made ?? alike[0] ?? 'designation';
 }
 
-interface DimensionField {
+/** One dimension to ask for. */
+export interface DimensionField {
   readonly name: DimensionName;
   readonly label: string;
   /** Whether the request can do without it. */
