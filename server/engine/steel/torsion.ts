@@ -124,6 +124,19 @@ export const bimomentResistance = formula({
   where: { I_w: 'mm^6', omega_max: 'mm^2', f_y: 'N/mm^2', gamma_M0: '1' },
 });
 
+/**
+ * Common practice, no source: no clause lowers bending beside torsion alone, whose stress fills the
+ * same walls. What 6.2.8(3) says of shear is said of it, above half of the resistance.
+ */
+export const torsionReduction = formula({
+  symbol: 'rho',
+  title: 'Reduction of yield by torsion',
+  unit: '1',
+  clause: 'EN 1993-1-1 6.2.7(4), as 6.2.8(3); common practice, no source',
+  expression: 'min((2 * T_t_Ed / T_t_Rd - 1)^2, 1)',
+  where: { T_t_Ed: 'kN m', T_t_Rd: 'kN m' },
+});
+
 /** One for each direction of shear. */
 function reducedShear(direction: 'z' | 'y') {
   const symbol = `V_pl_T_${direction}_Rd`;

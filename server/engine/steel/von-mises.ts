@@ -24,7 +24,7 @@ export const yieldLimit = formula({
 
 export const vonMisesCriterion = formula({
   symbol: 'utilisation',
-  title: 'Yield criterion of von Mises, its square root',
+  title: 'Von Mises’ criterion',
   unit: '1',
   clause: CLAUSE,
   expression: 'sigma_v_Ed / sigma_Rd',

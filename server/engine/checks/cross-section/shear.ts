@@ -1,4 +1,4 @@
-import type { Sheet } from '../../formula/sheet';
+import { silentSheet, type Sheet } from '../../formula/sheet';
 import { shearReduction } from '../../steel/bending-shear';
 import { epsilonFactor } from '../../steel/classification';
 import {
@@ -7,11 +7,11 @@ import {
   webBucklingResistance,
   webSlendernessInShear,
 } from '../../steel/shear-buckling';
-import { shearWithTorsion } from '../../steel/torsion';
+import { shearWithTorsion, torsionReduction } from '../../steel/torsion';
 import type { SteelSection } from '../steel/section';
 import { buckles, shearResistance, websOf, type Direction } from '../steel/shear';
 import type { CrossEffects } from './effects';
-import { stVenantStress, warpingShearStress } from './torsion';
+import { stVenantResistance, stVenantStress, warpingShearStress } from './torsion';
 
 /** Whether any axis is as good as any other. */
 export function isRound({ shape }: SteelSection): boolean {
@@ -71,10 +71,33 @@ export function webBuckling(
 }
 
 /**
- * Reduction of the yield of the shear area along an axis (6.2.8(3), (4)), 0 up to half of what shear
- * may be: of yield, of what torsion leaves, or of a web that buckles.
+ * Reduction of the yield of the shear area along an axis, 0 up to half of what shear may be: of
+ * yield, of what torsion leaves, or of a web that buckles (6.2.8(3), (4)); or by torsion itself.
  */
 export function reductionByShear(
+  section: SteelSection,
+  effects: CrossEffects,
+  direction: Direction,
+  sheet: Sheet,
+): number {
+  const byForce = reductionByForce(section, effects, direction, sheet);
+  const byTorsion = reductionByTorsion(section, effects, sheet);
+  return Math.max(byForce, byTorsion);
+}
+
+function reductionByTorsion(
+  section: SteelSection,
+  { T_t: T_t_Ed }: CrossEffects,
+  sheet: Sheet,
+): number {
+  if (T_t_Ed === 0) return 0;
+  const T_t_Rd = stVenantResistance(section, silentSheet);
+  if (T_t_Ed <= 0.5 * T_t_Rd) return 0;
+  stVenantResistance(section, sheet);
+  return sheet.evaluate(torsionReduction, { T_t_Ed, T_t_Rd });
+}
+
+function reductionByForce(
   section: SteelSection,
   effects: CrossEffects,
   direction: Direction,

@@ -140,6 +140,14 @@ describe('torsion', () => {
     expect(left).toBeLessThan(valueOf(answer, 'shear-z', 'V_pl_z_Rd') ?? 0);
   });
 
+  test('torsion that fills the walls of a box takes from bending, shear or no shear', () => {
+    const twisted = check('SHS 150x150x8', { T: 44, My: 50 });
+    expect(valueOf(twisted, 'torsion', 'utilisation')).toBeLessThan(1);
+    const bent = utilisations(twisted);
+    expect(bent['bending-shear-y']).toBeGreaterThan(2 * (bent['bending-y'] ?? NaN));
+    expect(idsOf(check('SHS 150x150x8', { T: 20, My: 50 }))).toEqual(['bending-y', 'torsion']);
+  });
+
   test('a bimoment stands in one elastic sum with bending', () => {
     const effects = { My: 100, stVenant: 0.2, warping: 0.8, bimoment: 2 };
     const answer = check('UB 457x191x67', effects);
@@ -149,6 +157,12 @@ describe('torsion', () => {
     const M_y_Rd = sum?.values.M_c_y_Rd?.value ?? NaN;
     expect(sum?.utilisation).toBeCloseTo(100 / M_y_Rd + 2 / B_Rd, 9);
   });
+});
+
+test('von Mises of a class 4 section is asked for and cannot be had: incomplete', () => {
+  const thin = { shape: 'RHS', h: 300, b: 200, t: 3, forming: 'hot-finished' } as const;
+  const answer = check(thin, { compression: 10 }, { vonMises: true });
+  expect([answer.status, answer.missing[0]?.verification]).toEqual(['incomplete', 'von-mises']);
 });
 
 describe('a net area', () => {

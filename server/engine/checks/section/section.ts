@@ -12,7 +12,7 @@ import { verificationAnswer } from '../verification';
 import { curvesOf } from './curves';
 import { readEffects, sizes, type SignedEffects } from './effects';
 import { sketchOf } from './sketch';
-import { pointsOf, stressesOf, wallsOf } from './stresses';
+import { grossStressMissing, pointsOf, stressesOf, wallsOf } from './stresses';
 import { vonMises } from './von-mises';
 
 const NOT_COVERED = [
@@ -44,7 +44,10 @@ function run(request: SectionRequest, { profile: revision, detail }: CheckContex
     common,
     verifications: findings.map((one) => verificationAnswer(one, [])),
     steps: findings.flatMap(({ sheet }) => sheet.steps),
-    missing: missingOf(request, signed),
+    missing: [
+      ...missingOf(request, signed),
+      ...(request.vonMises === true ? grossStressMissing(section, signed) : []),
+    ],
     waived: [],
     notCovered: NOT_COVERED,
     advisories: advisoriesOf(request, section, signed),

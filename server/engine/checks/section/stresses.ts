@@ -7,7 +7,8 @@ import {
   type ElasticEffects,
   type NamedStress,
 } from '../../stress/elastic-stress';
-import type { CheckAnswer } from '../contract';
+import type { CheckAnswer, MissingItem } from '../contract';
+import { classFor } from '../cross-section/resistances';
 import { stVenantStress, warpingShearStress } from '../cross-section/torsion';
 import type { SteelSection } from '../steel/section';
 import { sizes, type SignedEffects } from './effects';
@@ -68,4 +69,21 @@ export function wallsOf(
       return { y: station.y, z: station.z, sigma, tau };
     }),
   }));
+}
+
+/** Stress on the whole of a section that buckles locally says nothing (6.2.1(4)). */
+export function grossStressMissing(section: SteelSection, effects: SignedEffects): MissingItem[] {
+  const { compression, M_y, M_z } = effects;
+  const axes = [...(M_y !== 0 ? (['y'] as const) : []), ...(M_z !== 0 ? (['z'] as const) : [])];
+  if (compression === 0 && axes.length === 0) return [];
+  const asked = axes.length > 0 ? axes : (['y', 'z'] as const);
+  if (classFor(section, sizes(effects), asked, silentSheet) < 4) return [];
+  return [
+    {
+      pointer: '/section',
+      verification: 'von-mises',
+      reason: `${section.name} is class 4: the stress of its effective section is greater, and is not made. The check "section" verifies its resistances.`,
+      clause: 'EN 1993-1-1 6.2.1(4)',
+    },
+  ];
 }

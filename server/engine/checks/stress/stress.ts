@@ -1,18 +1,17 @@
-import { WorkingSheet, silentSheet } from '../../formula/sheet';
+import { WorkingSheet } from '../../formula/sheet';
 import { ProfileReader } from '../../profiles/reader';
 import { equivalentStress } from '../../steel/von-mises';
 import { readQuantity } from '../../units/quantity';
 import { assemble } from '../answer';
 import type { Check, CheckContext } from '../check';
 import type { CheckAnswer, MissingItem, StressRequest } from '../contract';
-import { classFor } from '../cross-section/resistances';
-import { readEffects, sizes } from '../section/effects';
+import { readEffects } from '../section/effects';
 import { sketchOf } from '../section/sketch';
-import { pointsOf, stressesOf, wallsOf } from '../section/stresses';
+import { grossStressMissing, pointsOf, stressesOf, wallsOf } from '../section/stresses';
 import { vonMises, worstOf, type NamedState } from '../section/von-mises';
 import { sectionAdvisories } from '../steel/advisories';
 import { readSteel } from '../steel/material';
-import { readSteelSection, type SteelSection } from '../steel/section';
+import { readSteelSection } from '../steel/section';
 import { verificationAnswer, type Finding } from '../verification';
 
 const NOT_COVERED = [
@@ -77,30 +76,13 @@ function ofSection(request: BySection, { profile: revision, detail }: CheckConte
   const effects = readEffects(request.effects, section);
   const stresses = stressesOf(section, effects);
   const found = vonMises(section, stresses, withSteps);
-  const missing = missingOf(section, effects);
+  const missing = grossStressMissing(section, effects);
   const answer = {
     ...assembled([found], profile, common, detail, missing, sectionAdvisories(section)),
     points: pointsOf(stresses),
   };
   if (!withSteps) return answer;
   return { ...answer, section: sketchOf(section, effects), walls: wallsOf(section, effects) };
-}
-
-/** Stress on the whole of a section that buckles locally says nothing (6.2.1(4)). */
-function missingOf(section: SteelSection, effects: ReturnType<typeof readEffects>): MissingItem[] {
-  const { compression, M_y, M_z } = effects;
-  const axes = [...(M_y !== 0 ? (['y'] as const) : []), ...(M_z !== 0 ? (['z'] as const) : [])];
-  if (compression === 0 && axes.length === 0) return [];
-  const asked = axes.length > 0 ? axes : (['y', 'z'] as const);
-  if (classFor(section, sizes(effects), asked, silentSheet) < 4) return [];
-  return [
-    {
-      pointer: '/section',
-      verification: 'von-mises',
-      reason: `${section.name} is class 4: the stress of its effective section is greater, and is not made here. The check "section" verifies it.`,
-      clause: 'EN 1993-1-1 6.2.1(4)',
-    },
-  ];
 }
 
 function assembled(
