@@ -1,5 +1,7 @@
 import { formula } from '../formula/formula';
 
+// Confirmed by examples that were read: (6.33) and (6.34) by NM-01, (6.36) by NM-02. From memory,
+// unconfirmed: (6.38) to (6.40), the exponent of tubes.
 const FLANGED = 'EN 1993-1-1 6.2.9.1(5)';
 const LIMITS = 'EN 1993-1-1 6.2.9.1(4)';
 const strength = { f_y: 'N/mm^2', gamma_M0: '1' } as const;

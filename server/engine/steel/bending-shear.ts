@@ -1,5 +1,6 @@
 import { formula } from '../formula/formula';
 
+// From memory, unconfirmed: no example here has bending with shear above half of its resistance.
 const SHEAR_REDUCTION = 'EN 1993-1-1 6.2.8(3)';
 
 /**

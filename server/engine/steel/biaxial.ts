@@ -1,5 +1,6 @@
 import { formula } from '../formula/formula';
 
+// From memory, unconfirmed: the exponents; no example here has both moments.
 const CLAUSE = 'EN 1993-1-1 6.2.9.1(6)';
 
 export const exponentZOfI = formula({

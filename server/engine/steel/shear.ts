@@ -1,5 +1,6 @@
 import { formula } from '../formula/formula';
 
+// Confirmed by examples: a by RB-04, which was read, b by GN-6.4, recalled. From memory, unconfirmed: d, f, g.
 const ELASTIC = 'EN 1993-1-1 6.2.6(4) (6.20)';
 const AREA = 'EN 1993-1-1 6.2.6(3)';
 const RESISTANCE = 'EN 1993-1-1 6.2.6(2) (6.18)';

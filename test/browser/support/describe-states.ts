@@ -14,6 +14,19 @@ const fitsItsWidth = (page: Page): Promise<unknown> =>
     { timeout: 5_000 },
   );
 
+/** Waits until every box that scrolls inside itself is one that the keyboard reaches: observers tell it. */
+const scrollsAreTold = async (page: Page): Promise<void> => {
+  const element = await check(page).elementHandle();
+  await page.waitForFunction(
+    (node) =>
+      [...(node?.shadowRoot?.querySelectorAll('.ht-scroll') ?? [])].every(
+        (box) => box.scrollWidth <= box.clientWidth + 1 || box.hasAttribute('tabindex'),
+      ),
+    element,
+    { timeout: 5_000 },
+  );
+};
+
 /** Every colour in the margin where the answer stands. */
 const colours = (page: Page): Promise<string[]> =>
   check(page).evaluate((node) =>
@@ -61,6 +74,7 @@ export function describeStates(states: Readonly<Record<string, State>>, bench: (
     it('holds it at 320 px too, where the page never scrolls sideways', async () => {
       await page.setViewportSize({ width: 320, height: 640 });
       await fitsItsWidth(page);
+      await scrollsAreTold(page);
       expect(await axe(page)).toEqual([]);
       await fitsItsWidth(page);
     });
