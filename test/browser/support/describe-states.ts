@@ -19,9 +19,11 @@ const scrollsAreTold = async (page: Page): Promise<void> => {
   const element = await check(page).elementHandle();
   await page.waitForFunction(
     (node) =>
-      [...(node?.shadowRoot?.querySelectorAll('.ht-scroll') ?? [])].every(
-        (box) => box.scrollWidth <= box.clientWidth + 1 || box.hasAttribute('tabindex'),
-      ),
+      [...(node.shadowRoot?.querySelectorAll('.ht-scroll') ?? [])]
+        // What is folded away is measured when it opens.
+        .filter((box) => box.checkVisibility())
+        .filter((box) => box.querySelector('a, button, input, select, [tabindex]') === null)
+        .every((box) => box.scrollWidth <= box.clientWidth + 1 || box.hasAttribute('tabindex')),
     element,
     { timeout: 5_000 },
   );
