@@ -24,6 +24,9 @@ const leaf = (tag: string, text: string): MathElement => ({ tag, text });
 const row = (...children: MathElement[]): MathElement => ({ tag: 'mrow', children });
 const infix: Readonly<Record<string, string>> = { add: '+', subtract: '−', multiply: '·' };
 
+/** Powers of units as an engineer writes them. */
+const raised: Readonly<Record<string, string>> = { '2': '²', '3': '³', '4': '⁴', '6': '⁶' };
+
 /** The left side, an equals sign and the expression. */
 export function formulaElement(formula: Formula): MathElement {
   return {
@@ -35,7 +38,11 @@ export function formulaElement(formula: Formula): MathElement {
 
 function element(node: MathNode): MathElement {
   if (literalQuantity(node) !== undefined) {
-    return leaf('mn', node.toString().replaceAll(' / ', '/').replaceAll(' ^ ', '^'));
+    const text = node.toString().replaceAll(' / ', '/');
+    return leaf(
+      'mn',
+      text.replace(/ \^ ([2346])/g, (_, power: string) => raised[power] ?? power),
+    );
   }
   if (isConstantNode(node)) return leaf('mn', String(node.value));
   if (isSymbolNode(node)) {

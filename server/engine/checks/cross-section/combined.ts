@@ -21,7 +21,7 @@ import { websOf } from '../steel/shear';
 import type { Finding } from '../verification';
 import { axialOf, type CrossEffects } from './effects';
 import { finding, side, sumSides, type Heading, type Sides } from './finding';
-import { reducedByAxial, sumOfRatios, together, type Sum } from './interaction';
+import { reducedByAxial, sumOfRatios, together } from './interaction';
 import { classFor, compressionOf, isPlastic, momentResistance } from './resistances';
 import { reductionByShear, webBuckling } from './shear';
 
@@ -107,8 +107,13 @@ export function bendingAxial(
   const sectionClass = classFor(section, effects, axes, silentSheet);
   const M = axis === 'y' ? alone.M_y : alone.M_z;
   if (!isPlastic(section, sectionClass) || M === 0) {
+    const title =
+      M === 0 && axis === 'y'
+        ? 'Axial force with shear'
+        : `Bending about ${axis}-${axis} with axial force`;
+    const heading = { title, clause: formulaOf(sectionClass, false).clause };
     return [
-      finding(`bending-axial-${axis}`, headingOf(sectionClass, false), withSteps, (sheet) => {
+      finding(`bending-axial-${axis}`, heading, withSteps, (sheet) => {
         writeEffects(effects, sheet);
         classFor(section, effects, axes, sheet);
         return sumSides(sumOfRatios(section, { ...effects, B: 0 }, alone, sectionClass, sheet));
@@ -184,22 +189,20 @@ export function biaxial(
   if (B === 0 && (M_y === 0 || M_z === 0)) return [];
   const sectionClass = classFor(section, effects, ['y', 'z'], silentSheet);
   const plastic = isPlastic(section, sectionClass) && B === 0;
+  const { clause } = plastic ? biaxialCriterion : formulaOf(sectionClass, B > 0);
+  const what = B > 0 ? 'Bending and warping' : 'Bending about both axes';
+  const title = axialOf(effects) > 0 ? `${what} with axial force` : what;
   return [
-    finding(
-      'biaxial',
-      plastic ? biaxialCriterion : headingOf(sectionClass, B > 0),
-      withSteps,
-      (sheet) => {
-        writeEffects(effects, sheet);
-        classFor(section, effects, ['y', 'z'], sheet);
-        const sum: Sum = together(section, effects, sectionClass, sheet);
-        return sumSides(sum);
-      },
-    ),
+    finding('biaxial', { title, clause }, withSteps, (sheet) => {
+      writeEffects(effects, sheet);
+      classFor(section, effects, ['y', 'z'], sheet);
+      return sumSides(together(section, effects, sectionClass, sheet));
+    }),
   ];
 }
 
-function headingOf(sectionClass: SectionClass, warped: boolean): Heading {
+/** The sum of ratios that a class takes. */
+function formulaOf(sectionClass: SectionClass, warped: boolean): Heading {
   if (warped) return linearSumWithWarping;
   if (sectionClass <= 2) return linearSum.plastic;
   return sectionClass === 3 ? linearSum.elastic : linearSum.effective;

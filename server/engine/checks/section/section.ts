@@ -129,6 +129,15 @@ function advisoriesOf(
       clause: 'EN 1993-1-1 6.2.7',
     });
   }
+  if (grossStressMissing(section, effects).length > 0) {
+    list.push({
+      code: 'stress-of-gross-section',
+      severity: 'info',
+      message:
+        'The section is class 4: stresses at its points are those of the gross section, and mislead.',
+      clause: 'EN 1993-1-1 6.2.1(4)',
+    });
+  }
   if (request.vonMises !== true && effects.B !== 0) {
     list.push({
       code: 'warping-elastic',

@@ -9,7 +9,7 @@ export function sectionAdvisories(section: SteelSection): AdvisoryAnswer[] {
     list.push({
       code: 'material-factor-below-1.10',
       severity: 'caution',
-      message: `The profile takes gamma_M0 = ${gamma_M0}. For steel temporary works, other than single-use, BS 5975 asks for at least 1.10.`,
+      message: `The profile takes γM0 = ${gamma_M0}. For steel temporary works, other than single-use, BS 5975 asks for at least 1.10.`,
       clause: 'BS 5975:2019 13.3.9',
     });
   }
