@@ -89,6 +89,32 @@ describe('what must always hold for a cross-section', () => {
     );
   });
 
+  test('a section on its side carries about z-z what it carried about y-y', () => {
+    const side = (id: string): string => id.replace(/[yz]$/, (axis) => (axis === 'y' ? 'z' : 'y'));
+    fc.assert(
+      fc.property(loaded, (one) => {
+        const { section } = one;
+        if (!['RHS', 'rectangle', 'angle'].includes(section.shape)) return;
+        if (!('b' in section)) return;
+        const turned = { ...section, h: section.b, b: section.h } as Loaded['section'];
+        const { My = 0, Mz = 0, Vy = 0, Vz = 0, ...axial } = one.effects;
+        const effects = { ...axial, My: Mz, Mz: My, Vy: Vz, Vz: Vy };
+        const before = answered(one);
+        const after = answered({ ...one, section: turned, effects });
+        expect(after === undefined).toBe(before === undefined);
+        if (!before || !after) return;
+        const [upright, lying] = [utilisations(before), utilisations(after)];
+        for (const [id, utilisation] of Object.entries(upright)) {
+          // N beside shear alone stands under one name, whichever way the section lies.
+          const other = lying[side(id)] ?? lying[id] ?? NaN;
+          if (utilisation === Infinity) expect(other).toBe(Infinity);
+          else expect(Math.abs(other - utilisation)).toBeLessThanOrEqual(1e-9 * utilisation);
+        }
+      }),
+      SEED,
+    );
+  });
+
   test('inches, kips and feet give the same answer', () => {
     const INCH = 25.4;
     const KIP = 4.4482216152605;
