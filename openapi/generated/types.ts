@@ -1757,6 +1757,11 @@ export interface components {
             readonly name: string;
             /** @enum {string} */
             readonly shape: "I" | "channel" | "RHS" | "CHS" | "angle" | "rectangle" | "round";
+            /**
+             * @description Of an I section.
+             * @enum {string}
+             */
+            readonly fabrication?: "rolled" | "welded";
             /** @description By the names of a request: h b tw tf r, slope and r2 of tapered flanges; h b t ro ri of an RHS; d t; h b t r1 r2 of an angle; yc and zc, the centroid from the back of the web or legs. */
             readonly dimensions: {
                 readonly [key: string]: number;

@@ -89,7 +89,9 @@ export class CheckSession<Request extends object, Typed extends Draft> {
     const all = [...faults, ...(this.state().error?.items ?? [])];
     return placeFaults(this.kind().shown(this.draft()), all);
   });
-  readonly profileOptions = computed(() => profileOptions(this.profiles(), this.draft().profile));
+  readonly profileOptions = computed(() =>
+    profileOptions(this.profiles(), this.draft().profile, this.inputs.credentials()),
+  );
   readonly profileFault = computed(() => this.placed().beside.get('/profile'));
 
   /** The last answer, while something like it can still be shown. */

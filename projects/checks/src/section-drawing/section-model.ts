@@ -67,8 +67,7 @@ function factsOf(facts: object = {}): Sizes {
 /** The section of an answer, with what class 4 leaves out. */
 export function answeredSection(sketch: SectionSketch): SectionModel | null {
   const { name, shape, dimensions, ineffective } = sketch;
-  // The sketch says it by the name alone.
-  const welded = /\bwelded\b/i.test(name);
+  const welded = sketch.fabrication === 'welded';
   return modelOf({ shape, sizes: dimensions, welded }, name, ineffective);
 }
 

@@ -25,6 +25,7 @@ export function sketchOf(section: SteelSection, signed: SignedEffects): Sketch {
   return {
     name,
     shape: shape.shape,
+    ...(shape.shape === 'I' && { fabrication: shape.fabrication }),
     dimensions: { ...dimensionsOf(shape), ...centroidOf(gross) },
     ineffective: strips,
   };
