@@ -63,7 +63,7 @@ describe('200', () => {
     ['rhs 150x150', 'SHS 150x150'],
     ['CF SHS 150', 'CF SHS 150x150'],
     ['hf shs 150x150x8', 'SHS 150x150x8'],
-    ['L 100x150x12', 'L 150x100x12'],
+    ['150 x 100 x 12 L', 'L 150x100x12'],
     ['chs 114,3', 'CHS 114.3'],
     ['R 20', 'R 20'],
     ['timber 47', 'timber 47x'],
@@ -103,7 +103,7 @@ describe('200', () => {
   });
 
   it('gives an unequal angle with its principal axes and its shear centre', async () => {
-    const { status, body } = await read(`/${encodeURIComponent('L 100x150x12')}`);
+    const { status, body } = await read(`/${encodeURIComponent('150x100x12 L')}`);
     expect([status, validateAnswer('SectionFacts', body)]).toEqual([200, []]);
     expect(body).toMatchObject({ designation: 'L 150x100x12', family: 'L', shape: 'angle' });
     expect(valuesOf(body.dimensions)).toEqual({ h: 150, b: 100, t: 12, r1: 12, r2: 6 });

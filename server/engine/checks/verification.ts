@@ -54,7 +54,10 @@ export function verificationAnswer(
 
 function utilisationOf({ effect, resistance, reason }: Finding): number | null {
   if (reason !== undefined || !(resistance.value > 0)) return null;
-  return effect.value / resistance.value;
+  const utilisation = effect.value / resistance.value;
+  if (!(utilisation >= 0))
+    throw new Error(`${effect.symbol} over ${resistance.symbol} is no utilisation`);
+  return utilisation;
 }
 
 /** A place this near (mm) to a support is at it. */

@@ -61,7 +61,14 @@ export function similarSections(designation: string): string[] {
   const key = designationKey(designation).replace(HOT, '');
   const family = keysOfFamily.get(familyIn(key));
   const candidates = family ?? new Map([...keysOfFamily.values()].flatMap((keys) => [...keys]));
-  return nearest(key, [...candidates.keys()], 3).map(
-    (found) => candidates.get(found)?.designation ?? found,
-  );
+  const turned = turnedRound(key);
+  const near = nearest(key, [...candidates.keys()], 3);
+  return [...new Set(candidates.has(turned) ? [turned, ...near] : near)]
+    .slice(0, 3)
+    .map((found) => candidates.get(found)?.designation ?? found);
+}
+
+/** "L 150x100x12" for "L 100x150x12": never taken for it, as its axes are others, but likely meant. */
+function turnedRound(key: string): string {
+  return key.replace(/ (\d[\d.]*)x(\d[\d.]*)/, ' $2x$1');
 }

@@ -56,15 +56,12 @@ export function formingIn(text: string): Forming | undefined {
   return spellingOf(text).forming;
 }
 
-/** What a spelling leaves out or turns round, as the catalogue has it. */
+/** What a spelling leaves out, as the catalogue has it; which leg comes first is never turned: axes hang on it. */
 function inOrder({ family, numbers }: Spelling): Pick<Spelling, 'family' | 'numbers'> {
-  const [first = NaN, second = NaN, third] = numbers;
+  const [first = NaN, second = NaN] = numbers;
   if (family === 'L' || family === 'SHS') {
     // "L 100x10" has equal legs, "SHS 150x8" equal sides.
     if (numbers.length === 2) return { family, numbers: [first, first, second] };
-    // The longer leg comes first.
-    if (family === 'L' && third !== undefined && first < second)
-      return { family, numbers: [second, first, ...numbers.slice(2)] };
   }
   const square = family === 'RHS' && numbers.length === 3 && first === second;
   return { family: square ? 'SHS' : family, numbers };

@@ -85,16 +85,6 @@ export const torsionConstantOfMills = formula({
   where: lengths('h', 'b', 't_w', 't_f', 'r'),
 });
 
-/** Welded sections: plates alone, without what the welds add. */
-export const torsionConstantOfPlates = formula({
-  symbol: 'I_t',
-  title: 'St Venant torsion constant of the plates',
-  unit: 'mm^4',
-  clause: 'Thin plates, b t³/3 each',
-  expression: '(2 * b * t_f^3 + (h - 2 * t_f) * t_w^3) / 3',
-  where: lengths('h', 'b', 't_w', 't_f'),
-});
-
 export const warpingConstantOfSection = formula({
   symbol: 'I_w',
   title: 'Warping constant',

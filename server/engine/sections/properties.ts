@@ -7,7 +7,6 @@ import {
   secondMomentZ,
   torsionConstantByJunctions,
   torsionConstantOfMills,
-  torsionConstantOfPlates,
   warpingConstantOfFlanges,
   warpingConstantOfSection,
 } from './i-section';
@@ -15,7 +14,12 @@ import type { SectionProperties } from './properties.types';
 import { angleProperties } from './shapes/angle';
 import { channelProperties } from './shapes/channel';
 import { chsProperties, rhsProperties } from './shapes/hollow';
-import { elasticModulusY, elasticModulusZ } from './shapes/moduli';
+import {
+  elasticModulusY,
+  elasticModulusZ,
+  torsionConstantOfPlates,
+  torsionOfRolled,
+} from './shapes/moduli';
 import type { IShape, SectionShape } from './shapes/shape';
 import { rectangleProperties, roundProperties } from './shapes/solid';
 import { taperedChannelProperties, taperedIProperties } from './shapes/tapered';
@@ -87,5 +91,5 @@ function torsionConstant(section: IShape, uk: boolean, sheet: Sheet): number {
   const { h, b, t_w, t_f, r, fabrication } = section;
   if (fabrication === 'welded') return sheet.evaluate(torsionConstantOfPlates, { h, b, t_w, t_f });
   const formula = uk ? torsionConstantByJunctions : torsionConstantOfMills;
-  return sheet.evaluate(formula, { h, b, t_w, t_f, r });
+  return torsionOfRolled(formula, { h, b, t_w, t_f, r }, sheet);
 }

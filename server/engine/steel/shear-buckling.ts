@@ -42,6 +42,27 @@ export const webBucklingResistance = formula({
   where: { chi_w: '1', n_w: '1', h_w: 'mm', t_w: 'mm', f_y: 'N/mm^2', gamma_M1: '1' },
 });
 
+/**
+ * Common practice, no source: what St Venant torsion shears the web by is taken off first, as
+ * EN 1993-1-1 (6.28) takes it off yield.
+ */
+export const webBucklingWithTorsion = formula({
+  symbol: 'V_bw_Rd',
+  title: 'Shear buckling resistance of the web, less torsion',
+  unit: 'kN',
+  clause: 'EN 1993-1-5 5.2(1) (5.2), as EN 1993-1-1 (6.28); common practice, no source',
+  expression: 'max(chi_w * f_y / (sqrt(3) * gamma_M1) - tau_t_Ed, 0 * f_y) * n_w * h_w * t_w',
+  where: {
+    chi_w: '1',
+    f_y: 'N/mm^2',
+    gamma_M1: '1',
+    tau_t_Ed: 'N/mm^2',
+    n_w: '1',
+    h_w: 'mm',
+    t_w: 'mm',
+  },
+});
+
 export const webBucklingCriterion = formula({
   symbol: 'eta_3_bar',
   title: 'Shear buckling of the web',

@@ -5,7 +5,7 @@ import { formula } from '../formula/formula';
 const STRESS = 'EN 1993-1-1 6.2.7(4)';
 const REDUCED = 'EN 1993-1-1 6.2.7(9)';
 
-/** From the torsion modulus of a closed or solid section, W_t. */
+/** At the point where St Venant torsion shears most. */
 export const torsionResistance = formula({
   symbol: 'T_t_Rd',
   title: 'Torsion resistance, St Venant',
@@ -13,6 +13,19 @@ export const torsionResistance = formula({
   clause: 'EN 1993-1-1 6.2.7(1)',
   expression: 'W_t * f_y / (sqrt(3) * gamma_M0)',
   where: { W_t: 'mm^3', f_y: 'N/mm^2', gamma_M0: '1' },
+});
+
+/**
+ * Common practice, no source: no clause says it of torsion, whose shear fills the same walls that
+ * 6.2.6(6) sends to EN 1993-1-5.
+ */
+export const torsionBucklingResistance = formula({
+  symbol: 'T_t_Rd',
+  title: 'Torsion resistance of walls that buckle in shear',
+  unit: 'kN m',
+  clause: 'EN 1993-1-1 6.2.6(6) and EN 1993-1-5 5.2(1), of torsion; common practice, no source',
+  expression: 'W_t * f_y / sqrt(3) * min(1 / gamma_M0, chi_w / gamma_M1)',
+  where: { W_t: 'mm^3', f_y: 'N/mm^2', gamma_M0: '1', chi_w: '1', gamma_M1: '1' },
 });
 
 export const openTorsionModulus = formula({
@@ -36,7 +49,7 @@ export const torsionCriterion = formula({
 /** Both parts shear the same flange. */
 export const mixedTorsionCriterion = formula({
   symbol: 'utilisation',
-  title: 'St Venant and warping torsion, shear stress at the flange',
+  title: 'St Venant and warping torsion',
   unit: '1',
   clause: 'EN 1993-1-1 6.2.7(2) and (5)',
   expression: 'T_t_Ed / T_t_Rd + tau_w_Ed * sqrt(3) * gamma_M0 / f_y',
@@ -98,23 +111,20 @@ export const sectorialOfChannel = formula({
   where: { h: 'mm', t_f: 'mm', b: 'mm', t_w: 'mm', e_0: 'mm' },
 });
 
+/**
+ * The greatest of: where the coordinate passes zero on the flange; the corner, in flange or web; the
+ * middle of the web.
+ */
 export const sectorialMomentOfChannel = formula({
   symbol: 'S_omega_t',
-  title: 'Greatest sectorial moment of the flange over its thickness',
+  title: 'Greatest sectorial moment over the thickness there',
   unit: 'mm^3',
   clause: 'Vlasov, thin-walled bars',
   expression:
-    '(h - t_f) / 4 * max((b - t_w / 2 - e_0)^2, abs((b - t_w / 2) * (b - t_w / 2 - 2 * e_0)))',
+    '(h - t_f) / 4 * max((b - t_w / 2 - e_0)^2,' +
+    ' abs((b - t_w / 2) * (b - t_w / 2 - 2 * e_0)) * t_f / min(t_f, t_w),' +
+    ' abs((b - t_w / 2) * (b - t_w / 2 - 2 * e_0) * t_f / t_w - e_0 * (h - t_f) / 2))',
   where: { h: 'mm', t_f: 'mm', b: 'mm', t_w: 'mm', e_0: 'mm' },
-});
-
-export const warpingStress = formula({
-  symbol: 'sigma_w_Ed',
-  title: 'Stress along the member from the bimoment',
-  unit: 'N/mm^2',
-  clause: STRESS,
-  expression: 'B_Ed * omega_max / I_w',
-  where: { B_Ed: 'kN m^2', omega_max: 'mm^2', I_w: 'mm^6' },
 });
 
 export const bimomentResistance = formula({
@@ -137,6 +147,23 @@ export const torsionReduction = formula({
   clause: 'EN 1993-1-1 6.2.7(4), as 6.2.8(3); common practice, no source',
   expression: 'min((2 * T_t_Ed / T_t_Rd - 1)^2, 1)',
   where: { T_t_Ed: 'kN m', T_t_Rd: 'kN m' },
+});
+
+/** Flanges of class 4 bend in their own plane as they do about z-z. */
+export const effectiveBimomentResistance = formula({
+  symbol: 'B_Rd',
+  title: 'Bimoment that makes the tips yield, flanges as far as they count',
+  unit: 'kN m^2',
+  clause: `${STRESS} and EN 1993-1-5 4.4`,
+  expression: 'I_w / omega_max * f_y / gamma_M0 * W_eff_z / W_el_z',
+  where: {
+    I_w: 'mm^6',
+    omega_max: 'mm^2',
+    f_y: 'N/mm^2',
+    gamma_M0: '1',
+    W_eff_z: 'mm^3',
+    W_el_z: 'mm^3',
+  },
 });
 
 /** One for each direction of shear. */

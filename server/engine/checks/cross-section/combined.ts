@@ -36,7 +36,7 @@ export function bendingShear(
 ): Finding[] {
   const M = axis === 'y' ? effects.M_y : effects.M_z;
   if (M === 0 || !isSheared(section, effects)) return [];
-  const V_bw_Rd = axis === 'y' ? webBuckling(section, 'z', silentSheet) : undefined;
+  const V_bw_Rd = axis === 'y' ? webBuckling(section, effects, 'z', silentSheet) : undefined;
   if (V_bw_Rd !== undefined && effects.V_z > 0.5 * V_bw_Rd) {
     return [withWebBuckling(section, effects, withSteps)];
   }
@@ -88,7 +88,8 @@ function withWebBuckling(
       f_y,
       gamma_M0,
     });
-    const V_bw_Rd = webBuckling(section, 'z', sheet) ?? 0;
+    const V_bw_Rd = webBuckling(section, effects, 'z', sheet) ?? 0;
+    if (V_bw_Rd === 0) return sumSides({ value: 1, zero: 'V_bw_Rd' });
     const values = { M_y_Ed, M_pl_Rd, M_f_Rd, V_z_Ed, V_bw_Rd };
     return sumSides({ value: sheet.evaluate(bendingWithWebBuckling, values) });
   });

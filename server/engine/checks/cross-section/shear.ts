@@ -1,17 +1,12 @@
 import { silentSheet, type Sheet } from '../../formula/sheet';
 import { shearReduction } from '../../steel/bending-shear';
-import { epsilonFactor } from '../../steel/classification';
-import {
-  slenderWebFactor,
-  stockyWebFactor,
-  webBucklingResistance,
-  webSlendernessInShear,
-} from '../../steel/shear-buckling';
+import { webBucklingResistance, webBucklingWithTorsion } from '../../steel/shear-buckling';
 import { shearWithTorsion, torsionReduction } from '../../steel/torsion';
 import type { SteelSection } from '../steel/section';
-import { buckles, shearResistance, websOf, type Direction } from '../steel/shear';
+import { shearResistance, websOf, type Direction } from '../steel/shear';
 import type { CrossEffects } from './effects';
 import { stVenantResistance, stVenantStress, warpingShearStress } from './torsion';
+import { webFactor } from './web-buckling';
 
 /** Whether any axis is as good as any other. */
 export function isRound({ shape }: SteelSection): boolean {
@@ -49,25 +44,27 @@ export function shearLeftByTorsion(
   return sheet.evaluate(formulas.hollow, values);
 }
 
-/** V_bw_Rd in N; undefined where no web is so slender that it buckles in shear. */
+/**
+ * V_bw_Rd in N, less what torsion takes of the same webs; undefined where no web is so slender that it
+ * buckles in shear.
+ */
 export function webBuckling(
   section: SteelSection,
+  effects: CrossEffects,
   direction: Direction,
   sheet: Sheet,
 ): number | undefined {
   const webs = websOf(section, direction, sheet);
-  if (!webs || !buckles(section, webs, sheet)) return undefined;
-  const { f_y, eta } = section;
-  const { value, clause } = section.factor('gamma_M1');
+  const chi_w = webFactor(section, direction, sheet);
+  if (!webs || chi_w === undefined) return undefined;
+  const { f_y } = section;
   const { h_w, t_w, n_w } = webs;
-  const epsilon = sheet.evaluate(epsilonFactor, { f_y });
-  const lambda_bar_w = sheet.evaluate(webSlendernessInShear, { h_w, t_w, epsilon });
-  const chi_w =
-    lambda_bar_w <= 0.83 / eta
-      ? sheet.evaluate(stockyWebFactor, { eta })
-      : sheet.evaluate(slenderWebFactor, { lambda_bar_w });
+  const { value, clause } = section.factor('gamma_M1');
   const gamma_M1 = sheet.given('gamma_M1', value, '1', 'Partial factor of instability', clause);
-  return sheet.evaluate(webBucklingResistance, { chi_w, n_w, h_w, t_w, f_y, gamma_M1 });
+  const values = { chi_w, n_w, h_w, t_w, f_y, gamma_M1 };
+  if (effects.T_t === 0) return sheet.evaluate(webBucklingResistance, values);
+  const tau_t_Ed = stVenantStress(section, effects, sheet);
+  return sheet.evaluate(webBucklingWithTorsion, { ...values, tau_t_Ed });
 }
 
 /**
@@ -121,7 +118,7 @@ function shearLimit(
   sheet: Sheet,
 ): number {
   const left = shearLeftByTorsion(section, effects, direction, sheet);
-  const buckling = webBuckling(section, direction, sheet);
+  const buckling = webBuckling(section, effects, direction, sheet);
   if (buckling === undefined || buckling >= left) return left;
   return sheet.given(
     'V_pl_Rd',

@@ -137,14 +137,15 @@ export function shearBuckling(
 ): Finding[] {
   const made = (['z', 'y'] as const).flatMap((direction) => {
     const V = shearAlong(section, effects, direction);
-    if (V === 0 || webBuckling(section, direction, silentSheet) === undefined) return [];
-    return [bucklingAlong(section, V, direction, withSteps)];
+    if (V === 0 || webBuckling(section, effects, direction, silentSheet) === undefined) return [];
+    return [bucklingAlong(section, effects, V, direction, withSteps)];
   });
   return worst(made);
 }
 
 function bucklingAlong(
   section: SteelSection,
+  effects: CrossEffects,
   V: number,
   direction: Direction,
   withSteps: boolean,
@@ -157,8 +158,8 @@ function bucklingAlong(
       `Design shear along ${direction}-${direction}`,
       GIVEN,
     );
-    const V_bw_Rd = webBuckling(section, direction, sheet) ?? 0;
-    sheet.evaluate(webBucklingCriterion, { V_Ed, V_bw_Rd });
+    const V_bw_Rd = webBuckling(section, effects, direction, sheet) ?? 0;
+    if (V_bw_Rd > 0) sheet.evaluate(webBucklingCriterion, { V_Ed, V_bw_Rd });
     return {
       effect: side(`V_${direction}_Ed`, V_Ed, 'kN'),
       resistance: side('V_bw_Rd', V_bw_Rd, 'kN'),

@@ -1,16 +1,21 @@
-import type { Sheet } from '../../formula/sheet';
+import { silentSheet, type Sheet } from '../../formula/sheet';
 import {
   bimomentResistance,
+  effectiveBimomentResistance,
   openTorsionModulus,
   sectorialMomentOfChannel,
   sectorialOfChannel,
   sectorialOfI,
+  torsionBucklingResistance,
   torsionResistance,
   torsionStress,
   warpingShear,
   warpingShearOfI,
 } from '../../steel/torsion';
+import { classOf } from '../steel/classes';
+import { effectiveModulus } from '../steel/effective';
 import type { SteelSection } from '../steel/section';
+import { webFactor } from './web-buckling';
 import type { CrossEffects } from './effects';
 
 const closedOrSolid = new Set(['RHS', 'CHS', 'rectangle', 'round']);
@@ -27,7 +32,8 @@ export function torsionModulus(section: SteelSection, sheet: Sheet): number {
     const W_t = gross.W_t * Math.min(properties.I_t / gross.I_t, 1);
     return sheet.given('W_t', W_t, 'mm^3', 'Torsion modulus', 'By the dimensions');
   }
-  const t_max = 't_f' in shape ? Math.max(shape.t_f, shape.t_w) : 't' in shape ? shape.t : 0;
+  if (!('t_f' in shape) && !('t' in shape)) throw new Error(`${shape.shape} has no open walls`);
+  const t_max = 't_f' in shape ? Math.max(shape.t_f, shape.t_w) : shape.t;
   return sheet.evaluate(openTorsionModulus, { I_t: properties.I_t, t_max });
 }
 
@@ -39,10 +45,24 @@ export function stVenantStress(section: SteelSection, { T_t }: CrossEffects, she
   return sheet.evaluate(torsionStress, { T_t_Ed: T_t, W_t });
 }
 
-/** N mm. */
+/** N mm; less where the walls of a hollow section are so slender that shear buckles them. */
 export function stVenantResistance(section: SteelSection, sheet: Sheet): number {
-  const { f_y, gamma_M0 } = section;
-  return sheet.evaluate(torsionResistance, { W_t: torsionModulus(section, sheet), f_y, gamma_M0 });
+  const { f_y, gamma_M0, shape } = section;
+  const W_t = torsionModulus(section, sheet);
+  if (shape.shape !== 'RHS') return sheet.evaluate(torsionResistance, { W_t, f_y, gamma_M0 });
+  const factors = (['z', 'y'] as const).map((direction) => ({
+    direction,
+    chi_w: webFactor(section, direction, silentSheet) ?? Infinity,
+  }));
+  const [least] = factors.sort((a, b) => a.chi_w - b.chi_w);
+  if (!least || least.chi_w === Infinity) {
+    return sheet.evaluate(torsionResistance, { W_t, f_y, gamma_M0 });
+  }
+  const chi_w = webFactor(section, least.direction, sheet) ?? least.chi_w;
+  const { value, clause } = section.factor('gamma_M1');
+  const gamma_M1 = sheet.given('gamma_M1', value, '1', 'Partial factor of instability', clause);
+  const values = { W_t, f_y, gamma_M0, chi_w, gamma_M1 };
+  return sheet.evaluate(torsionBucklingResistance, values);
 }
 
 /** Greatest shear stress from warping torsion in N/mm², in the flanges. */
@@ -83,5 +103,11 @@ export function bimomentLimit(section: SteelSection, sheet: Sheet): number {
     shape.shape === 'I'
       ? sheet.evaluate(sectorialOfI, { b, h, t_f })
       : sheet.evaluate(sectorialOfChannel, { h, t_f, b, t_w, e_0: gross.e_0 ?? 0 });
-  return sheet.evaluate(bimomentResistance, { I_w, omega_max, f_y, gamma_M0 });
+  if (classOf(section, 'z', 0, silentSheet) < 4) {
+    return sheet.evaluate(bimomentResistance, { I_w, omega_max, f_y, gamma_M0 });
+  }
+  const W_eff_z = effectiveModulus(section, 'z', sheet);
+  const { W_el_z } = gross;
+  const values = { I_w, omega_max, f_y, gamma_M0, W_eff_z, W_el_z };
+  return sheet.evaluate(effectiveBimomentResistance, values);
 }

@@ -73,10 +73,10 @@ export function wallsOf(
 
 /** Stress on the whole of a section that buckles locally says nothing (6.2.1(4)). */
 export function grossStressMissing(section: SteelSection, effects: SignedEffects): MissingItem[] {
-  const { compression, M_y, M_z } = effects;
+  const { compression, M_y, M_z, B } = effects;
   const axes = [...(M_y !== 0 ? (['y'] as const) : []), ...(M_z !== 0 ? (['z'] as const) : [])];
-  if (compression === 0 && axes.length === 0) return [];
-  const asked = axes.length > 0 ? axes : (['y', 'z'] as const);
+  if (compression === 0 && axes.length === 0 && B === 0) return [];
+  const asked = axes.length > 0 && B === 0 ? axes : (['y', 'z'] as const);
   if (classFor(section, sizes(effects), asked, silentSheet) < 4) return [];
   return [
     {

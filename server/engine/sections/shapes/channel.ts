@@ -1,7 +1,7 @@
 import { formula } from '../../formula/formula';
 import type { Sheet } from '../../formula/sheet';
 import { GEOMETRY, fillet, lengths } from './fillet';
-import { elasticModulusY } from './moduli';
+import { elasticModulusY, torsionOfRolled } from './moduli';
 import { flangeStrips, plasticModulusZ } from './tapered-flange';
 
 /** A parallel-flange channel in mm; the web at the left, y from the back of the web. */
@@ -171,7 +171,7 @@ export function channelProperties(dimensions: ChannelDimensions, sheet: Sheet): 
     W_el_z: sheet.evaluate(channelElasticZ, { I_z, b, y_c }),
     W_pl_y: sheet.evaluate(channelPlasticY, dimensions),
     W_pl_z: plasticZ(dimensions, A, y_c, sheet),
-    I_t: sheet.evaluate(channelTorsionConstant, dimensions),
+    I_t: torsionOfRolled(channelTorsionConstant, dimensions, sheet),
     e_0: sheet.evaluate(channelShearCentre, { y_c, t_w, h, t_f, A, I_y }),
     I_w: sheet.evaluate(channelWarpingConstant, { h, t_f, I_z, A, y_c, t_w, I_y }),
   };

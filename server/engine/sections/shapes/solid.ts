@@ -1,7 +1,13 @@
 import { formula } from '../../formula/formula';
 import type { Sheet } from '../../formula/sheet';
 import { GEOMETRY, lengths } from './fillet';
-import { elasticModulusY, elasticModulusZ, polarInertia, polarModulus } from './moduli';
+import {
+  elasticModulusY,
+  elasticModulusZ,
+  polarInertia,
+  polarModulus,
+  rectangleTorsion,
+} from './moduli';
 
 /** A solid rectangle in mm, h along z-z. */
 export interface RectangleDimensions {
@@ -65,8 +71,7 @@ export const rectangleTorsionConstant = formula({
   title: 'Torsion constant of a rectangle',
   unit: 'mm^4',
   clause: 'Timoshenko and Goodier, torsion of a rectangular bar; from memory, unconfirmed',
-  expression:
-    'max(b, h) * min(b, h)^3 * (1 / 3 - 0.21 * min(b, h) / max(b, h) * (1 - min(b, h)^4 / (12 * max(b, h)^4)))',
+  expression: rectangleTorsion('b', 'h'),
   where: lengths('b', 'h'),
 });
 

@@ -10,7 +10,7 @@ import {
 } from './channel';
 import { lengths } from './fillet';
 import type { ChannelShape, FlangeTaper, IShape } from './shape';
-import { elasticModulusY, elasticModulusZ } from './moduli';
+import { elasticModulusY, elasticModulusZ, torsionOfRolled } from './moduli';
 import { flangeStrips, integral, plasticModulusZ, type Strips } from './tapered-flange';
 
 /**
@@ -127,7 +127,7 @@ export function taperedChannelProperties(
     W_el_z: sheet.evaluate(channelElasticZ, { I_z, b, y_c }),
     W_pl_y,
     W_pl_z: given.W_pl_z(plasticModulusZ(h, t_w, flanges, A, y_c)),
-    I_t: sheet.evaluate(channelTorsionConstant, { h, b, t_w, t_f, r }),
+    I_t: torsionOfRolled(channelTorsionConstant, { h, b, t_w, t_f, r }, sheet),
     e_0: sheet.evaluate(channelShearCentre, { y_c, t_w, h, t_f, A, I_y }),
     I_w: sheet.evaluate(channelWarpingConstant, { h, t_f, I_z, A, y_c, t_w, I_y }),
   };
