@@ -1623,8 +1623,10 @@ export interface components {
             readonly symbol: string | null;
             /** @description The line in words. */
             readonly title: string;
-            /** @description The formula with its numbers in mathjs syntax with units; for a choice its text. */
+            /** @description The line with its numbers in mathjs syntax with units; it evaluates to `value`. */
             readonly substituted: string;
+            /** @description Why a choice was made, in words with the numbers that decided. */
+            readonly because?: string;
             /** @description The number that the line gives; for a choice a number or a word. */
             readonly value: number | string;
             readonly unit: components["schemas"]["Unit"];

@@ -81,7 +81,7 @@ function factor(together, axis, n) {
       return (1 - n) / (1 - 0.5 * a);
     }
     case 'CHS':
-      return 1 - n ** 1.7;
+      return Math.max(0, Math.min(1 - n ** 1.7, Math.cos((Math.PI / 2) * n)));
     case 'channel':
       throw new Error('A channel has no plastic interaction here.');
   }

@@ -71,7 +71,7 @@ const classes: readonly SectionCase[] = [
     values: {
       eps: of('compression', 'epsilon'),
       'd/tw': of('compression', 'c_w_t_w'),
-      web_limit_cl1: of('compression', 'c_w_t_w_lim_1'),
+      web_limit_cl1: of('compression', 'c_w_t_w_lim_1_N'),
       c: of('compression', 'c_f'),
       'c/tf': of('compression', 'c_f_t_f'),
       flange_limit_cl1: of('compression', 'c_f_t_f_lim_1'),
@@ -111,9 +111,9 @@ const classes: readonly SectionCase[] = [
     }),
     given: 'an outstand of b/t = 10 on a section whose web makes it class 4: angles are refused',
     values: {
-      k_sigma_leg1: step('k_sigma'),
-      lambda_p_leg1: step('lambda_bar_p'),
-      rho_leg1: step('rho_p'),
+      k_sigma_leg1: step('k_sigma_f'),
+      lambda_p_leg1: step('lambda_bar_p_f'),
+      rho_leg1: step('rho_f'),
     },
     without: Object.fromEntries(
       ['psi_leg2', 'k_sigma_leg2', 'lambda_p_leg2', 'rho_leg2'].map((key) => [

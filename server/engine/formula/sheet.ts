@@ -16,6 +16,8 @@ export interface Step {
   readonly symbol: string;
   readonly title: string;
   readonly substituted: string;
+  /** Of a choice: why, in words with the numbers that decided. */
+  readonly because?: string;
   readonly inputs: Readonly<Record<string, Quantity>>;
   readonly value: number | string;
   readonly unit: UnitName;
@@ -114,7 +116,8 @@ export class WorkingSheet implements Sheet {
   choose(make: () => Choice): void {
     const { symbol, title, because, value, clause } = make();
     if (typeof value === 'number') this.values[symbol] = quantity(value, '1');
-    this.write({ kind: 'choice', symbol, title, substituted: because, value, unit: '1', clause });
+    const substituted = typeof value === 'number' ? String(value) : JSON.stringify(value);
+    this.write({ kind: 'choice', symbol, title, substituted, because, value, unit: '1', clause });
   }
 
   /** A line that no formula stands behind. */

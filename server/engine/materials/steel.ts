@@ -16,12 +16,22 @@ export const STEEL_DENSITY = 7.85e-6;
 export const GRAVITY = 9.81;
 
 /** Quality and delivery that EN 10025, EN 10210 and EN 10219 put behind the strength class. */
-const gradeName = /^S ?(\d{3}) ?(?:JR|J0|J2|K2|NL|N|ML|M)?H?W?(?: ?\+(?:AR|N|M))?$/i;
+const gradeName = /^S ?(\d{3}) ?(JR|J0|J2|K2|NL|N|ML|M)?H?W?(?: ?\+(?:AR|N|M))?$/i;
 
-/** S275, `S 275`, S275JR, S355J2+N, S460M: the strength class is the letter and the number. */
-function strengthClass(grade: string): string {
+interface Grade {
+  /** S275 of `S 275`, S275JR, S355J2+N, S460M. */
+  readonly name: string;
+  /** Fine grain steel (N, NL, M, ML): f_y as of the others, f_u of standards that are not held here. */
+  readonly fineGrain: boolean;
+}
+
+function readGrade(grade: string): Grade {
   const match = gradeName.exec(grade.trim());
-  return match ? `S${match[1] ?? ''}` : grade.trim();
+  const quality = match?.[2]?.toUpperCase() ?? '';
+  return {
+    name: match ? `S${match[1] ?? ''}` : grade.trim(),
+    fineGrain: /^[NM]/.test(quality),
+  };
 }
 
 /** Nominal strengths of a grade at a thickness, N/mm². */
@@ -29,8 +39,8 @@ export interface NominalStrength {
   readonly f_y: number;
   /** Where f_y comes from. */
   readonly clause: string;
-  /** f_u, recorded as read when it is asked for. */
-  ultimate(): { readonly f_u: number; readonly clause: string };
+  /** f_u, recorded as read when it is asked for; undefined of a quality whose f_u is not held. */
+  ultimate(): { readonly f_u: number; readonly clause: string } | undefined;
 }
 
 /**
@@ -48,7 +58,7 @@ export function steelStrength(
     'table-3.1',
     'product-standards',
   ]);
-  const name = strengthClass(grade);
+  const { name, fineGrain } = readGrade(grade);
   const rows = Object.hasOwn(steelStrengths[table], name) ? steelStrengths[table][name] : undefined;
   if (!rows) {
     const known = Object.keys(steelStrengths[table]).join(', ');
@@ -68,6 +78,8 @@ export function steelStrength(
     f_y: row.fy.value,
     clause: words(row.fy),
     ultimate: () => {
+      // S460 is fine grain itself: its row is of EN 10025-4.
+      if (fineGrain && name !== 'S460') return undefined;
       profile.record(`${path}.fu`, row.fu);
       return { f_u: row.fu.value, clause: words(row.fu) };
     },

@@ -4,7 +4,7 @@ import { formula } from '../formula/formula';
 const SHEAR_REDUCTION = 'EN 1993-1-1 6.2.8(3)';
 
 /**
- * Valid for V_Ed above half of V_pl_Rd; below that no reduction is due (6.2.8(2)). Beyond V_pl_Rd,
+ * V_Rd is V_pl_Rd, or what torsion or buckling leaves of it. Valid for V_Ed above its half; below that no reduction is due (6.2.8(2)). Beyond V_pl_Rd,
  * where shear fails by itself, nothing is left of the shear area. With torsion V_pl_T_Rd stands in
  * its place (6.2.8(4)).
  */
@@ -13,8 +13,8 @@ export const shearReduction = formula({
   title: 'Reduction of yield by shear',
   unit: '1',
   clause: `${SHEAR_REDUCTION} and (4)`,
-  expression: 'min((2 * V_Ed / V_pl_Rd - 1)^2, 1)',
-  where: { V_Ed: 'kN', V_pl_Rd: 'kN' },
+  expression: 'min((2 * V_Ed / V_Rd - 1)^2, 1)',
+  where: { V_Ed: 'kN', V_Rd: 'kN' },
 });
 
 export const webArea = formula({

@@ -113,11 +113,12 @@ function limits(
   of: string,
   clause: string,
   expressions: readonly [string, string, string],
+  under = '',
 ): readonly Formula<LimitSymbols>[] {
   return expressions.map((expression, index) =>
     formula({
-      symbol: `${of}_lim_${index + 1}`,
-      title: `Limit of class ${index + 1}`,
+      symbol: `${of}_lim_${index + 1}${under && '_N'}`,
+      title: `Limit of class ${index + 1}${under && `, ${under}`}`,
       unit: '1',
       clause,
       expression,
@@ -137,17 +138,14 @@ export const outstandLimits = limits('c_f_t_f', SHEET_2, [
   '14 * epsilon',
 ]);
 
-export const compressedFlangeLimits = limits('c_f_t_f', SHEET_1, [
-  '33 * epsilon',
-  '38 * epsilon',
-  '42 * epsilon',
-]);
+const SQUASHED = ['33 * epsilon', '38 * epsilon', '42 * epsilon'] as const;
 
-export const compressedWebLimits = limits('c_w_t_w', SHEET_1, [
-  '33 * epsilon',
-  '38 * epsilon',
-  '42 * epsilon',
-]);
+export const compressedFlangeLimits = limits('c_f_t_f', SHEET_1, SQUASHED);
+
+export const compressedWebLimits = limits('c_w_t_w', SHEET_1, SQUASHED);
+
+/** Beside the limits that N_Ed gives: of the same web under uniform compression. */
+export const squashedWebLimits = limits('c_w_t_w', SHEET_1, SQUASHED, 'under uniform compression');
 
 export const bentWebLimits = limits('c_w_t_w', SHEET_1, [
   '72 * epsilon',

@@ -4,37 +4,54 @@ const PLATES = 'EN 1993-1-5 4.4(2)';
 const RATIOS = 'EN 1993-1-5 Table 4.1';
 const SECTION = 'EN 1993-1-5 4.3(3)';
 
-/** Table 4.1, from memory; 28.4 and rho of internal parts reproduce A_eff 6095 mm² of NM-04, which was read. */
-export const plateSlenderness = formula({
-  symbol: 'lambda_bar_p',
-  title: 'Plate slenderness',
-  unit: '1',
-  clause: PLATES,
-  expression: 'c / t / (28.4 * epsilon * sqrt(k_sigma))',
-  where: { c: 'mm', t: 'mm', epsilon: '1', k_sigma: '1' },
-});
+/**
+ * The formulas of one plate, flange (f) or web (w), so that neither's numbers stand for the other's.
+ * Tables 4.1 and 4.2, from memory; 28.4 and rho of internal parts reproduce A_eff 6095 mm² of NM-04,
+ * which was read.
+ */
+function plate(role: 'f' | 'w') {
+  const of = role === 'f' ? 'flange' : 'web';
+  return {
+    slenderness: formula({
+      symbol: `lambda_bar_p_${role}`,
+      title: `Plate slenderness of the ${of}`,
+      unit: '1',
+      clause: PLATES,
+      expression: 'c / t / (28.4 * epsilon * sqrt(k_sigma))',
+      where: { c: 'mm', t: 'mm', epsilon: '1', k_sigma: '1' },
+    }),
+    internal: formula({
+      symbol: `rho_${role}`,
+      title: `Reduction of the ${of}, an internal part`,
+      unit: '1',
+      clause: `${PLATES} (4.2)`,
+      expression: 'min((lambda_bar_p - 0.055 * (3 + psi)) / lambda_bar_p^2, 1)',
+      where: { lambda_bar_p: '1', psi: '1' },
+    }),
+    outstand: formula({
+      symbol: `rho_${role}`,
+      title: `Reduction of the ${of}, an outstand`,
+      unit: '1',
+      clause: `${PLATES} (4.3)`,
+      expression: 'min((lambda_bar_p - 0.188) / lambda_bar_p^2, 1)',
+      where: { lambda_bar_p: '1' },
+    }),
+    lost: formula({
+      symbol: `A_lost_${role}`,
+      title: `Area of the ${of} that does not count`,
+      unit: 'mm^2',
+      clause: SECTION,
+      expression: 'n * (1 - rho_p) * c * t',
+      where: { n: '1', rho_p: '1', c: 'mm', t: 'mm' },
+    }),
+  };
+}
 
-export const internalReduction = formula({
-  symbol: 'rho_p',
-  title: 'Reduction of an internal part',
-  unit: '1',
-  clause: `${PLATES} (4.2)`,
-  expression: 'min((lambda_bar_p - 0.055 * (3 + psi)) / lambda_bar_p^2, 1)',
-  where: { lambda_bar_p: '1', psi: '1' },
-});
-
-export const outstandReduction = formula({
-  symbol: 'rho_p',
-  title: 'Reduction of an outstand',
-  unit: '1',
-  clause: `${PLATES} (4.3)`,
-  expression: 'min((lambda_bar_p - 0.188) / lambda_bar_p^2, 1)',
-  where: { lambda_bar_p: '1' },
-});
+export const platesOfClass4 = { f: plate('f'), w: plate('w') };
 
 /** Table 4.1 for 0 > psi > -1. */
 export const bucklingFactorOfWeb = formula({
-  symbol: 'k_sigma',
+  symbol: 'k_sigma_w',
   title: 'Buckling factor of the web',
   unit: '1',
   clause: RATIOS,
@@ -44,22 +61,12 @@ export const bucklingFactorOfWeb = formula({
 
 /** Table 4.1 for -1 ≥ psi > -3. */
 export const bucklingFactorOfBentWeb = formula({
-  symbol: 'k_sigma',
+  symbol: 'k_sigma_w',
   title: 'Buckling factor of the web',
   unit: '1',
   clause: RATIOS,
   expression: '5.98 * (1 - psi)^2',
   where: { psi: '1' },
-});
-
-/** n strips of a part that do not count. */
-export const lostArea = formula({
-  symbol: 'A_lost',
-  title: 'Area of the parts that does not count',
-  unit: 'mm^2',
-  clause: SECTION,
-  expression: 'n * (1 - rho_p) * c * t',
-  where: { n: '1', rho_p: '1', c: 'mm', t: 'mm' },
 });
 
 export const effectiveArea = formula({

@@ -140,12 +140,21 @@ export const shearYCriterion = formula({
   where: { V_y_Ed: 'kN', V_pl_y_Rd: 'kN' },
 });
 
-/** Above 1 the web must be verified for shear buckling by EN 1993-1-5 section 5. */
-export const shearBucklingRatio = formula({
+export const webHeightToThickness = formula({
   symbol: 'h_w_t_w',
-  title: 'Web slenderness over the limit for shear buckling',
+  title: 'Height to thickness of the web',
+  unit: '1',
+  clause: 'EN 1993-1-1 6.2.6(6)',
+  expression: 'h_w / t_w',
+  where: { h_w: 'mm', t_w: 'mm' },
+});
+
+/** Above it the web must be verified for shear buckling by EN 1993-1-5 section 5. */
+export const shearBucklingLimit = formula({
+  symbol: 'h_w_t_w_lim',
+  title: 'Height to thickness from which the web buckles in shear',
   unit: '1',
   clause: 'EN 1993-1-1 6.2.6(6) (6.22)',
-  expression: 'h_w / t_w / (72 * epsilon / eta)',
-  where: { h_w: 'mm', t_w: 'mm', epsilon: '1', eta: '1' },
+  expression: '72 * epsilon / eta',
+  where: { epsilon: '1', eta: '1' },
 });

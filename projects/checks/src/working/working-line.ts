@@ -40,8 +40,8 @@ export class WorkingLine {
   });
   /** What stands under the line in words: why a choice was made, or the text of the formula. */
   protected readonly words = computed(() => {
-    const { kind, substituted, value } = this.step();
-    if (kind === 'choice') return substituted === String(value) ? '' : substituted;
+    const { kind, substituted, because = '' } = this.step();
+    if (kind === 'choice') return because;
     return kind === 'formula' && !this.formula() ? substituted : '';
   });
   /** Every number that was put in, exact. */

@@ -1,13 +1,9 @@
 import { silentSheet, type Sheet } from '../../formula/sheet';
-import {
-  linearSum,
-  linearSumWithWarping,
-  plasticAxialYCriterion,
-  plasticAxialZCriterion,
-} from '../../steel/bending-axial';
+import { plasticAxialYCriterion, plasticAxialZCriterion } from '../../steel/bending-axial';
 import { bendingShearYCriterion, bendingShearZCriterion } from '../../steel/bending-shear';
 import { biaxialCriterion } from '../../steel/biaxial';
 import type { SectionClass } from '../../steel/classification';
+import { clauseOfSum } from '../../steel/linear-sum';
 import {
   bendingWithWebBuckling,
   flangesAlone,
@@ -20,8 +16,8 @@ import type { SteelSection } from '../steel/section';
 import { websOf } from '../steel/shear';
 import type { Finding } from '../verification';
 import { axialOf, type CrossEffects } from './effects';
-import { finding, side, sumSides, type Heading, type Sides } from './finding';
-import { reducedByAxial, sumOfRatios, together } from './interaction';
+import { finding, side, sumSides, type Sides } from './finding';
+import { kindOfSum, reducedByAxial, sumOfRatios, together } from './interaction';
 import { classFor, compressionOf, isPlastic, momentResistance } from './resistances';
 import { reductionByShear, webBuckling } from './shear';
 
@@ -112,7 +108,7 @@ export function bendingAxial(
       M === 0 && axis === 'y'
         ? 'Axial force with shear'
         : `Bending about ${axis}-${axis} with axial force`;
-    const heading = { title, clause: formulaOf(sectionClass, false).clause };
+    const heading = { title, clause: clauseOfSum(kindOfSum(sectionClass, false)) };
     return [
       finding(`bending-axial-${axis}`, heading, withSteps, (sheet) => {
         writeEffects(effects, sheet);
@@ -190,7 +186,7 @@ export function biaxial(
   if (B === 0 && (M_y === 0 || M_z === 0)) return [];
   const sectionClass = classFor(section, effects, ['y', 'z'], silentSheet);
   const plastic = isPlastic(section, sectionClass) && B === 0;
-  const { clause } = plastic ? biaxialCriterion : formulaOf(sectionClass, B > 0);
+  const clause = plastic ? biaxialCriterion.clause : clauseOfSum(kindOfSum(sectionClass, B > 0));
   const what = B > 0 ? 'Bending and warping' : 'Bending about both axes';
   const title = axialOf(effects) > 0 ? `${what} with axial force` : what;
   return [
@@ -200,13 +196,6 @@ export function biaxial(
       return sumSides(together(section, effects, sectionClass, sheet));
     }),
   ];
-}
-
-/** The sum of ratios that a class takes. */
-function formulaOf(sectionClass: SectionClass, warped: boolean): Heading {
-  if (warped) return linearSumWithWarping;
-  if (sectionClass <= 2) return linearSum.plastic;
-  return sectionClass === 3 ? linearSum.elastic : linearSum.effective;
 }
 
 function writeEffects({ compression, tension, M_y, M_z, B }: CrossEffects, sheet: Sheet): void {

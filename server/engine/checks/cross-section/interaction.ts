@@ -2,8 +2,6 @@ import type { Sheet } from '../../formula/sheet';
 import {
   addedMoment,
   axialRatio,
-  linearSum,
-  linearSumWithWarping,
   quarterLimit,
   reducedPlastic,
   reducedPlasticY,
@@ -16,6 +14,7 @@ import {
 } from '../../steel/bending-axial';
 import { biaxialCriterion, exponentOfHollow, exponentZOfI } from '../../steel/biaxial';
 import type { SectionClass } from '../../steel/classification';
+import { linearSum, type SumKind, type SumTerm } from '../../steel/linear-sum';
 import { webHeight } from '../../steel/shear';
 import type { Axis } from '../steel/bending';
 import type { SteelSection } from '../steel/section';
@@ -151,7 +150,7 @@ function exponents(
  * The sum of ratios: class 3 and 4, shapes without plastic interaction, and everything under a
  * bimoment. Compression of a shifted effective section adds its moment about z-z.
  *
- * @param bent the moments that are in it; a resistance of zero to what does not act is no matter
+ * @param bent the moments that are in it
  */
 export function sumOfRatios(
   section: SteelSection,
@@ -163,34 +162,55 @@ export function sumOfRatios(
   // Warping is elastic, and so is what stands beside it.
   const graded = effects.B > 0 ? (Math.max(sectionClass, 3) as SectionClass) : sectionClass;
   const N_Ed = axialOf(effects);
-  const plastic = graded <= 2;
   const { N_Rd, e_N_z } = axialResistance(section, effects, graded, sheet);
   const added =
     e_N_z > 0 ? sheet.evaluate(addedMoment, { N_Ed: effects.compression, e_N: e_N_z }) : 0;
-  const M_z_Ed = bent.M_z + added;
-  const M_y_Rd = momentResistance(section, effects, 'y', graded, sheet);
-  const M_z_Rd = momentResistance(section, effects, 'z', graded, sheet);
-  if (N_Ed > 0 && N_Rd === 0) return { value: 1, zero: 'N_Rd' };
-  if (bent.M_y > 0 && M_y_Rd === 0) return { value: 1, zero: 'M_y_Rd' };
-  if (M_z_Ed > 0 && M_z_Rd === 0) return { value: 1, zero: 'M_z_Rd' };
-  const terms = {
-    N_Ed,
-    N_Rd: N_Rd || 1,
-    M_y_Ed: bent.M_y,
-    M_y_Rd: M_y_Rd || 1,
-    M_z_Ed,
-    M_z_Rd: M_z_Rd || 1,
-  };
-  if (effects.B > 0) {
-    const B_Rd = bimomentLimit(section, sheet);
-    return { value: sheet.evaluate(linearSumWithWarping, { ...terms, B_Ed: effects.B, B_Rd }) };
+  const kind = kindOfSum(graded, effects.B > 0);
+  const terms: readonly Term[] = [
+    { term: 'N', effect: N_Ed, resistance: () => N_Rd },
+    {
+      term: 'M_y',
+      effect: bent.M_y,
+      resistance: () => momentResistance(section, effects, 'y', graded, sheet),
+    },
+    {
+      term: 'M_z',
+      effect: bent.M_z + added,
+      resistance: () => momentResistance(section, effects, 'z', graded, sheet),
+    },
+    { term: 'B', effect: effects.B, resistance: () => bimomentLimit(section, sheet) },
+  ];
+  return summed(kind, terms, sheet);
+}
+
+interface Term {
+  readonly term: SumTerm;
+  readonly effect: number;
+  /** Worked out only where its effect acts. */
+  readonly resistance: () => number;
+}
+
+function summed(kind: SumKind, terms: readonly Term[], sheet: Sheet): Sum {
+  const acting = terms.filter(({ effect }) => effect > 0);
+  const values: Record<string, number> = {};
+  for (const { term, effect, resistance } of acting) {
+    const limit = resistance();
+    if (!(limit > 0)) return { value: 1, zero: `${term}_Rd` };
+    values[`${term}_Ed`] = effect;
+    values[`${term}_Rd`] = limit;
   }
-  const formula = plastic
-    ? linearSum.plastic
-    : graded === 4
-      ? linearSum.effective
-      : linearSum.elastic;
-  return { value: sheet.evaluate(formula, terms) };
+  const formula = linearSum(
+    kind,
+    acting.map(({ term }) => term),
+  );
+  return { value: sheet.evaluate(formula, values) };
+}
+
+/** Which resistances a sum has, by the class. */
+export function kindOfSum(sectionClass: SectionClass, warped: boolean): SumKind {
+  if (warped) return 'warped';
+  if (sectionClass <= 2) return 'plastic';
+  return sectionClass === 3 ? 'elastic' : 'effective';
 }
 
 /** Everything that N, M_y and M_z do together over what they may, about the axes that are bent. */

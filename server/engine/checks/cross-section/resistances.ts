@@ -70,6 +70,9 @@ export interface AxialResistance {
   readonly e_N_z: number;
 }
 
+/** Share of the whole below which a difference is rounding. */
+const DUST = 1e-12;
+
 export function axialResistance(
   section: SteelSection,
   effects: CrossEffects,
@@ -84,9 +87,11 @@ export function axialResistance(
   const sheared = rho_z > 0 || rho_y > 0;
   const A_v_z = sheared ? shearArea(section, 'z', sheet) : 0;
   const A_v_y = sheared ? shearArea(section, 'y', sheet) : 0;
-  const whole = sheared
+  const left = sheared
     ? sheet.evaluate(axialWithShear, { A, rho_z, A_v_z, rho_y, A_v_y, f_y, gamma_M0 })
     : sheet.evaluate(grossTension, { A, f_y, gamma_M0 });
+  // What subtraction leaves of nothing is nothing.
+  const whole = left < (DUST * A * f_y) / gamma_M0 ? 0 : left;
   if (effects.compression === 0 || sectionClass <= 2) {
     return { N_Rd: whole, rho_z, A_v_z, e_N_z: 0 };
   }

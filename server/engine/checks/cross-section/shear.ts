@@ -102,13 +102,13 @@ function reductionByForce(
 ): number {
   const V_Ed = shearAlong(section, effects, direction);
   if (V_Ed === 0) return 0;
-  const V_pl_Rd = shearLimit(section, effects, direction, sheet);
-  if (V_Ed <= 0.5 * V_pl_Rd) return 0;
+  const V_Rd = shearLimit(section, effects, direction, sheet);
+  if (V_Ed <= 0.5 * V_Rd) return 0;
   sheet.given(`V_${direction}_Ed`, V_Ed, 'kN', 'Design shear force', 'Given by the caller');
-  if (V_pl_Rd === 0) {
+  if (V_Rd === 0) {
     return sheet.given('rho', 1, '1', 'Torsion leaves nothing to shear', 'EN 1993-1-1 6.2.7(9)');
   }
-  return sheet.evaluate(shearReduction, { V_Ed, V_pl_Rd });
+  return sheet.evaluate(shearReduction, { V_Ed, V_Rd });
 }
 
 function shearLimit(
@@ -121,7 +121,7 @@ function shearLimit(
   const buckling = webBuckling(section, effects, direction, sheet);
   if (buckling === undefined || buckling >= left) return left;
   return sheet.given(
-    'V_pl_Rd',
+    'V_Rd',
     buckling,
     'kN',
     'The web buckles first: its resistance stands in place of yield',

@@ -3,6 +3,7 @@ import type { UnitName } from '../../units/units';
 import type { SectionEffects } from '../contract';
 import type { CrossEffects } from '../cross-section/effects';
 import { isOpen } from '../cross-section/torsion';
+import { Refusal } from '../../refusal';
 import { refuse } from '../refuse';
 import type { SteelSection } from '../steel/section';
 
@@ -62,20 +63,21 @@ function torsionOf(given: SectionEffects, section: SteelSection, read: Read): To
 
 /** An open section carries torsion two ways, and only the member's analysis tells them apart. */
 function wantParts(given: SectionEffects, { name }: SteelSection): void {
-  for (const [field, words] of [
+  const parts = [
     ['stVenant', 'St Venant part'],
     ['warping', 'warping part'],
     ['bimoment', 'bimoment'],
-  ] as const) {
-    if (given[field] === undefined) {
-      refuse(
-        'torsion-parts-wanting',
-        `/effects/${given.T === undefined ? field : 'T'}`,
-        `${name} is open: give the ${words} of its torsion as "${field}", 0 where there is none.`,
-        CLAUSE,
-      );
-    }
-  }
+  ] as const;
+  const items = parts
+    .filter(([field]) => given[field] === undefined)
+    .map(([field, words]) => ({
+      pointer: `/effects/${given.T === undefined ? field : 'T'}`,
+      code: 'torsion-parts-wanting',
+      message: `${name} is open: give the ${words} of its torsion as "${field}", 0 where there is none.`,
+      clause: CLAUSE,
+    }));
+  const [first] = items;
+  if (first) throw new Refusal(first.code, first.message, items);
 }
 
 /** Rounded parts may miss their sum by this much of it. */
@@ -83,7 +85,7 @@ const ROUNDING = 0.005;
 
 function agree(T: number, sum: number): void {
   if (Math.abs(T - sum) <= ROUNDING * Math.max(Math.abs(T), Math.abs(sum))) return;
-  refuse('contradiction', '/effects/T', 'T is not the sum of stVenant and warping.', CLAUSE);
+  refuse('contradiction', '/effects/T', 'T is not the sum of stVenant and warping.');
 }
 
 interface Parts extends Torsion {

@@ -2,6 +2,7 @@ import { refusalOfSection, runSection, utilisations } from '../../testing/sectio
 import type { CheckAnswer, SectionEffects, SectionInput } from '../contract';
 
 const s275 = { type: 'steel', grade: 'S275' } as const;
+const s275m = { type: 'steel', grade: 'S275M' } as const;
 const s355 = { type: 'steel', fy: 355 } as const;
 
 function check(section: SectionInput, effects: SectionEffects, more = {}): CheckAnswer {
@@ -36,6 +37,7 @@ describe('what is verified follows from what acts', () => {
       status: 'incomplete',
       utilisation: null,
       verifications: [],
+      missing: [{ pointer: '/effects/My', verification: 'bending-y' }],
     });
   });
 });
@@ -124,13 +126,52 @@ describe('torsion', () => {
     ['T without its parts', { T: 1 }, '/effects/T'],
     ['a warping part without the rest', { warping: 1 }, '/effects/stVenant'],
     ['no bimoment', { T: 1, stVenant: 0.4, warping: 0.6 }, '/effects/T'],
-    ['parts that do not add up', { T: 2, stVenant: 0.4, warping: 0.6, bimoment: 0 }, '/effects/T'],
   ] as const)('an open section is refused with %s', (_, effects, pointer) => {
     const refusal = refusalOfSection({ material: s275, section: 'UB 457x191x67', effects });
     expect([refusal.items[0]?.pointer, refusal.items[0]?.clause]).toEqual([
       pointer,
       'EN 1993-1-1 6.2.7(2)',
     ]);
+  });
+
+  test('parts that do not add up are for the caller to mend', () => {
+    const effects = { T: 2, stVenant: 0.4, warping: 0.6, bimoment: 0 };
+    const refusal = refusalOfSection({ material: s275, section: 'UB 457x191x67', effects });
+    expect(refusal.items).toMatchObject([{ code: 'contradiction', pointer: '/effects/T' }]);
+  });
+
+  test('walls that buckle in shear carry less torsion, and shear beside it', () => {
+    const thin = 'CF RHS 400x200x4.5';
+    const twist = (effects: SectionEffects): Record<string, number> =>
+      utilisations(runSection({ material: { type: 'steel', fy: 355 }, section: thin, effects }));
+    expect(twist({ T: 112 }).torsion).toBeCloseTo(1.21, 2);
+    const both = twist({ T: 60, Vz: 200 });
+    expect(both['web-buckling-shear']).toBeGreaterThan(1);
+  });
+
+  test('warping shears the web of a channel more than its flanges', () => {
+    const section = { shape: 'channel', h: 400, b: 100, tw: 5, tf: 20 } as const;
+    const effects = { stVenant: 0, warping: 100, bimoment: 0 };
+    const answer = runSection({ material: s355, section, effects });
+    expect(valueOf(answer, 'torsion', 'tau_w_Ed')).toBeGreaterThan(315);
+    expect(answer.status).toBe('fail');
+  });
+
+  test('flanges of class 4 carry less bimoment', () => {
+    const section = { shape: 'I', h: 600, b: 600, tw: 10, tf: 8, fabrication: 'welded' } as const;
+    const effects = { stVenant: 0, warping: 0, bimoment: 99 };
+    expect(utilisations(runSection({ material: s355, section, effects })).biaxial).toBeGreaterThan(
+      1.5,
+    );
+  });
+
+  test.each([
+    { shape: 'I', h: 200, b: 20, tw: 15, tf: 60, r: 2 },
+    { shape: 'channel', h: 200, b: 20, tw: 15, tf: 60, r: 2 },
+  ] as const)('a stubby $shape has the torsion constant of its plates, never less', (section) => {
+    const effects = { stVenant: 1, warping: 0, bimoment: 0 };
+    const answer = runSection({ material: s275, section, effects });
+    expect(answer.values.I_t?.value).toBeGreaterThan(3e5);
   });
 
   test('a hollow section carries T as it is, and shear has what it leaves', () => {
@@ -174,6 +215,7 @@ describe('a net area', () => {
 
   test.each([
     ['without f_u', { tension: 500 }, s355, '/material/fu'],
+    ['of a quality whose f_u is not held', { tension: 500 }, s275m, '/material/grade'],
     ['beside bending', { tension: 500, My: 10 }, s275, '/netArea'],
   ] as const)('leaves the answer incomplete %s', (_, effects, material, pointer) => {
     const section = 'UB 457x191x67';
@@ -185,6 +227,20 @@ describe('a net area', () => {
     const request = { material: s275, section: 'IPE 200', effects: { tension: 1 }, netArea: 9000 };
     expect(refusalOfSection(request).items[0]?.pointer).toBe('/netArea');
   });
+});
+
+test('an angle that bends is classed by its outstands, one that is compressed by both its legs', () => {
+  const section = 'L 100x100x10';
+  const bent = runSection({ material: s355, section, effects: { My: 1 } });
+  expect(valueOf(bent, 'bending-y', 'section_class')).toBe(3);
+  expect(refusalOfSection({ material: s355, section, effects: { compression: 1 } }).code).toBe(
+    'class-4',
+  );
+});
+
+test('an unequal angle is never turned: the other name is offered', () => {
+  const request = { material: s275, section: 'L 90x150x12', effects: { My: 1 } };
+  expect(refusalOfSection(request).items[0]?.message).toContain('L 150x90x12');
 });
 
 describe('sections that cannot be are refused at the dimension', () => {

@@ -1,9 +1,16 @@
-import { WorkingSheet } from '../../formula/sheet';
+import { silentSheet, WorkingSheet } from '../../formula/sheet';
 import { ProfileReader } from '../../profiles/reader';
 import { readQuantity } from '../../units/quantity';
 import { assemble } from '../answer';
 import type { Check, CheckContext } from '../check';
-import type { AdvisoryAnswer, CheckAnswer, MissingItem, SectionRequest } from '../contract';
+import type {
+  AdvisoryAnswer,
+  CheckAnswer,
+  MissingItem,
+  SectionEffects,
+  SectionRequest,
+  VerificationId,
+} from '../contract';
 import { verifyCrossSection } from '../cross-section/verify';
 import { refuse } from '../refuse';
 import { sectionAdvisories } from '../steel/advisories';
@@ -45,7 +52,8 @@ function run(request: SectionRequest, { profile: revision, detail }: CheckContex
     verifications: findings.map((one) => verificationAnswer(one, [])),
     steps: findings.flatMap(({ sheet }) => sheet.steps),
     missing: [
-      ...missingOf(request, signed),
+      ...(findings.length === 0 ? [nothingActs(request)] : []),
+      ...missingOf(request, section, signed),
       ...(request.vonMises === true ? grossStressMissing(section, signed) : []),
     ],
     waived: [],
@@ -72,16 +80,46 @@ function readNetArea({ netArea }: SectionRequest, section: SteelSection): number
   return area;
 }
 
+const verificationOf: Readonly<Record<keyof SectionEffects, VerificationId>> = {
+  compression: 'compression',
+  tension: 'tension',
+  My: 'bending-y',
+  Mz: 'bending-z',
+  Vz: 'shear-z',
+  Vy: 'shear-y',
+  T: 'torsion',
+  stVenant: 'torsion',
+  warping: 'torsion',
+  bimoment: 'torsion',
+};
+
+/** Effects of zero verify nothing, which is no pass. */
+function nothingActs({ effects }: SectionRequest): MissingItem {
+  const [field = 'My'] = Object.keys(effects) as (keyof SectionEffects)[];
+  return {
+    pointer: `/effects/${field}`,
+    verification: verificationOf[field],
+    reason: 'Every effect is zero: nothing was verified.',
+  };
+}
+
 /** What the request asks for and cannot be made from it. */
-function missingOf(request: SectionRequest, effects: SignedEffects): MissingItem[] {
+function missingOf(
+  request: SectionRequest,
+  section: SteelSection,
+  effects: SignedEffects,
+): MissingItem[] {
   const missing: MissingItem[] = [];
   const bent = effects.M_y !== 0 || effects.M_z !== 0;
   if (request.netArea === undefined) return missing;
-  if (effects.tension > 0 && 'fy' in request.material && request.material.fu === undefined) {
+  if (effects.tension > 0 && section.useUltimate(silentSheet) === undefined) {
+    const byStrength = 'fy' in request.material;
     missing.push({
-      pointer: '/material/fu',
+      pointer: byStrength ? '/material/fu' : '/material/grade',
       verification: 'tension',
-      reason: 'The net section needs the ultimate strength.',
+      reason: byStrength
+        ? 'The net section needs the ultimate strength.'
+        : 'The net section needs an ultimate strength, and that of this quality is not held: give fy and fu.',
       clause: 'EN 1993-1-1 6.2.3(2)b',
     });
   }
@@ -118,6 +156,14 @@ function advisoriesOf(
       message: 'The effects are taken as those of one member, not shared out.',
     });
   }
+  if (request.netArea !== undefined && effects.tension === 0) {
+    list.push({
+      code: 'net-area-unused',
+      severity: 'info',
+      message: 'The net area counts in tension only, and there is none.',
+      clause: 'EN 1993-1-1 6.2.3(2)b',
+    });
+  }
   const { shape } = section.shape;
   const sheared = effects.V_z !== 0 || effects.V_y !== 0;
   if (sheared && (shape === 'channel' || shape === 'angle')) {
@@ -138,7 +184,7 @@ function advisoriesOf(
       clause: 'EN 1993-1-1 6.2.1(4)',
     });
   }
-  if (request.vonMises !== true && effects.B !== 0) {
+  if (effects.B !== 0) {
     list.push({
       code: 'warping-elastic',
       severity: 'info',

@@ -17,6 +17,7 @@ import {
   outstandLimits,
   plasticDepthInCompression,
   plasticWebLimits,
+  squashedWebLimits,
   stressRatioOfWeb,
   tubeLimits,
   tubeSlenderness,
@@ -106,7 +107,7 @@ export function classOf(
     const tube = rankOf(sheet.evaluate(tubeSlenderness, { d, t }), tubeLimits, epsilon, sheet);
     return chosen(sheet, loading, tube, 'by its diameter to thickness');
   }
-  if (shape.shape === 'angle') return angleClass(shape, loading, epsilon, sheet);
+  if (shape.shape === 'angle') return angleClass(shape, loading, N_Ed, epsilon, sheet);
   const { flange, web } = platesOf(shape, loading === 'z' ? 'z' : 'y', sheet);
   const flangeClass = rankOf(
     sheet.evaluate(flangeSlenderness, { c_f: flange.c, t_f: flange.t }),
@@ -115,11 +116,12 @@ export function classOf(
     sheet,
   );
   // A channel bent about z-z may have its whole web compressed.
-  const whole = loading === 'compression' || (loading === 'z' && shape.shape === 'channel');
+  const whole = loading === 'z' && shape.shape === 'channel';
   const slenderness = sheet.evaluate(webSlenderness, { c_w: web.c, t_w: web.t });
-  const webClass = whole
-    ? rankOf(slenderness, compressedWebLimits, epsilon, sheet)
-    : bentWebClass(section, web, slenderness, N_Ed, epsilon, sheet);
+  const webClass =
+    loading === 'compression' || whole
+      ? rankOf(slenderness, whole ? compressedWebLimits : squashedWebLimits, epsilon, sheet)
+      : bentWebClass(section, web, slenderness, N_Ed, epsilon, sheet);
   const worst = Math.max(flangeClass, webClass) as SectionClass;
   return chosen(
     sheet,
@@ -186,21 +188,32 @@ function bentWebClass(
   return slenderness <= sheet.evaluate(elasticWebLimit, { epsilon, psi }) ? 3 : 4;
 }
 
-/** Never below class 3: an angle is not verified plastic here. */
+/**
+ * Never below class 3: an angle is not verified plastic here. Sheet 3 is of compression; bending alone
+ * has the legs as outstands.
+ */
 function angleClass(
   angle: ShapeOf<'angle'>,
   loading: Loading,
+  N_Ed: number,
   epsilon: number,
   sheet: Sheet,
 ): SectionClass {
   const { h, b, t, r_1 } = angle;
+  const c_f = Math.max(h, b) - t - r_1;
+  const outstand = sheet.evaluate(flangeSlenderness, { c_f, t_f: t });
+  const bent = rankOf(outstand, outstandLimits, epsilon, sheet) < 4;
+  if (loading !== 'compression' && N_Ed === 0) {
+    const words = bent
+      ? 'as outstands both legs are within class 3'
+      : 'a leg is a slender outstand';
+    return chosen(sheet, loading, bent ? 3 : 4, words);
+  }
   const leg = sheet.evaluate(angleLegSlenderness, { h, b, t });
   const legLimit = sheet.evaluate(angleLegLimit, { epsilon });
   const sum = sheet.evaluate(angleSumSlenderness, { h, b, t });
   const sumLimit = sheet.evaluate(angleSumLimit, { epsilon });
-  const outstand = sheet.evaluate(flangeSlenderness, { c_f: Math.max(h, b) - t - r_1, t_f: t });
-  const slender =
-    leg > legLimit || sum > sumLimit || rankOf(outstand, outstandLimits, epsilon, sheet) === 4;
+  const slender = leg > legLimit || sum > sumLimit || !bent;
   return chosen(
     sheet,
     loading,

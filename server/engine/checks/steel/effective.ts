@@ -10,12 +10,9 @@ import {
   effectiveModulus as modulusOfPlates,
   effectiveModulusZ,
   effectiveModulusZOfWeb,
-  internalReduction,
-  lostArea,
   lostLengthOfWeb,
   lostPlaceOfWeb,
-  outstandReduction,
-  plateSlenderness,
+  platesOfClass4,
   shiftUnderBending,
   stressRatioOfReducedWeb,
 } from '../../steel/effective';
@@ -41,8 +38,8 @@ export function effectiveInCompression(
   const { gross, properties } = section;
   const { flange, web } = platesOf(shape, 'y', sheet);
   const epsilon = sheet.evaluate(epsilonFactor, { f_y: section.f_y });
-  const flangeLost = lostOf(flange, flange.count, 1, epsilon, sheet);
-  const webLost = lostOf(web, web.count, 1, epsilon, sheet);
+  const flangeLost = lostOf(flange, 'f', flange.count, 1, epsilon, sheet);
+  const webLost = lostOf(web, 'w', web.count, 1, epsilon, sheet);
   const A_lost_f = flangeLost.area;
   const A_lost_w = webLost.area;
   const plates = sheet.evaluate(effectiveArea, { A: gross.A, A_lost_f, A_lost_w });
@@ -76,7 +73,7 @@ export function effectiveFlange(section: SteelSection, sheet: Sheet): number {
   const epsilon = sheet.evaluate(epsilonFactor, { f_y: section.f_y });
   const limit = (flange.kind === 'outstand' ? 14 : 42) * epsilon;
   const slender = flange.c / flange.t > limit;
-  const lost = slender ? lostOf(flange, flange.count / 2, 1, epsilon, sheet).area : 0;
+  const lost = slender ? lostOf(flange, 'f', flange.count / 2, 1, epsilon, sheet).area : 0;
   return sheet.given(
     'A_f',
     shape.b * flange.t - lost,
@@ -111,35 +108,47 @@ export interface Lost {
   readonly rho: number;
 }
 
+type Role = 'f' | 'w';
+
 /** What a plate loses under a stress ratio psi; outstands always as uniformly compressed. */
-export function lostOf(plate: Plate, n: number, psi: number, epsilon: number, sheet: Sheet): Lost {
-  const rho = reductionOf(plate, psi, epsilon, sheet);
+export function lostOf(
+  plate: Plate,
+  role: Role,
+  n: number,
+  psi: number,
+  epsilon: number,
+  sheet: Sheet,
+): Lost {
+  const rho = reductionOf(plate, role, psi, epsilon, sheet);
   const { c, t } = plate;
   return {
-    area: sheet.evaluate(lostArea, { n, rho_p: rho, c, t }),
+    area: sheet.evaluate(platesOfClass4[role].lost, { n, rho_p: rho, c, t }),
     length: (1 - rho) * c,
     rho,
   };
 }
 
-function reductionOf(plate: Plate, psi: number, epsilon: number, sheet: Sheet): number {
+function reductionOf(plate: Plate, role: Role, psi: number, epsilon: number, sheet: Sheet): number {
   const { c, t, kind } = plate;
-  const k_sigma = bucklingFactor(kind, psi, sheet);
-  const lambda_bar_p = sheet.evaluate(plateSlenderness, { c, t, epsilon, k_sigma });
+  const formulas = platesOfClass4[role];
+  const k_sigma = bucklingFactor(kind, role, psi, sheet);
+  const lambda_bar_p = sheet.evaluate(formulas.slenderness, { c, t, epsilon, k_sigma });
   const stocky = kind === 'outstand' ? 0.748 : 0.5 + Math.sqrt(0.085 - 0.055 * psi);
   if (lambda_bar_p <= stocky) {
-    return sheet.given('rho_p', 1, '1', `All of it counts up to ${stocky.toFixed(3)}`, CLAUSE);
+    const title = `All of it counts up to ${stocky.toFixed(3)}`;
+    return sheet.given(`rho_${role}`, 1, '1', title, CLAUSE);
   }
   return kind === 'outstand'
-    ? sheet.evaluate(outstandReduction, { lambda_bar_p })
-    : sheet.evaluate(internalReduction, { lambda_bar_p, psi });
+    ? sheet.evaluate(formulas.outstand, { lambda_bar_p })
+    : sheet.evaluate(formulas.internal, { lambda_bar_p, psi });
 }
 
 const CLAUSE = 'EN 1993-1-5 4.4(2)';
 
-function bucklingFactor(kind: Plate['kind'], psi: number, sheet: Sheet): number {
+function bucklingFactor(kind: Plate['kind'], role: Role, psi: number, sheet: Sheet): number {
+  const title = `Buckling factor of the ${role === 'f' ? 'flange' : 'web'}`;
   const given = (value: number, table: string): number =>
-    sheet.given('k_sigma', value, '1', 'Buckling factor of the plate', `EN 1993-1-5 ${table}`);
+    sheet.given(`k_sigma_${role}`, value, '1', title, `EN 1993-1-5 ${table}`);
   if (kind === 'outstand') return given(0.43, 'Table 4.2');
   if (psi === 1) return given(4, 'Table 4.1');
   if (psi === -1) return given(23.9, 'Table 4.1');
@@ -167,9 +176,9 @@ export function lostInBending(section: SteelSection, axis: 'y' | 'z', sheet: She
   const epsilon = sheet.evaluate(epsilonFactor, { f_y: section.f_y });
   const z_f = ((axis === 'y' ? shape.h : shape.b) - flange.t) / 2;
   const { A } = section.gross;
-  const A_lost_f = lostOf(flange, flange.count / 2, 1, epsilon, sheet).area;
+  const A_lost_f = lostOf(flange, 'f', flange.count / 2, 1, epsilon, sheet).area;
   const psi = sheet.evaluate(stressRatioOfReducedWeb, { c_w: web.c, A_lost_f, z_f, A });
-  const rho_p = reductionOf(web, psi, epsilon, sheet);
+  const rho_p = reductionOf(web, 'w', psi, epsilon, sheet);
   const l_w = sheet.evaluate(lostLengthOfWeb, { rho_p, c_w: web.c, psi });
   const z_w = sheet.evaluate(lostPlaceOfWeb, { c_w: web.c, rho_p, psi, l_w });
   return { flange, web, A_lost_f, z_f, l_w, z_w };
@@ -208,7 +217,7 @@ function compressedToes(
   const { flange, web } = platesOf(shape, 'z', sheet);
   const epsilon = sheet.evaluate(epsilonFactor, { f_y });
   const { A, I_z, y_c = shape.b / 2 } = gross;
-  const lost = lostOf(flange, 2, 1, epsilon, sheet);
+  const lost = lostOf(flange, 'f', 2, 1, epsilon, sheet);
   const y_max = shape.shape === 'I' ? shape.b / 2 : shape.b - y_c;
   const strip = { A_lost_f: lost.area, y_f: y_max - lost.length / 2, A };
   const l_f = lost.length;
@@ -216,7 +225,7 @@ function compressedToes(
   const y_other = shape.b - y_max;
   const toes = sheet.evaluate(effectiveModulusZ, { ...strip, I_eff_z, l_f, y_other });
   if (shape.shape === 'I') return lesser('W_eff_z', toes, properties.W_el_z, sheet);
-  const A_lost_w = lostOf(web, 1, 1, epsilon, sheet).area;
+  const A_lost_w = lostOf(web, 'w', 1, 1, epsilon, sheet).area;
   const { b, t_w } = shape;
   const y_w = y_c - t_w / 2;
   const back = sheet.evaluate(effectiveModulusZOfWeb, { I_z, A_lost_w, y_w, t_w, A, y_c, b });

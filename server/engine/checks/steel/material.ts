@@ -4,7 +4,7 @@ import type { ProfileReader } from '../../profiles/reader';
 import type { SectionShape } from '../../sections/shapes/shape';
 import { readQuantity } from '../../units/quantity';
 import type { MaterialInput, SectionRequest } from '../contract';
-import { notCovered } from '../refuse';
+import { notCovered, refuse } from '../refuse';
 
 /** Steel of one section, N/mm². */
 export interface SteelStrength {
@@ -34,8 +34,10 @@ export function readSteel(
   return {
     f_y: sheet.given('f_y', strength.f_y, 'N/mm^2', title, strength.clause),
     useUltimate: (other) => {
-      const { f_u, clause } = strength.ultimate();
-      return other.given('f_u', f_u, 'N/mm^2', `Ultimate strength at ${t} mm`, clause);
+      const ultimate = strength.ultimate();
+      if (!ultimate) return undefined;
+      const title = `Ultimate strength at ${t} mm`;
+      return other.given('f_u', ultimate.f_u, 'N/mm^2', title, ultimate.clause);
     },
     E,
     G,
@@ -51,6 +53,7 @@ function ofCaller(
     notCovered('/material/fy', `Steel above ${HIGHEST_STRENGTH} N/mm²`, 'EN 1993-1-12');
   }
   const f_u = material.fu === undefined ? undefined : readQuantity(material.fu, 'N/mm^2');
+  if (f_u !== undefined && f_u < f_y) refuse('contradiction', '/material/fu', 'fu is below fy.');
   return {
     f_y: sheet.given('f_y', f_y, 'N/mm^2', 'Yield strength', 'Given by the caller'),
     useUltimate: (other) =>

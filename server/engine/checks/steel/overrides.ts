@@ -59,11 +59,13 @@ export function shearAreasOf({ Avz, Avy }: Overrides): {
 function refuseContradictions(properties: SectionProperties, given: Overrides): void {
   const contradiction = (field: string, message: string): never =>
     refuse('contradiction', `/section/properties/${field}`, message);
-  const { A, W_el_y, W_el_z, W_pl_y, W_pl_z } = properties;
-  if (given.Wply !== undefined && W_pl_y !== undefined && W_pl_y < W_el_y)
-    contradiction('Wply', 'Wply is below Wely.');
-  if (given.Wplz !== undefined && W_pl_z !== undefined && W_pl_z < W_el_z)
-    contradiction('Wplz', 'Wplz is below Welz.');
+  const { A, I_y, I_z, I_yz, W_el_y, W_el_z, W_pl_y, W_pl_z } = properties;
+  if (W_pl_y !== undefined && W_pl_y < W_el_y)
+    contradiction(given.Wply === undefined ? 'Wely' : 'Wply', 'Wply is below Wely.');
+  if (W_pl_z !== undefined && W_pl_z < W_el_z)
+    contradiction(given.Wplz === undefined ? 'Welz' : 'Wplz', 'Wplz is below Welz.');
+  if (I_y * I_z <= I_yz ** 2)
+    contradiction(given.Iy === undefined ? 'Iz' : 'Iy', 'No angle has such second moments.');
   const { z = 0, y = 0 } = shearAreasOf(given);
   if (z > A) contradiction('Avz', 'A shear area is no greater than the area.');
   if (y > A) contradiction('Avy', 'A shear area is no greater than the area.');

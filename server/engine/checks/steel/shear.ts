@@ -8,10 +8,11 @@ import {
   shearAreaZOfChannel,
   shearAreaZOfPlates,
   shearAreaZOfRhs,
-  shearBucklingRatio,
+  shearBucklingLimit,
   shearResistanceY,
   shearResistanceZ,
   webHeight,
+  webHeightToThickness,
 } from '../../steel/shear';
 import { greatestShear } from '../../stress/shear-flow';
 import type { SteelSection } from './section';
@@ -116,5 +117,6 @@ export function buckles(section: SteelSection, webs: ShearWebs, sheet: Sheet): b
   const { f_y, eta } = section;
   const epsilon = sheet.evaluate(epsilonFactor, { f_y });
   const { h_w, t_w } = webs;
-  return sheet.evaluate(shearBucklingRatio, { h_w, t_w, epsilon, eta }) > 1;
+  const slenderness = sheet.evaluate(webHeightToThickness, { h_w, t_w });
+  return slenderness > sheet.evaluate(shearBucklingLimit, { epsilon, eta });
 }

@@ -41,16 +41,16 @@ type Drawn = Omit<Strip, 'under'>;
 function compressed(section: SteelSection, shape: Plated): Drawn[] {
   const epsilon = epsilonFactor.compute({ f_y: section.f_y });
   const { flange, web } = platesOf(shape, 'y', silentSheet);
-  const inFlange = lostOf(flange, 1, 1, epsilon, silentSheet).length;
-  const inWeb = lostOf(web, 1, 1, epsilon, silentSheet).length;
+  const inFlange = lostOf(flange, 'f', 1, 1, epsilon, silentSheet).length;
+  const inWeb = lostOf(web, 'w', 1, 1, epsilon, silentSheet).length;
   return [
     ...BOTH.flatMap((side) => flangeStrips(section, shape, side, inFlange)),
-    ...websOf(section, shape).map((y) => ({ y, z: 0, width: web.t, height: inWeb })),
+    ...websAt(section, shape).map((y) => ({ y, z: 0, width: web.t, height: inWeb })),
   ];
 }
 
 /** y of the middle of each web. */
-function websOf({ gross }: SteelSection, shape: Plated): number[] {
+function websAt({ gross }: SteelSection, shape: Plated): number[] {
   if (shape.shape === 'RHS') return BOTH.map((side) => (side * (shape.b - shape.t)) / 2);
   return [shape.shape === 'I' ? 0 : -(gross.y_c ?? 0) + shape.t_w / 2];
 }
@@ -85,7 +85,7 @@ function bent(section: SteelSection, shape: Plated, axis: 'y' | 'z', side: numbe
   }
   return [
     ...flangeStrips(section, shape, side, length),
-    ...websOf(section, shape).map((y) => ({ y, z: at, width: web.t, height: l_w })),
+    ...websAt(section, shape).map((y) => ({ y, z: at, width: web.t, height: l_w })),
   ];
 }
 
@@ -94,10 +94,10 @@ function toes(section: SteelSection, shape: Plated, side: number): Drawn[] {
   const epsilon = epsilonFactor.compute({ f_y: section.f_y });
   const { flange, web } = platesOf(shape, 'z', silentSheet);
   if (shape.shape === 'channel' && side < 0) {
-    const height = lostOf(web, 1, 1, epsilon, silentSheet).length;
-    return websOf(section, shape).map((y) => ({ y, z: 0, width: web.t, height }));
+    const height = lostOf(web, 'w', 1, 1, epsilon, silentSheet).length;
+    return websAt(section, shape).map((y) => ({ y, z: 0, width: web.t, height }));
   }
-  const { length } = lostOf(flange, 1, 1, epsilon, silentSheet);
+  const { length } = lostOf(flange, 'f', 1, 1, epsilon, silentSheet);
   return BOTH.flatMap((end) =>
     flangeStrips(section, shape, end, length).filter(({ y }) => y * side > 0),
   );

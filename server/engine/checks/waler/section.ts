@@ -76,6 +76,6 @@ export function bendingResistanceWithShear(
   const { sectionClass } = section;
   const M_c_Rd = bendingResistance(section, 'y', sectionClass, sheet);
   if (V_Ed <= 0.5 * V_pl_Rd) return M_c_Rd;
-  const rho = sheet.evaluate(shearReduction, { V_Ed, V_pl_Rd });
+  const rho = sheet.evaluate(shearReduction, { V_Ed, V_Rd: V_pl_Rd });
   return bendingWithShear(section, 'y', sectionClass, { M_c_Rd, rho_z: rho, rho_y: 0 }, sheet);
 }
