@@ -30,10 +30,6 @@ export interface Stress {
   readonly sigma_v: number;
 }
 
-export interface StressAt extends Stress {
-  readonly station: Station;
-}
-
 export interface NamedStress extends Stress {
   readonly station: NamedStation;
 }

@@ -1,6 +1,6 @@
 /**
- * Effects that act together at one cross-section of one member, by size in N, N mm, N mm²; which
- * way they act makes no difference to a resistance.
+ * Effects that act together at one cross-section of one member, in N, N mm, N mm². Resistances take
+ * them by size, as which way they act makes no difference; stresses with their signs.
  */
 export interface CrossEffects {
   readonly compression: number;

@@ -16,7 +16,7 @@ import {
   shiftUnderBending,
   stressRatioOfReducedWeb,
 } from '../../steel/effective';
-import { epsilonFactor } from '../../steel/classification';
+import { compressedFlangeLimits, epsilonFactor, outstandLimits } from '../../steel/classification';
 import { refuse } from '../refuse';
 import { isPlated, platesOf, type Plate } from './classes';
 import type { SteelSection } from './section';
@@ -71,8 +71,8 @@ export function effectiveFlange(section: SteelSection, sheet: Sheet): number {
   const shape = reducible(section);
   const { flange } = platesOf(shape, 'y', sheet);
   const epsilon = sheet.evaluate(epsilonFactor, { f_y: section.f_y });
-  const limit = (flange.kind === 'outstand' ? 14 : 42) * epsilon;
-  const slender = flange.c / flange.t > limit;
+  const [, , limit] = flange.kind === 'outstand' ? outstandLimits : compressedFlangeLimits;
+  const slender = flange.c / flange.t > (limit?.compute({ epsilon }) ?? 0);
   const lost = slender ? lostOf(flange, 'f', flange.count / 2, 1, epsilon, sheet).area : 0;
   return sheet.given(
     'A_f',
