@@ -34,7 +34,10 @@ export function verificationAnswer(
   const { id, title, clause, effect, resistance, combination, place, sheet } = finding;
   const utilisation = utilisationOf(finding);
   const reason =
-    finding.reason ?? (utilisation === null ? `${resistance.symbol} is zero.` : undefined);
+    finding.reason ??
+    (utilisation === null
+      ? `${resistance.symbol} is zero: what else acts leaves nothing for it.`
+      : undefined);
   const base: VerificationAnswer = {
     id,
     title,

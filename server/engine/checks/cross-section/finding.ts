@@ -40,5 +40,7 @@ export function sumSides({ value, zero }: Sum): Sides {
     effect: side('utilisation', value, '1'),
     resistance: side('limit', zero === undefined ? 1 : 0, '1'),
   };
-  return zero === undefined ? sides : { ...sides, reason: `${zero} is zero.` };
+  return zero === undefined
+    ? sides
+    : { ...sides, reason: `${zero} is zero: what else acts leaves nothing for it.` };
 }

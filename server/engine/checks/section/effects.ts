@@ -1,5 +1,5 @@
 import { readQuantity } from '../../units/quantity';
-import type { UnitName } from '../../units/units';
+import { toUnit, type UnitName } from '../../units/units';
 import type { SectionEffects } from '../contract';
 import type { CrossEffects } from '../cross-section/effects';
 import { isOpen } from '../cross-section/torsion';
@@ -71,9 +71,9 @@ function wantParts(given: SectionEffects, { name }: SteelSection): void {
   const items = parts
     .filter(([field]) => given[field] === undefined)
     .map(([field, words]) => ({
-      pointer: `/effects/${given.T === undefined ? field : 'T'}`,
+      pointer: `/effects/${field}`,
       code: 'torsion-parts-wanting',
-      message: `${name} is open: give the ${words} of its torsion as "${field}", 0 where there is none.`,
+      message: `${name} is open: give the ${words} of its torsion (${field}), 0 where there is none.`,
       clause: CLAUSE,
     }));
   const [first] = items;
@@ -85,7 +85,8 @@ const ROUNDING = 0.005;
 
 function agree(T: number, sum: number): void {
   if (Math.abs(T - sum) <= ROUNDING * Math.max(Math.abs(T), Math.abs(sum))) return;
-  refuse('contradiction', '/effects/T', 'T is not the sum of stVenant and warping.');
+  const [whole, parts] = [T, sum].map((value) => toUnit(value, 'kN m'));
+  refuse('contradiction', '/effects/T', `T is ${whole} kN m, but its parts add to ${parts} kN m.`);
 }
 
 interface Parts extends Torsion {
@@ -123,8 +124,8 @@ function ofAngle(given: SectionEffects, section: SteelSection, parts: Parts): To
   if (T !== 0 && given.stVenant === undefined) {
     refuse(
       'torsion-parts-wanting',
-      '/effects/T',
-      `${section.name} is open: give its torsion as "stVenant".`,
+      '/effects/stVenant',
+      `${section.name} is open: give its torsion as St Venant's part (stVenant).`,
       CLAUSE,
     );
   }

@@ -123,9 +123,9 @@ describe('shear', () => {
 
 describe('torsion', () => {
   test.each([
-    ['T without its parts', { T: 1 }, '/effects/T'],
+    ['T without its parts', { T: 1 }, '/effects/stVenant'],
     ['a warping part without the rest', { warping: 1 }, '/effects/stVenant'],
-    ['no bimoment', { T: 1, stVenant: 0.4, warping: 0.6 }, '/effects/T'],
+    ['no bimoment', { T: 1, stVenant: 0.4, warping: 0.6 }, '/effects/bimoment'],
   ] as const)('an open section is refused with %s', (_, effects, pointer) => {
     const refusal = refusalOfSection({ material: s275, section: 'UB 457x191x67', effects });
     expect([refusal.items[0]?.pointer, refusal.items[0]?.clause]).toEqual([

@@ -75,7 +75,11 @@ function readNetArea({ netArea }: SectionRequest, section: SteelSection): number
   if (netArea === undefined) return undefined;
   const area = readQuantity(netArea, 'mm^2');
   if (area > section.properties.A) {
-    refuse('contradiction', '/netArea', 'The net area is no greater than the area.');
+    refuse(
+      'contradiction',
+      '/netArea',
+      `The net area cannot exceed the area, ${section.properties.A.toFixed(0)} mm².`,
+    );
   }
   return area;
 }
@@ -185,6 +189,12 @@ function advisoriesOf(
     });
   }
   if (effects.B !== 0) {
+    list.push({
+      code: 'bimoment-adds',
+      severity: 'info',
+      message:
+        'The bimoment is taken to add to whatever acts at every tip: the stresses are an envelope, not one state.',
+    });
     list.push({
       code: 'warping-elastic',
       severity: 'info',

@@ -16,6 +16,8 @@ export interface NamedState {
   readonly sigma_x: number;
   readonly sigma_z: number;
   readonly tau: number;
+  /** Where the numbers come from. */
+  readonly source: string;
 }
 
 /** Von Mises' criterion at the named point where it is worst. */
@@ -30,6 +32,7 @@ export function vonMises(
     sigma_x: sigma,
     sigma_z: 0,
     tau,
+    source: 'Elastic stress at the point',
   }));
   return worstOf(steel, states, withSteps);
 }
@@ -49,7 +52,7 @@ export function worstOf(steel: Yield, states: readonly NamedState[], withSteps: 
 
 function write({ f_y, gamma_M0 }: Yield, state: NamedState, sheet: Sheet): Sides {
   const at = (symbol: string, value: number, words: string): number =>
-    sheet.given(symbol, value, 'N/mm^2', `${words}: ${state.title}`, 'Elastic stress at the point');
+    sheet.given(symbol, value, 'N/mm^2', `${words}: ${state.title}`, state.source);
   const sigma_x_Ed = at('sigma_x_Ed', state.sigma_x, 'Stress along the member');
   const sigma_z_Ed = at('sigma_z_Ed', state.sigma_z, 'Stress across the member');
   const tau_Ed = at('tau_Ed', state.tau, 'Shear stress');

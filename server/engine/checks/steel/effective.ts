@@ -96,7 +96,7 @@ function reducible(section: SteelSection) {
   return refuse(
     'class-4',
     '/section',
-    `${name} is class 4 at f_y ${f_y} N/mm²; effective widths are made for I sections, channels and rectangular hollow sections only.`,
+    `${name} is class 4 at f_y ${f_y} N/mm²; effective widths are made for I sections, channels and rectangular hollow sections only. A thicker one or a lower grade is within class 3.`,
     shape.shape === 'CHS' ? 'EN 1993-1-6' : 'EN 1993-1-5 4.4',
   );
 }

@@ -9,7 +9,7 @@ import { readEffects } from '../section/effects';
 import { sketchOf } from '../section/sketch';
 import { grossStressMissing, pointsOf, stressesOf, wallsOf } from '../section/stresses';
 import { vonMises, worstOf, type NamedState } from '../section/von-mises';
-import { sectionAdvisories } from '../steel/advisories';
+import { factorAdvisory, sectionAdvisories } from '../steel/advisories';
 import { readSteel } from '../steel/material';
 import { readSteelSection } from '../steel/section';
 import { verificationAnswer, type Finding } from '../verification';
@@ -49,11 +49,12 @@ function ofStates(
       sigma_x: readQuantity(sigmaX, 'N/mm^2'),
       sigma_z: readQuantity(sigmaZ, 'N/mm^2'),
       tau: readQuantity(tau, 'N/mm^2'),
+      source: 'Given by the caller',
     }),
   );
   const found = worstOf({ f_y, gamma_M0 }, states, detail === 'full');
   return {
-    ...assembled([found], profile, common, detail, [], []),
+    ...assembled([found], profile, common, detail, [], factorAdvisory(gamma_M0)),
     points: states.map(({ id, title, sigma_x, sigma_z, tau }) => ({
       id,
       title,
