@@ -55,8 +55,9 @@ export function layoutStress(
     top: REACH + 22,
     bottom: REACH + 24,
   });
-  const stations = walls.map((wall) => stationsOf(wall, of));
-  const most = Math.max(...stations.flat().map(({ value }) => Math.abs(value)), 1e-12);
+  const rough = walls.map((wall) => stationsOf(wall, of));
+  const most = Math.max(...rough.flat().map(({ value }) => Math.abs(value)), 1e-12);
+  const stations = rough.map((wall) => wall.map((station) => cleared(station, most)));
   const put = (station: Station, size: number): Place => ({
     y: fit.x(station.y) + station.out.y * size,
     z: fit.y(station.z) + station.out.z * size,
@@ -70,7 +71,8 @@ export function layoutStress(
     for (const run of runsOf(stations[index] ?? [])) {
       const edge = run.map((station) => put(station, size(station)));
       const foot = run.map((station) => put(station, base)).reverse();
-      const shape = pathOf([...edge, ...foot]);
+      // A ring has no ends: its edge and its foot are two lines, not one that turns back at a seam.
+      const shape = isRing(run) ? pathOf(edge) + pathOf(foot) : pathOf([...edge, ...foot]);
       if (of === 'sigma' && run.some(({ value }) => value < 0)) {
         edged.push(shape);
         lines.push(
@@ -95,9 +97,11 @@ export function layoutStress(
 
 /** The points of a wall with the way outwards; a wall through the centroid is drawn to the right. */
 function stationsOf({ points }: StressWall, of: StressName): Station[] {
+  const ring = isRing(points);
+  const last = points.length - 1;
   const normals = points.map((_, index) => {
-    const before = points[Math.max(0, index - 1)];
-    const after = points[Math.min(points.length - 1, index + 1)];
+    const before = points[index === 0 ? (ring ? last - 1 : 0) : index - 1];
+    const after = points[index === last ? (ring ? 1 : last) : index + 1];
     const [y, z] = [(after?.y ?? 0) - (before?.y ?? 0), (after?.z ?? 0) - (before?.z ?? 0)];
     const length = Math.hypot(y, z) || 1;
     return { y: -z / length, z: y / length };
@@ -133,9 +137,29 @@ function runsOf(stations: readonly Station[]): Station[][] {
       runs.push([zero]);
     }
     runs.at(-1)?.push(station);
+    if (station.value === 0) runs.push([station]);
   });
+  const [first, last] = [runs[0], runs.at(-1)];
+  // Where a ring begins is no end of what runs over it.
+  if (first && last && first !== last && isRing(stations) && stations[0]?.value !== 0)
+    runs.splice(0, runs.length, ...runs.slice(1, -1), [...last, ...first.slice(1)]);
   return runs.filter((run) => run.some(({ value }) => value !== 0));
 }
+
+/** Whether a line ends where it began. */
+function isRing(places: readonly Place[]): boolean {
+  const [first, last] = [places[0], places.at(-1)];
+  return (
+    places.length > 3 &&
+    first !== undefined &&
+    last !== undefined &&
+    Math.hypot(first.y - last.y, first.z - last.z) < 1e-6
+  );
+}
+
+/** What is left of a reckoning at the neutral axis is nothing. */
+const cleared = (station: Station, most: number): Station =>
+  Math.abs(station.value) < most * 1e-6 ? { ...station, value: 0 } : station;
 
 /** Lines across a stretch every few px of its length. */
 function linesAcross(
