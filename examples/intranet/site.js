@@ -11,7 +11,8 @@ function note(name, words) {
 
 document.addEventListener('headtree-input', ({ detail }) => {
   line.textContent = 'Changed since the last answer.';
-  note('headtree-input', `${JSON.stringify(detail.value).length} characters of JSON`);
+  const size = detail.value && JSON.stringify(detail.value).length;
+  note('headtree-input', size ? `${size} characters of JSON` : 'nothing that can be sent');
 });
 
 document.addEventListener('headtree-result', ({ detail: { result } }) => {

@@ -73,6 +73,23 @@ describe.each(elements)('%s', (element, value) => {
     expect(await field(page, 'My, about y-y').inputValue()).toBe('180');
   });
 
+  it('has neither answer nor value while a field cannot be read, and says so', async () => {
+    const page = await bench.open({ element, value, prepare: rememberEvents });
+    await answerOf(page);
+    await field(page, 'My, about y-y').fill('abc');
+    const state = await check(page).evaluate((node) => {
+      const { result, value } = node as WalerElement;
+      return { result, value, passes: node.matches(':state(pass)') };
+    });
+    expect(state).toEqual({ result: null, value: null, passes: false });
+    await field(page, 'My, about y-y').fill('20');
+    await answerOf(page);
+    const names = (await told(page)).map(({ name }) => name.replace('headtree-', ''));
+    expect(names).toEqual(['result', 'input', 'input', 'result']);
+    await check(page).evaluate((node) => ((node as WalerElement).value = null));
+    expect(await field(page, 'My, about y-y').inputValue()).toBe('');
+  });
+
   it('shows the answer to the last request only', async () => {
     const page = await bench.open({ element, value, prepare: rememberEvents });
     await answerOf(page);

@@ -24,6 +24,8 @@ export abstract class CheckBase<Request extends object, Typed extends Draft> {
 
   /** The request after each change that can be read. */
   readonly valueChange = output<Request>();
+  /** Once when the fields, by what was typed, hold nothing any more that can be sent. */
+  readonly unread = output();
   /** Each new answer. */
   readonly result = output<CheckAnswer>();
   /** Why there is no answer. */
@@ -39,6 +41,7 @@ export abstract class CheckBase<Request extends object, Typed extends Draft> {
     profile: this.profile,
     credentials: this.credentials,
     onChange: (request) => this.valueChange.emit(request),
+    onUnread: () => this.unread.emit(),
     onAnswer: (answer) => this.result.emit(answer),
     onFailed: (error) => this.failed.emit(error),
   });

@@ -45,9 +45,13 @@ export interface CheckInputs<Request extends object> {
   readonly profile: Signal<string>;
   readonly credentials: Signal<Credentials>;
   onChange(request: Request): void;
+  /** The fields hold nothing that can be sent, where they did. */
+  onUnread(): void;
   onAnswer(answer: CheckAnswer): void;
   onFailed(error: ApiError): void;
 }
+
+const SECTION = 'a section';
 
 /** A check as it is filled in: what is typed, what was asked last and what came of it. */
 export class CheckSession<Request extends object, Typed extends Draft> {
@@ -55,6 +59,8 @@ export class CheckSession<Request extends object, Typed extends Draft> {
   private readonly csrfToken = inject(HEADTREE_CSRF_TOKEN);
   /** The request that was last given out, so that its return changes nothing that is typed. */
   private given: Request | null = null;
+  /** Whether it is known outside that the fields hold nothing that can be sent. */
+  private unread = true;
 
   readonly client = computed(() => {
     const { server, apiKey, credentials } = this.inputs;
@@ -66,23 +72,34 @@ export class CheckSession<Request extends object, Typed extends Draft> {
     this.client().check(this.kind().id, request, signal),
   );
   /** Whether something is being typed that does not count yet. */
-  readonly pending = signal(false);
-  /** Where the check stands; what is typed beyond it makes its answer an old one. */
-  readonly state = computed((): RunState => {
-    const state = this.runner.state();
-    return this.pending() && state.phase === 'answered' ? { ...state, phase: 'busy' } : state;
+  private readonly pending = signal(false);
+  /** Where the check stands. */
+  readonly state = computed((): RunState => this.runner.state());
+  /** How often the form was filled from outside: what is half typed then goes. */
+  readonly round = computed(() => {
+    this.draft();
+    return this.writes;
   });
+  private writes = 0;
   private readonly profiles = signal<readonly ProfileSummary[]>([]);
 
   /** The form as it is typed. */
   readonly draft = linkedSignal<[Request | null, string], Typed>({
     source: () => [this.inputs.value(), this.inputs.profile()],
     computation: ([value, profile], before) =>
-      before && same(value, this.given) && profile === before.source[1]
+      before && value && same(value, this.given) && profile === before.source[1]
         ? before.value
-        : this.kind().write(value, profile),
+        : this.write(value, profile),
   });
-  readonly reading = computed(() => this.kind().read(this.draft()));
+  /** The form as a request; none while something is being typed or a person chose no factors. */
+  readonly reading = computed((): DraftReading<Request> => {
+    const reading = this.kind().read(this.draft());
+    const wanting = [...reading.wanting];
+    const { profile } = this.draft();
+    if (profile === '' && this.inputs.credentials() !== 'key') wanting.push('a factor profile');
+    if (this.pending() && !wanting.includes(SECTION)) wanting.unshift(SECTION);
+    return wanting.length > 0 ? { ...reading, request: null, wanting } : reading;
+  });
   /** What is wrong, beside its field or apart. */
   readonly placed = computed(() => {
     const { faults } = this.reading();
@@ -134,19 +151,21 @@ export class CheckSession<Request extends object, Typed extends Draft> {
 
   /** Puts the form back to the value that was last set from outside. */
   reset(): void {
-    this.given = null;
     this.runner.clear();
-    this.draft.set(this.kind().write(this.inputs.value(), this.inputs.profile()));
+    this.draft.set(this.write(this.inputs.value(), this.inputs.profile()));
   }
 
-  /** Takes what was typed and gives the request out where it is a new one. */
+  /** Takes what was typed and tells of it. */
   change(draft: Typed): void {
     this.draft.set(draft);
-    const { request } = this.reading();
-    if (request && !same(request, this.given)) {
-      this.given = request;
-      this.inputs.onChange(request);
-    }
+    this.tell();
+  }
+
+  /** Takes whether a designation is being typed that does not count yet. */
+  wait(pending: boolean): void {
+    if (pending === untracked(this.pending)) return;
+    this.pending.set(pending);
+    this.tell();
   }
 
   /** Takes a change of some fields. */
@@ -155,12 +174,33 @@ export class CheckSession<Request extends object, Typed extends Draft> {
   }
 
   chooseProfile(profile: string): void {
-    this.draft.update((draft) => ({ ...draft, profile }));
+    this.change({ ...this.draft(), profile });
   }
 
   /** Asks an absent service at once. */
   retry(): void {
     this.runner.tryNow();
+  }
+
+  /** Fills the form from outside. */
+  private write(value: Request | null, profile: string): Typed {
+    this.writes += 1;
+    this.given = null;
+    this.unread = value === null;
+    return this.kind().write(value, profile);
+  }
+
+  /** Gives the request out where it is a new one, and tells once when there is none any more. */
+  private tell(): void {
+    const { request } = untracked(this.reading);
+    if (!request) {
+      if (!this.unread) this.inputs.onUnread();
+      this.unread = true;
+    } else if (this.unread || !same(request, this.given)) {
+      this.unread = false;
+      this.given = request;
+      this.inputs.onChange(request);
+    }
   }
 
   private follow(request: Request | null): void {

@@ -82,6 +82,78 @@ describe('the cross-section check', () => {
     expect(given.at(-1)).toEqual(bench.sent.at(-1));
   });
 
+  /** What the check tells, in order; a request by its profile and its My. */
+  function told(): unknown[] {
+    const list: unknown[] = [];
+    bench.check.valueChange.subscribe((value) => list.push([value.profile, value.effects?.My]));
+    bench.check.unread.subscribe(() => list.push(null));
+    bench.check.result.subscribe(({ status }) => list.push(status));
+    return list;
+  }
+
+  it('tells once that nothing can be sent any more, and again when it can', async () => {
+    const sheet = await shown(atProp);
+    const list = told();
+    for (const text of ['abc', 'abcd', '180']) {
+      sheet.write('My', text);
+      await bench.pass();
+    }
+    expect(list).toEqual([null, ['uk-na', 180], 'pass']);
+  });
+
+  it('tells so while a designation is half typed, and answers again when it is left', async () => {
+    const sheet = await shown(atProp);
+    bench.sections = [ub, { ...ub, designation: 'UB 457x191x74' }];
+    const list = told();
+    sheet.section.write('Section', 'UB 457');
+    await bench.pass();
+    expect(list).toEqual([null]);
+    expect(sheet.answer.status).toBe('Not checked yet');
+    expect(sheet.answer.text).toContain('Give a section. The answer stands here as soon as it is');
+    sheet.section.write('Section', 'UB 457x191x67');
+    sheet.section.leave();
+    await bench.pass();
+    expect(list).toEqual([null, ['uk-na', 180], 'pass']);
+  });
+
+  it('lets what is half typed go on reset', async () => {
+    const sheet = await shown(null);
+    bench.sections = [ub, { ...ub, designation: 'UB 457x191x74' }];
+    sheet.section.write('Section', 'UB 4');
+    await bench.pass();
+    expect(sheet.section.options).toHaveLength(2);
+    bench.check.reset();
+    await bench.pass();
+    expect([sheet.section.input.value, sheet.section.options]).toEqual(['', []]);
+  });
+
+  it('tells of another factor profile as of any change', async () => {
+    const sheet = await shown(atProp);
+    const list = told();
+    const select = bench.host.querySelector<HTMLSelectElement>('.ht-factors select');
+    if (select) select.value = '';
+    select?.dispatchEvent(new Event('change'));
+    await bench.pass();
+    expect(list).toEqual([[undefined, 180], 'pass']);
+    expect(sheet.answer.status).toBe('Pass');
+  });
+
+  it('wants a factor profile from a person, and sends nothing without', async () => {
+    const { profile: _, ...bare } = atProp;
+    const sheet = await shown(bare, { credentials: 'session', apiKey: '' });
+    expect(sheet.answer.text).toContain('Give a factor profile.');
+    expect(bench.sent).toEqual([]);
+  });
+
+  it('is empty again when it is given null', async () => {
+    const sheet = await shown(atProp);
+    sheet.write('My', '20');
+    await bench.pass();
+    bench.fixture.componentRef.setInput('value', null);
+    await bench.pass();
+    expect([sheet.field('My').value, sheet.section.input.value]).toEqual(['', '']);
+  });
+
   it('gives an axial force as compression or tension, never with a sign', async () => {
     const sheet = await shown(atProp);
     sheet.write('Axial force', 'tension');

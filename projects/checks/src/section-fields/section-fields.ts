@@ -46,6 +46,8 @@ export class SectionFields {
   /** What the catalogue holds of the designation; its dimensions are begun from. */
   readonly line = input<SectionLine | null>(null);
   readonly readonly = input(false);
+  /** How often the form was filled from outside. */
+  readonly round = input(0);
 
   /** Whether a designation is being typed that does not count yet. */
   readonly pending = output<boolean>();
@@ -59,8 +61,8 @@ export class SectionFields {
     const line = this.draft().way === 'designation' ? this.line() : null;
     const shape = choiceOf(way)?.shape;
     const alike = line && (line.shape === shape || (line.shape === 'RHS' && shape === 'SHS'));
-    this.pending.emit(false);
     this.set({ way, ...(alike && { sizes: { ...this.draft().sizes, ...sizesFrom(line) } }) });
+    this.pending.emit(false);
   }
 
   protected size(name: DimensionName, text: string): void {

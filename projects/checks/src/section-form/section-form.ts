@@ -34,6 +34,8 @@ export class SectionForm {
   /** The section as it is drawn: what the catalogue holds of it, and whether it is open. */
   readonly drawn = input.required<DrawnSection>();
   readonly readonly = input(false);
+  /** How often the form was filled from outside. */
+  readonly round = input(0);
 
   /** What was changed. */
   readonly changed = output<Partial<UnderEffects>>();

@@ -8,6 +8,7 @@ import {
   model,
   output,
   signal,
+  untracked,
   viewChild,
   type ElementRef,
   ViewEncapsulation,
@@ -44,13 +45,18 @@ export class SectionPicker {
   readonly shapes = input<readonly CatalogueShape[]>([]);
   readonly readonly = input(false);
   readonly fault = input<FieldFault>();
+  /** How often the form was filled from outside: what is half typed then goes. */
+  readonly round = input(0);
 
   /** Whether something is typed that does not count yet: no answer belongs to it. */
   readonly pending = output<boolean>();
 
   protected readonly id = uniqueId();
   /** The text while it is typed, before it counts. */
-  protected readonly typed = linkedSignal(() => this.text());
+  protected readonly typed = linkedSignal<[string, number], string>({
+    source: () => [this.text(), this.round()],
+    computation: ([text]) => text,
+  });
   private readonly list = viewChild<ElementRef<HTMLElement>>('list');
   private readonly searched = new Subject<string>();
   protected readonly lines = signal<readonly SectionLine[]>([]);
@@ -64,6 +70,9 @@ export class SectionPicker {
 
   constructor() {
     effect(() => this.pending.emit(this.typed() !== this.text()));
+    effect(() => {
+      if (this.round() > 0) untracked(() => this.close());
+    });
     const none: readonly SectionLine[] | null = null;
     this.searched
       .pipe(

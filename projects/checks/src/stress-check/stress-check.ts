@@ -33,4 +33,10 @@ export class StressCheck extends CheckBase<StressRequest, StressDraft> {
     const { kept, grade } = this.session.draft();
     return gradeOptions(kept.material, grade);
   });
+
+  protected choose(way: StressWay): void {
+    this.session.set({ way });
+    // A designation that was being typed has left with its field.
+    this.session.wait(false);
+  }
 }

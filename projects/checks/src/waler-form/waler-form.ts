@@ -36,6 +36,8 @@ export class WalerForm {
   /** Where the catalogue is searched. */
   readonly client = input.required<ApiClient>();
   readonly readonly = input(false);
+  /** How often the form was filled from outside. */
+  readonly round = input(0);
 
   /** Whether a section is being typed that does not count yet. */
   readonly pending = output<boolean>();

@@ -77,13 +77,16 @@ export function makeCheckElement(
       this.#strategy.setInputValue('apiKey', isSecretKey(text) ? SECRET_KEY : text);
     }
 
-    /** The request in the fields: what was last set, or typed since; null for empty fields. */
+    /**
+     * The request in the fields: what was last set, or typed since; null for empty fields and
+     * while something typed cannot be sent.
+     */
     get value(): object | null {
       return (this.#strategy.getInputValue('value') as object | null | undefined) ?? null;
     }
     set value(value: object | null) {
       this.#said.textContent = '';
-      if (value === this.value) return;
+      if (value && value === this.value) return;
       this.#strategy.setInputValue('value', value ?? null);
       this.#forget();
     }
@@ -186,7 +189,7 @@ export function makeCheckElement(
       this.#internals.setFormValue(value && JSON.stringify(value));
     }
 
-    #onInput(value: object): void {
+    #onInput(value: object | null): void {
       this.#said.textContent = '';
       this.#forget();
       this.#tell('headtree-input', { value });

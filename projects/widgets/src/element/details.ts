@@ -1,9 +1,9 @@
 import type { ApiError, CheckAnswer } from '@headtree/checks';
 
-/** `detail` of `headtree-input`: after each change by the user that can be read. */
+/** `detail` of `headtree-input`: after each change by the user that can be sent, and once when none can. */
 export interface InputDetail {
-  /** The request as it now stands. */
-  readonly value: object;
+  /** The request as it now stands; null while the fields hold none that can be sent. */
+  readonly value: object | null;
 }
 
 /** `detail` of `headtree-result`: a new answer. */

@@ -18,6 +18,7 @@ import { linger, stay, type Lingering } from './lingering';
 /** What every check of the library offers to its element. */
 export interface CheckComponent {
   readonly valueChange: OutputRef<object>;
+  readonly unread: OutputRef<void>;
   readonly result: OutputRef<CheckAnswer>;
   readonly failed: OutputRef<ApiError>;
   check(): Promise<CheckAnswer | undefined>;
@@ -28,7 +29,8 @@ export interface CheckComponent {
 export interface CheckListener {
   /** Where the check is drawn. */
   readonly place: Element;
-  onInput(value: object): void;
+  /** A change by the user; null where the fields hold nothing any more that can be sent. */
+  onInput(value: object | null): void;
   onResult(answer: CheckAnswer): void;
   onFailed(error: ApiError): void;
 }
@@ -43,8 +45,10 @@ export class KeptStrategy implements NgElementStrategy, Lingering {
   readonly events: Observable<NgElementStrategyEvent> = EMPTY;
   /** As they were set from outside. */
   private readonly inputs = new Map<string, unknown>();
-  /** The value as the user has changed it since. */
+  /** The value as the user has changed it since, as far as it could be sent. */
   private typed: object | undefined;
+  /** Whether the fields hold nothing that can be sent, by what the user typed. */
+  private unread = false;
   /** The value that the check was given last. */
   private shown: unknown;
   private made: ComponentRef<CheckComponent> | undefined;
@@ -83,18 +87,26 @@ export class KeptStrategy implements NgElementStrategy, Lingering {
   /** Puts the fields back to the value that was last set from outside. */
   reset(): void {
     this.typed = undefined;
+    this.unread = false;
     if (this.made) this.show(this.made, this.inputs.get('value') ?? null);
   }
 
   getInputValue(name: string): unknown {
-    return name === 'value' ? (this.typed ?? this.inputs.get(name)) : this.inputs.get(name);
+    if (name !== 'value') return this.inputs.get(name);
+    return this.unread ? null : this.held();
   }
 
   setInputValue(name: string, value: unknown): void {
     this.inputs.set(name, value);
     if (name !== 'value') return this.made?.setInput(name, value);
     this.typed = undefined;
+    this.unread = false;
     if (this.made) this.show(this.made, value);
+  }
+
+  /** The last value that could be sent. */
+  private held(): unknown {
+    return this.typed ?? this.inputs.get('value');
   }
 
   private show(made: ComponentRef<CheckComponent>, value: unknown): void {
@@ -116,12 +128,18 @@ export class KeptStrategy implements NgElementStrategy, Lingering {
       hostElement: listener.place,
     });
     for (const [name, value] of this.inputs) if (name !== 'value') made.setInput(name, value);
-    this.shown = this.getInputValue('value') ?? null;
+    this.shown = this.held() ?? null;
+    this.unread = false;
     made.setInput('value', this.shown);
-    const { valueChange, result, failed } = made.instance;
+    const { valueChange, unread, result, failed } = made.instance;
     valueChange.subscribe((value) => {
       this.typed = value;
+      this.unread = false;
       listener.onInput(value);
+    });
+    unread.subscribe(() => {
+      this.unread = true;
+      listener.onInput(null);
     });
     result.subscribe((answer) => listener.onResult(answer));
     failed.subscribe((error) => listener.onFailed(error));
