@@ -110,12 +110,14 @@ export const loaded: fc.Arbitrary<Loaded> = fc
   .tuple(
     anySection,
     fc.constantFrom(235, 275, 355, 460),
-    fc.array(part, { minLength: 5, maxLength: 5 }),
+    fc.array(part, { minLength: 6, maxLength: 6 }),
     fc.boolean(),
   )
   .map(([input, fy, parts, pulled]) => {
     const { A, W } = sizeOf(input);
-    const [n = 0, my = 0, mz = 0, vz = 0, vy = 0] = parts;
+    const [n = 0, my = 0, mz = 0, vz = 0, vy = 0, t = 0] = parts;
+    // Of an open section only its analysis tells the parts of torsion.
+    const twists = !['I', 'channel', 'angle'].includes(input.shape);
     const N = (Math.abs(n) * A * fy) / 1e3;
     return {
       section: input,
@@ -126,6 +128,7 @@ export const loaded: fc.Arbitrary<Loaded> = fc
         Mz: (mz * W.z * fy) / 1e6,
         Vz: (vz * A * fy) / 2e3,
         Vy: (vy * A * fy) / 2e3,
+        ...(twists && { T: (t * Math.min(W.y, W.z) * fy) / 1e6 }),
       },
     };
   });

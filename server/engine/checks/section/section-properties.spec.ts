@@ -81,7 +81,7 @@ describe('what must always hold for a cross-section', () => {
     fc.assert(
       fc.property(loaded, (one) => {
         const before = answered(one);
-        const turned = scaled(one.effects, (name) => (/^[MV]/.test(name) ? -1 : 1));
+        const turned = scaled(one.effects, (name) => (/^[MVT]/.test(name) ? -1 : 1));
         const after = answered({ ...one, effects: turned });
         if (before && after) same(before, after);
       }),
@@ -105,6 +105,8 @@ describe('what must always hold for a cross-section', () => {
         if (!before || !after) return;
         const [upright, lying] = [utilisations(before), utilisations(after)];
         for (const [id, utilisation] of Object.entries(upright)) {
+          // 7.1 of EN 1993-1-5 is of webs along z-z; along y-y 6.2.8 stands for it.
+          if (section.shape === 'RHS' && id.startsWith('bending-shear')) continue;
           // N beside shear alone stands under one name, whichever way the section lies.
           const other = lying[side(id)] ?? lying[id] ?? NaN;
           if (utilisation === Infinity) expect(other).toBe(Infinity);
@@ -121,6 +123,7 @@ describe('what must always hold for a cross-section', () => {
     const units: Readonly<Record<string, readonly [number, string]>> = {
       My: [KIP * 0.3048, 'kip ft'],
       Mz: [KIP * 0.3048, 'kip ft'],
+      T: [KIP * 0.3048, 'kip ft'],
       Vz: [KIP, 'kip'],
       Vy: [KIP, 'kip'],
       compression: [KIP, 'kip'],
