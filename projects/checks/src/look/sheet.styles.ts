@@ -36,6 +36,7 @@ export const sheet = `
   .ht-sheet { border: 0; font-size: 10.5pt; }
   .ht-button, .ht-no-print, .ht-more > summary::before { display: none !important; }
   .ht-head, .ht-work, .ht-margin, .ht-below, .ht-say { padding-inline: 0; }
+  .ht-ver .ht-link { text-decoration: none; }
   .ht-margin > htc-answer-panel { position: static; }
   .ht-more::details-content { content-visibility: visible; block-size: auto; }
   .ht-field, .ht-load, .ht-line, .ht-table tr, .ht-figure, .ht-ver > li { break-inside: avoid; }

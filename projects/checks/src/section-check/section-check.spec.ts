@@ -85,7 +85,7 @@ describe('the cross-section check', () => {
   /** What the check tells, in order; a request by its profile and its My. */
   function told(): unknown[] {
     const list: unknown[] = [];
-    bench.check.valueChange.subscribe((value) => list.push([value.profile, value.effects?.My]));
+    bench.check.valueChange.subscribe((value) => list.push([value.profile, value.effects.My]));
     bench.check.unread.subscribe(() => list.push(null));
     bench.check.result.subscribe(({ status }) => list.push(status));
     return list;
@@ -139,8 +139,10 @@ describe('the cross-section check', () => {
   });
 
   it('wants a factor profile from a person, and sends nothing without', async () => {
-    const { profile: _, ...bare } = atProp;
-    const sheet = await shown(bare, { credentials: 'session', apiKey: '' });
+    const sheet = await shown({ ...atProp, profile: undefined } as never, {
+      credentials: 'session',
+      apiKey: '',
+    });
     expect(sheet.answer.text).toContain('Give a factor profile.');
     expect(bench.sent).toEqual([]);
   });

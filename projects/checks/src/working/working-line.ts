@@ -10,6 +10,7 @@ import { Scrolls } from '../look/scrolls';
 import { readableQuantity } from '../quantity/format';
 import { MathPiece } from './math-line';
 import { numberElement, numbersIn, takesNumbers } from './numbers-in';
+import { plainText } from './plain-text';
 import { symbolElement } from './symbols';
 
 const EQUALS: MathElement = { tag: 'mo', text: '=' };
@@ -42,7 +43,7 @@ export class WorkingLine {
   protected readonly words = computed(() => {
     const { kind, substituted, because = '' } = this.step();
     if (kind === 'choice') return because;
-    return kind === 'formula' && !this.formula() ? substituted : '';
+    return kind === 'formula' && !this.formula() ? plainText(substituted) : '';
   });
   /** Every number that was put in, exact. */
   protected readonly exact = computed(() => {

@@ -3,6 +3,7 @@ import { answerOf } from '../../testing/answers';
 import type { Formula, MathElement } from '../contract';
 import { mathNode } from './math-line';
 import { numbersIn } from './numbers-in';
+import { plainText } from './plain-text';
 import { symbolElement } from './symbols';
 import { WorkingSheet } from './working-sheet';
 
@@ -99,7 +100,31 @@ describe('the working', () => {
     fixture.detectChanges();
     await fixture.whenStable();
     expect((fixture.nativeElement as HTMLElement).textContent).toContain(
-      '(1224000 mm^3) * (265 N/mm^2) / 1',
+      '(1\u202f224\u202f000 mm³) · (265 N/mm²) / 1',
     );
+  });
+
+  it('rounds numbers and prints signs in that text', () => {
+    const text = plainText('sqrt((-12.345678901234567 mm) ^ 2 + (0.5 - 1.1e-7 m^4) * x_1 ^ 10)');
+    expect(text).toBe('sqrt((−12.35 mm)² + (0.5 − 110·10⁻⁹ m⁴) · x_1 ^ 10)');
+  });
+
+  it('asks for what is closed once the answer has stood a while, and before it is printed', async () => {
+    jest.useFakeTimers();
+    const [first] = answerOf().steps ?? [];
+    const closed = { ...first, formula: 'V_c-1', verification: 'shear-z' };
+    const ask = jest.fn().mockReturnValue(new Promise(() => undefined));
+    const fixture = TestBed.createComponent(WorkingSheet);
+    fixture.componentRef.setInput('answer', answerOf({ steps: [closed] as never }));
+    fixture.componentRef.setInput('client', { formula: ask });
+    fixture.detectChanges();
+    await jest.advanceTimersByTimeAsync(1000);
+    expect(ask).not.toHaveBeenCalled();
+    await jest.advanceTimersByTimeAsync(1500);
+    expect(ask.mock.calls).toEqual([['V_c-1']]);
+    ask.mockClear();
+    window.dispatchEvent(new Event('beforeprint'));
+    expect(ask.mock.calls).toEqual([['V_c-1']]);
+    jest.useRealTimers();
   });
 });
