@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -27,7 +28,7 @@ import {
 @Component({
   selector: 'htc-answer-panel',
   templateUrl: './answer-panel.html',
-  imports: [StatusMark, UtilisationBar],
+  imports: [NgTemplateOutlet, StatusMark, UtilisationBar],
   host: { class: 'ht-answer' },
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,
@@ -37,7 +38,7 @@ export class AnswerPanel {
   readonly state = input.required<RunState>();
   /** What is not given yet, in words. */
   readonly wanting = input<readonly string[]>([]);
-  /** How many fields cannot be read. */
+  /** How many fields cannot be read or miss what they need. */
   readonly unread = input(0);
   /** What is wrong and no field shows. */
   readonly faults = input<readonly FieldFault[]>([]);

@@ -27,6 +27,30 @@ describe('an interaction curve', () => {
     expect(point.y).toBeLessThan(bottom);
   });
 
+  it('has numbers with the decimals of their step, clear of each other and of the edge', () => {
+    const small = {
+      ...curve,
+      curve: [
+        { x: 0, y: 0.09 },
+        { x: 0.0125, y: 0 },
+      ],
+      point: { x: 0, y: 0 },
+    };
+    for (const one of [small, acting(62_000, 2_000_000)]) {
+      const { across, up, right } = layoutInteraction(one, 288);
+      const named = across.filter(({ text }) => text !== '');
+      for (const [index, { at, text }] of named.entries()) {
+        expect(at + (text.length * 7.25) / 2).toBeLessThanOrEqual(288);
+        const before = named[index - 1];
+        if (before) expect(at - before.at).toBeGreaterThan(text.length * 7.25);
+      }
+      expect(right).toBeLessThan(288);
+      expect(new Set(up.map(({ text }) => text)).size).toBe(up.length);
+    }
+    const { up } = layoutInteraction(small, 288);
+    expect(up.map(({ text }) => text)).toEqual(['0.00', '0.02', '0.04', '0.06', '0.08', '0.10']);
+  });
+
   it('says in words whether what acts is inside, as its verification has it', () => {
     const fixture = TestBed.createComponent(InteractionDiagram);
     fixture.componentRef.setInput('curve', acting(500, 250));

@@ -1,5 +1,4 @@
 import type { InteractionCurve } from '../contract';
-import { decimalsOf } from '../envelope-diagram/layout-diagram';
 import { textWidth } from '../member-drawing/scale';
 import { fixed } from '../quantity/format';
 
@@ -38,7 +37,11 @@ export function layoutInteraction(
   const xs = ticksTo(Math.max(...all.map(({ x }) => x)));
   const ys = ticksTo(Math.max(...all.map(({ y }) => y)));
   const left = Math.max(...ys.map((value) => textWidth(fixed(value, decimals(ys))))) + 12;
-  const right = width - 20;
+  const names = xs.map((value) => fixed(value, decimals(xs)));
+  const widest = Math.max(...names.map(textWidth));
+  // Half of the last number stands beyond its tick.
+  const right = width - Math.max(20, widest / 2 + 2);
+  const apart = Math.ceil((widest + 8) / ((right - left) / (xs.length - 1)));
   const bottom = TOP + PLOT;
   const [mostX, mostY] = [xs.at(-1) ?? 1, ys.at(-1) ?? 1];
   const px = (value: number): number => Math.round(value * 10) / 10;
@@ -52,7 +55,10 @@ export function layoutInteraction(
     right,
     top: TOP,
     bottom,
-    across: xs.map((value) => ({ at: x(value), text: fixed(value, decimals(xs)) })),
+    across: xs.map((value, index) => ({
+      at: x(value),
+      text: index % apart === 0 ? (names[index] ?? '') : '',
+    })),
     up: ys.map((value) => ({ at: y(value), text: fixed(value, decimals(ys)) })),
     area: `${line.join('')}L${x(0)} ${y(0)}Z`,
     curve: line.join(''),
@@ -63,8 +69,13 @@ export function layoutInteraction(
 /** Both effects act either way; the curve is drawn for their sizes. */
 const size = ({ x, y }: Point): Point => ({ x: Math.abs(x), y: Math.abs(y) });
 
-const decimals = (ticks: readonly number[]): number =>
-  (ticks[1] ?? 1) % 1 === 0 ? 0 : decimalsOf((ticks.at(-1) ?? 1) / 10);
+/** As many decimals as the step has itself. */
+function decimals([, step = 1]: readonly number[]): number {
+  let count = 0;
+  while (count < 9 && Math.abs(step * 10 ** count - Math.round(step * 10 ** count)) > 1e-6)
+    count += 1;
+  return count;
+}
 
 /** Round numbers from nothing to just beyond the greatest. */
 function ticksTo(greatest: number): number[] {

@@ -12,6 +12,10 @@ const json = (text: string, unit: Parameters<typeof readQuantity>[1] = 'm') => {
   return reading.state === 'ok' ? reading.value.json : reading.state;
 };
 
+it('reads a power of ten as part of its number, with a unit and without', () => {
+  expect([json('1e9'), json('1.5e3 kN', 'kN'), json('2e-3 m')]).toEqual([1e9, 1500, 0.002]);
+});
+
 describe('a number', () => {
   it.each([
     ['12,5', 12.5],

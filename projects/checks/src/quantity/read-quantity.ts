@@ -72,7 +72,9 @@ export function quantityNumber(json: QuantityInput | undefined, unit: FieldUnit)
 
 /** The number's part of a text and its unit's. */
 export function split(text: string): { digits: string; unitName: string } {
-  const found = /^([+\-−]?[\d.,\s'’\u00a0\u2009\u202f]*(?:\d[eE][+-]?\d{1,3})?)(.*)$/s.exec(text);
+  const found = /^([+\-−]?[\d.,\s'’\u00a0\u2009\u202f]*(?:(?<=\d)[eE][+-]?\d{1,3})?)(.*)$/s.exec(
+    text,
+  );
   return { digits: (found?.[1] ?? '').trim(), unitName: (found?.[2] ?? text).trim() };
 }
 

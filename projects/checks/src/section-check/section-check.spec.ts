@@ -54,7 +54,7 @@ describe('the cross-section check', () => {
       'Bending about y-y with axial force: what acts is inside the curve. ' +
         'Acts: M y,Ed 180 kN m with N Ed 250 kN. At most M y,Ed 404.5 kN m, N Ed 2351 kN.',
     );
-    expect(sheet.rows('named points')).toContain('web centre 0.0 0.0 −29.2 86.1 152.0');
+    expect(sheet.rows('named points')).toContain('web centre 152.0 −29.2 86.1 0.0 0.0');
   });
 
   it('draws the section from the catalogue before there is an answer', async () => {
@@ -195,6 +195,8 @@ describe('the cross-section check', () => {
     sheet.write('t, walls', '');
     await bench.pass();
     expect(sheet.fault('t, walls')).toBe('Give a value.');
+    expect(sheet.answer.text).toMatch(/marked beside its field|marked beside their fields/);
+    expect(sheet.answer.text).not.toContain('cannot be read');
   });
 
   it('shows the parts of a torsion on open sections, and wherever one is typed', async () => {

@@ -10,13 +10,12 @@ export const sectionDrawingStyles = `
 .ht-figure .ht-lost-lines { fill: none; stroke: var(--ht-ink); stroke-width: 1; }
 .ht-pair { display: grid; grid-template-columns: repeat(2, minmax(0, 1fr)); gap: 22px 24px; align-items: start; }
 .ht-pair:has(.ht-drawing-empty) { grid-template-columns: minmax(0, 1fr); }
-.ht-pair-table { grid-template-columns: 2fr 3fr; }
 .ht-row-section { grid-template-columns: 1.2fr 1.8fr 1fr; }
-.ht-row-sizes { grid-template-columns: repeat(auto-fit, minmax(116px, 1fr)); }
+.ht-row-sizes { grid-template-columns: repeat(4, minmax(0, 1fr)); }
 .ht-row-even { grid-template-columns: repeat(4, minmax(0, 1fr)); }
 .ht-axial { display: grid; grid-template-columns: subgrid; grid-column: span 2; gap: inherit; align-items: start; }
 @container ht-sheet (width < 620px) {
-  .ht-pair, .ht-pair-table { grid-template-columns: minmax(0, 1fr); }
+  .ht-pair { grid-template-columns: minmax(0, 1fr); }
   .ht-row-section, .ht-row-even, .ht-row-sizes { grid-template-columns: repeat(2, minmax(0, 1fr)); }
 }
 `;

@@ -26,6 +26,9 @@ export class SectionAndStress {
   readonly stale = input(false);
 
   protected readonly walls = computed(() => this.answer()?.walls ?? []);
+  protected readonly advice = computed(
+    () => this.answer()?.advisories.map(({ code }) => code) ?? [],
+  );
   protected readonly governing = computed(() => {
     const answer = this.answer();
     return answer ? governingPoint(answer) : undefined;
@@ -36,6 +39,13 @@ export class SectionAndStress {
     const any = this.walls().some(({ points }) =>
       points.some(({ sigma }) => Math.abs(sigma) > 1e-9),
     );
-    return sketch && any ? answeredSection(sketch) : null;
+    const section = sketch && any ? answeredSection(sketch) : null;
+    // Beside another section its stress would be read as the stress of that one.
+    return section && isAlike(section, this.model()) ? section : null;
   });
+}
+
+/** Whether both are drawn alike, but for what an answer adds. */
+function isAlike(one: SectionModel, other: SectionModel | null): boolean {
+  return one.shape === other?.shape && one.depth === other.depth && one.width === other.width;
 }

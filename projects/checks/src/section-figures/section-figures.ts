@@ -1,4 +1,3 @@
-import { NgTemplateOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -17,7 +16,7 @@ import { governingPoint } from './governing-point';
 @Component({
   selector: 'htc-section-figures',
   templateUrl: './section-figures.html',
-  imports: [InteractionDiagram, NgTemplateOutlet, PointsTable, StressDrawing],
+  imports: [InteractionDiagram, PointsTable, StressDrawing],
   host: { class: 'ht-figures' },
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,

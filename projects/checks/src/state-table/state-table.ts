@@ -1,8 +1,21 @@
-import { ChangeDetectionStrategy, Component, input, model, ViewEncapsulation } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  input,
+  model,
+  ViewEncapsulation,
+} from '@angular/core';
 import { TextField } from '../fields/text-field';
 import type { FieldFault } from '../form/field-reader';
 import { RowFocus } from '../form/row-focus';
-import { statePointer, stateRow, type StateRow, type StressComponent } from './states-draft';
+import {
+  stateNumbers,
+  statePointer,
+  stateRow,
+  type StateRow,
+  type StressComponent,
+} from './states-draft';
 
 /** States of stress, one a row; Enter goes down, and on the last row writes a new one. */
 @Component({
@@ -20,6 +33,7 @@ export class StateTable {
   readonly faults = input.required<ReadonlyMap<string, FieldFault>>();
   readonly readonly = input(false);
 
+  protected readonly numbers = computed(() => stateNumbers(this.rows()));
   private readonly keyboard = new RowFocus('.ht-state', 'sigmaX');
   protected readonly heads = [
     { symbol: 'σ', index: 'x', words: 'along' },

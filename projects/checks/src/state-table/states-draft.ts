@@ -33,6 +33,14 @@ export function isEmptyState(row: StateRow): boolean {
   return stressComponents.every((name) => row[name].trim() === '');
 }
 
+/** The numbers that the answer knows the rows by; none for an empty row before one that is sent. */
+export function stateNumbers(rows: readonly StateRow[]): (number | null)[] {
+  const counted = rows.map((row) => !isEmptyState(row));
+  const last = counted.lastIndexOf(true);
+  let number = 0;
+  return counted.map((counts, index) => (counts || index > last ? (number += 1) : null));
+}
+
 /** A row's place among the states that are sent. */
 export function statePointer(rows: readonly StateRow[], row: StateRow): string {
   const index = rows.filter((one) => !isEmptyState(one)).indexOf(row);

@@ -1,7 +1,7 @@
 import { CheckBench } from '../../testing/check-bench';
 import { sectionAnswerOf, statesAnswerOf } from '../../testing/section-answers';
 import { CheckHarness } from '../check/testing/check-harness';
-import { ElementHarness } from '../../testing/element-harness';
+import { ElementHarness, wordsOf } from '../../testing/element-harness';
 import type { StressRequest } from '../contract';
 import { StressCheck } from './stress-check';
 
@@ -57,8 +57,8 @@ describe('the stress check', () => {
     expect([bench.asked.at(-1), bench.sent.at(-1)]).toEqual(['stress', states]);
     expect(sheet.answer.text).toContain('Von Mises’ criterion governs state 2');
     expect(sheet.rows('States of stress')).toEqual([
-      'state 1 100.0 0.0 20.0 105.8',
-      'state 2 governs 180.0 −40.0 65.0 212.3',
+      'state 1 105.8 100.0 0.0 20.0',
+      'state 2 governs 212.3 180.0 −40.0 65.0',
     ]);
     expect(sheet.images).toEqual([]);
   });
@@ -76,6 +76,16 @@ describe('the stress check', () => {
     await bench.pass();
     expect(bench.sent.at(-1)?.states).toHaveLength(2);
     expect(document.activeElement?.getAttribute('aria-label')).toBe('Remove state 1');
+  });
+
+  it('numbers its states as the answer does, empty rows left out', async () => {
+    await shown(states);
+    for (const name of ['Stress along the member', 'Stress across the member', 'Shear stress'])
+      row(0).write(name, '');
+    await bench.pass();
+    const numbers = Array.from(bench.host.querySelectorAll('.ht-state-number'), wordsOf);
+    expect(numbers).toEqual(['–', '1']);
+    expect(rows()[1]?.getAttribute('aria-label')).toBe('State 1');
   });
 
   it('goes down with Enter, and on the last row writes a new one', async () => {

@@ -1,5 +1,6 @@
 import { modelOf, sectionAnswerOf } from '../../testing/section-answers';
-import { layoutStress, stressText } from './layout-stress';
+import { layoutStress } from './layout-stress';
+import { stressText } from './stress-labels';
 
 const { section, walls = [], points = [] } = sectionAnswerOf();
 const model = modelOf(section);
@@ -86,5 +87,81 @@ describe('stress along the walls', () => {
       for (const other of labels.slice(index + 1))
         expect(Math.abs(one.y - other.y) >= 14 || Math.abs(one.x - other.x) > 20).toBe(true);
     }
+  });
+
+  it('names the greatest of either sign, however near they stand', () => {
+    const close = points.map((point, index) => ({
+      ...point,
+      y: 95,
+      z: -226 + index,
+      sigma: index === 0 ? 120 : index === 1 ? -140 : 0,
+    }));
+    const { labels } = layoutStress(model, walls, close, 'sigma', 340, undefined);
+    expect(labels.map(({ text }) => text)).toEqual(['−140', '+120']);
+    expect(labels[1]?.line).toMatch(/^M/);
+  });
+
+  it('runs along the legs of an angle to its heel, and names the heel', () => {
+    const angle = modelOf({
+      name: 'L 100x100x10',
+      shape: 'angle',
+      dimensions: { h: 100, b: 100, t: 10, r1: 12, r2: 6 },
+      ineffective: [],
+    });
+    const { left, bottom } = angle.bounds;
+    const leg = [bottom - 100, bottom - 50, bottom - 5].map((z) => ({
+      y: left + 5,
+      z,
+      sigma: z,
+      tau: 0,
+    }));
+    const heel = { id: 'heel', title: 'Heel', y: left, z: bottom, sigma: 60, tau: 0, sigma_v: 60 };
+    const upright = [{ id: 'leg-vertical', title: 'Upright leg', t: 10, points: leg }];
+    const drawn = layoutStress(angle, upright, [heel], 'sigma', 340, undefined);
+    const zs = (path: string) =>
+      Math.max(...Array.from(path.matchAll(/ ([\d.]+)/g), ([, z]) => Number(z)));
+    expect(zs(drawn.filled)).toBeCloseTo(zs(drawn.outline), 0);
+    expect(drawn.labels.map(({ text }) => text)).toEqual(['+60.0']);
+  });
+
+  it('stands off a solid: over its depth beside it, over its width beneath', () => {
+    const flat = modelOf({
+      name: 'FL 100x40',
+      shape: 'rectangle',
+      dimensions: { h: 40, b: 100 },
+      ineffective: [],
+    });
+    const parts = [-1, 0, 1];
+    const lines = [
+      {
+        id: 'depth',
+        title: 'Over the depth',
+        t: 100,
+        points: parts.map((at) => ({ y: 0, z: at * 20, sigma: at * 50, tau: 15 * (1 - at ** 2) })),
+      },
+      {
+        id: 'width',
+        title: 'Over the width',
+        t: 40,
+        points: parts.map((at) => ({ y: at * 50, z: 0, sigma: 0, tau: 15 })),
+      },
+    ];
+    const shear = layoutStress(flat, lines, [], 'tau', 340, undefined);
+    expect(shear.titles.map(({ text }) => text)).toEqual(['τ at y = 0', 'τ at z = 0']);
+    const numbers = (path: string) => Array.from(path.matchAll(/[\d.]+/g), ([one]) => Number(one));
+    const drawn = numbers(shear.outline);
+    const [right, low] = [0, 1].map((odd) =>
+      Math.max(...drawn.filter((_, index) => index % 2 === odd)),
+    );
+    const [beside, beneath] = shear.filled.split('Z').map(numbers);
+    expect(Math.min(...(beside ?? []).filter((_, index) => index % 2 === 0))).toBeGreaterThan(
+      right ?? 0,
+    );
+    expect(Math.min(...(beneath ?? []).filter((_, index) => index % 2 === 1))).toBeGreaterThan(
+      low ?? 0,
+    );
+    const bent = layoutStress(flat, lines, [], 'sigma', 340, undefined);
+    expect(bent.titles.map(({ text }) => text)).toEqual(['σ at y = 0']);
+    expect(bent.labels.map(({ text }) => text).sort()).toEqual(['+50.0', '−50.0']);
   });
 });

@@ -8,7 +8,15 @@ import {
 import type { StressPoint, StressWall } from '../contract';
 import { elementWidth } from '../look/element-width';
 import type { SectionModel } from '../section-drawing/section-model';
-import { layoutStress, stressText, type StressName } from './layout-stress';
+import { layoutStress } from './layout-stress';
+import type { StressName } from './stations';
+import { stressText } from './stress-labels';
+
+/** What the drawing says of an advisory of the answer. */
+const ADVICE: Readonly<Record<string, string>> = {
+  'stress-of-gross-section': 'Of the gross section.',
+  'bimoment-adds': 'The bimoment is taken to add at every tip.',
+};
 
 /** How stress runs along the walls of a section, drawn outwards from each. */
 @Component({
@@ -24,6 +32,8 @@ export class StressDrawing {
   readonly points = input.required<readonly StressPoint[]>();
   /** Which stress is drawn. */
   readonly of = input<StressName>('sigma');
+  /** Codes of what the answer advises of. */
+  readonly advice = input<readonly string[]>([]);
   /** The point that governs, which gets a ring. */
   readonly governing = input<string>();
 
@@ -47,7 +57,11 @@ export class StressDrawing {
   });
   protected readonly legend = computed(() => {
     const ring = this.governing() ? ' Ringed: the point that governs.' : '';
-    if (this.of() === 'tau') return `Filled: its size, along the wall.${ring}`;
-    return `Filled: tension, +. Lined: compression, −.${ring}`;
+    const advised = Object.entries(ADVICE)
+      .filter(([code]) => this.advice().includes(code))
+      .map(([, text]) => ` ${text}`)
+      .join('');
+    if (this.of() === 'tau') return `Shaded: size of the shear stress.${ring}`;
+    return `Filled: tension, +. Lined: compression, −.${ring}${advised}`;
   });
 }
