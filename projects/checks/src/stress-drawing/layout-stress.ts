@@ -49,7 +49,7 @@ export function layoutStress(
   const fit = fitSection(model.bounds, width, {
     left: solid ? 20 : REACH + 50,
     right: REACH + (solid ? OFF + 54 : 50),
-    top: solid ? 26 : REACH + 22,
+    top: solid ? 32 : REACH + 22,
     bottom: REACH + (solid ? OFF + 22 : 24),
   });
   const rough = solid ? profilesOf(model, walls, of) : wallsOf(model, walls, of);
@@ -121,7 +121,7 @@ function basesOf(
       .join(''),
     titles: ends.map(({ start, end }) =>
       start.out.y === 1
-        ? { x: at(start).y, y: at(start).z - 9, text: `${NAMES[of]} at y = 0` }
+        ? { x: at(start).y, y: at(start).z - 16, text: `${NAMES[of]} at y = 0` }
         : { x: at(end).y + 8, y: at(end).z + 14, text: `${NAMES[of]} at z = 0` },
     ),
   };

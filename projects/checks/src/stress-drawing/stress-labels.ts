@@ -57,7 +57,14 @@ export function pointWishes(
   most: number,
   fit: Fit,
 ): Wish[] {
-  const placed = points.filter(({ y, z }) => y !== null && z !== null);
+  const placed: Pick<StressPoint, 'y' | 'z' | StressName>[] = points.filter(
+    ({ y, z }) => y !== null && z !== null,
+  );
+  // Between its named points a wall may be sheared the most: that is named as well.
+  const named = Math.max(0, ...placed.map((point) => Math.abs(point[of])));
+  const peak = stations.flat().find(({ value }) => Math.abs(value) === most);
+  if (of === 'tau' && peak && most > named * 1.02)
+    placed.push({ y: peak.y, z: peak.z, sigma: 0, tau: peak.value });
   const musts = extremes(
     placed.map((point) => point[of]),
     of,
@@ -78,7 +85,8 @@ export function pointWishes(
     const flat = Math.abs(out.y) < 0.4;
     // Beside the end of an upright wall the next wall runs: the value stands a line nearer the middle.
     const middle = fit.y(0);
-    const inwards = flat || Math.abs(foot - middle) < 24 ? 0 : Math.sign(middle - foot) * 10;
+    const upright = Math.abs(out.y) > 0.9;
+    const inwards = !upright || Math.abs(foot - middle) < 24 ? 0 : Math.sign(middle - foot) * 10;
     return [
       {
         tip: { y: x, z: foot + out.z * reach },
@@ -104,8 +112,12 @@ export function profileWishes(
       line.map(({ value }) => value),
       of,
     );
-    return [...musts].flatMap((index): Wish[] => {
-      const station = line[index];
+    return [...musts].flatMap((first): Wish[] => {
+      // Where many are alike, the one in the middle of them.
+      const size = Math.abs(line[first]?.value ?? 0);
+      const alike = line.filter(({ value }) => Math.abs(value) > size * (1 - 1e-6));
+      const even = alike.length === line.length;
+      const station = even ? alike[Math.floor(alike.length / 2)] : line[first];
       if (!station || Math.abs(station.value) < most * 0.02) return [];
       const { out, value } = station;
       const text = stressText(value, of);
