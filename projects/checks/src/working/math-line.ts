@@ -1,6 +1,7 @@
 import {
   ChangeDetectionStrategy,
   Component,
+  computed,
   DOCUMENT,
   effect,
   ElementRef,
@@ -9,6 +10,7 @@ import {
   ViewEncapsulation,
 } from '@angular/core';
 import type { MathElement } from '../contract';
+import { marksIn } from './breakable';
 
 const MATHML = 'http://www.w3.org/1998/Math/MathML';
 /** What a formula may be made of; anything else is left out. */
@@ -55,13 +57,22 @@ export function mathNode(document: Document, element: MathElement): Element | nu
 @Component({
   selector: 'htc-math',
   template: '',
-  host: { class: 'ht-math' },
+  host: {
+    class: 'ht-math',
+    '[class.ht-math-long]': 'marks() > 70',
+    '[class.ht-math-longest]': 'marks() > 120',
+  },
   changeDetection: ChangeDetectionStrategy.OnPush,
   encapsulation: ViewEncapsulation.None,
 })
 export class MathPiece {
   /** The elements of the piece, side by side. */
   readonly pieces = input.required<readonly MathElement[]>();
+
+  /** A fraction breaks nowhere: the longer it is, the smaller it is printed. */
+  protected readonly marks = computed(() =>
+    this.pieces().reduce((sum, piece) => sum + marksIn(piece), 0),
+  );
 
   constructor() {
     const host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;

@@ -8,12 +8,25 @@ import {
 import type { Formula, MathElement, Step } from '../contract';
 import { Scrolls } from '../look/scrolls';
 import { readableQuantity } from '../quantity/format';
+import { breakable, marksIn } from './breakable';
 import { MathPiece } from './math-line';
 import { numberElement, numbersIn, takesNumbers } from './numbers-in';
 import { plainText } from './plain-text';
 import { symbolElement } from './symbols';
 
 const EQUALS: MathElement = { tag: 'mo', text: '=' };
+
+/** Beyond so many marks a formula is given in pieces, to break on paper and on a telephone. */
+const LONG = 60;
+
+/** A formula behind what begins it. */
+function begun(
+  start: readonly MathElement[],
+  formula: MathElement,
+): readonly (readonly MathElement[])[] {
+  const [first = [], ...others] = marksIn(formula) > LONG ? breakable(formula) : [[formula]];
+  return [[...start, ...first], ...others];
+}
 
 /** One line of the working: the formula, the formula with its numbers, the value, the clause. */
 @Component({
@@ -36,8 +49,8 @@ export class WorkingLine {
     const elements = this.formula()?.elements as MathElement | undefined;
     const [symbol, , expression] = elements?.children ?? [];
     if (!symbol || !expression) return [[symbolElement(step.symbol ?? ''), ...value]];
-    const numbers = takesNumbers(expression) ? [[EQUALS, numbersIn(expression, step.inputs)]] : [];
-    return [[symbol, EQUALS, expression], ...numbers, value];
+    const put = takesNumbers(expression) ? begun([EQUALS], numbersIn(expression, step.inputs)) : [];
+    return [...begun([symbol, EQUALS], expression), ...put, value];
   });
   /** What stands under the line in words: why a choice was made, or the text of the formula. */
   protected readonly words = computed(() => {

@@ -1,6 +1,7 @@
 import { TestBed } from '@angular/core/testing';
 import { answerOf } from '../../testing/answers';
 import type { Formula, MathElement } from '../contract';
+import { breakable, marksIn } from './breakable';
 import { mathNode } from './math-line';
 import { numbersIn } from './numbers-in';
 import { plainText } from './plain-text';
@@ -51,6 +52,24 @@ describe('numbers in a formula', () => {
       '0.3333',
       '0.3333333333333333',
     ]);
+  });
+});
+
+describe('a long formula', () => {
+  it('is in pieces that begin with their sign; brackets stay whole', () => {
+    const bracket = row(mo('('), row(symbol('a'), mo('+'), symbol('b')), mo(')'));
+    const sum = row(
+      row(row(symbol('a'), mo('·'), symbol('b')), mo('+'), bracket),
+      mo('−'),
+      symbol('c'),
+    );
+    expect(breakable(sum).map((piece) => piece.map(textOf).join(''))).toEqual([
+      'a·b',
+      '+(a+b)',
+      '−c',
+    ]);
+    expect(breakable(expression)).toEqual([[expression]]);
+    expect(marksIn(sum)).toBe(11);
   });
 });
 

@@ -27,4 +27,9 @@ export const workingStyles = `
   .ht-line-clause { grid-column: 1; grid-row: auto; text-align: start; }
   .ht-lines { padding-inline-start: 0; }
 }
+@media print {
+  .ht-math math { font-size: 14px; }
+  .ht-math-long math { font-size: 9.5px; }
+  .ht-math-longest math { font-size: 6.5px; }
+}
 `;
