@@ -42,9 +42,6 @@ export function workingGroups(answer: CheckAnswer): WorkingGroup[] {
   });
 }
 
-/** How long an answer stands before the formulas of what is closed are asked for as well, in ms. */
-const SETTLED = 2000;
-
 /** The whole working: formulas, numbers and clauses, verification by verification. */
 @Component({
   selector: 'htc-working-sheet',
@@ -58,8 +55,6 @@ export class WorkingSheet {
   readonly answer = input.required<CheckAnswer>();
   /** Where the formulas are asked for. */
   readonly client = input.required<ApiClient>();
-  /** Whether the answer belongs to the form as it stands. */
-  readonly settled = input(true);
 
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
   protected readonly count = count;
@@ -79,16 +74,12 @@ export class WorkingSheet {
       const client = this.client();
       untracked(() => this.load(steps, client));
     });
-    // Paper shows all of it, and what is asked for as it is printed comes too late.
-    effect((onCleanup) => {
-      this.groups();
-      if (!this.settled()) return;
-      const waiting = setTimeout(() => this.loadAll(), SETTLED);
-      onCleanup(() => clearTimeout(waiting));
-    });
   }
 
-  /** Asks for the formulas of every line. */
+  /**
+   * Asks for the formulas of every line as the page is printed. What comes too late prints its text, and
+   * is there the next time: asking for all beforehand would fill the log with what nobody reads.
+   */
   protected loadAll(): void {
     this.load(this.answer().steps ?? [], this.client());
   }
