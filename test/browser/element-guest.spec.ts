@@ -48,6 +48,12 @@ describe('a page with a strict policy', () => {
     await answered(page);
     for (const details of await page.locator('headtree-waler details > summary').all())
       await details.click();
+    // Formulas come after the text that stands in for them, and their font after them.
+    await page.waitForFunction(() =>
+      [...document.fonts].some(
+        ({ family, status }) => family.includes('Headtree Math') && status === 'loaded',
+      ),
+    );
     await page.evaluate(() => document.fonts.ready);
     expect(await violations(page)).toEqual([]);
     expect(said).toEqual([]);
