@@ -1,15 +1,6 @@
 import { formula } from '../formula/formula';
 import { fillet, lengths } from './shapes/fillet';
 
-/** Dimensions of a rolled I or H section in mm. */
-export interface ISectionDimensions {
-  readonly h: number;
-  readonly b: number;
-  readonly t_w: number;
-  readonly t_f: number;
-  readonly r: number;
-}
-
 const root = fillet('r');
 
 const clause = 'Geometry of EN 10365 dimensions';

@@ -105,7 +105,6 @@ export interface Lost {
   readonly area: number;
   /** Length of one strip, mm. */
   readonly length: number;
-  readonly rho: number;
 }
 
 type Role = 'f' | 'w';
@@ -124,7 +123,6 @@ export function lostOf(
   return {
     area: sheet.evaluate(platesOfClass4[role].lost, { n, rho_p: rho, c, t }),
     length: (1 - rho) * c,
-    rho,
   };
 }
 

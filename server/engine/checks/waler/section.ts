@@ -27,7 +27,7 @@ export function readWalerSection(
   const { shape, name, f_y } = read;
   if (shape.shape !== 'I') {
     return notCovered(
-      pointerOf(section, 'shape'),
+      pointerOf(section),
       `${name} is no I or H section; a waler of another shape`,
       'EN 1993-1-1 6.2',
     );
@@ -36,7 +36,7 @@ export function readWalerSection(
   if (sectionClass === 4) {
     refuse(
       'class-4',
-      pointerOf(section, 'shape'),
+      pointerOf(section),
       `${name} is class 4 in bending at f_y ${f_y} N/mm²; effective sections are not covered by this version of the check.`,
       'EN 1993-1-5 4.4',
     );
@@ -46,9 +46,9 @@ export function readWalerSection(
   return waler;
 }
 
-function pointerOf(section: SectionInput, shape: string): string {
+function pointerOf(section: SectionInput): string {
   if (typeof section === 'string') return '/section';
-  return 'designation' in section ? '/section/designation' : `/section/${shape}`;
+  return 'designation' in section ? '/section/designation' : '/section/shape';
 }
 
 function refuseSlenderWeb(section: WalerSection, sheet: Sheet): void {
